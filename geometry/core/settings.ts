@@ -10,6 +10,8 @@ export interface ShopSettings {
   readonly connectors: ConnectorSettings;
   readonly spread: SpreadRates;
   readonly times: WorkTimes;
+  /** What differs from the shop's usual finish figures, by kind of finish. */
+  readonly finishes: Readonly<Partial<Record<'oil' | 'hard wax' | 'film', FinishSetting>>>;
 }
 
 export interface SeamLimits {
@@ -31,6 +33,14 @@ export interface ScrewSettings {
   /** Wood left above the point, at least. */
   readonly leftAbove: number;
   readonly spacing: number;
+  /** Screws of the fixed front line stand this far behind the top's front edge. */
+  readonly frontLine: number;
+  /** The rearmost, slotted screws stand this far before the top's back edge. */
+  readonly backLine: number;
+  /** A screw that bites less into the top does not hold it. */
+  readonly leastBite: number;
+  /** Clear of a piece's end, of a cutout and of a joint, at least. */
+  readonly edgeDistance: number;
 }
 
 export interface ConnectorSettings {
@@ -41,6 +51,8 @@ export interface ConnectorSettings {
   readonly firstFromEnd: number;
   /** Wood left between a mortise and the piece's edge, at least. */
   readonly cover: number;
+  /** Clear of screws and drawbolts, at least. */
+  readonly fromHardware: number;
 }
 
 export interface SpreadRates {
@@ -55,6 +67,13 @@ export interface WorkTimes {
   readonly cureHours: number;
   readonly recoatHours: number;
   readonly finishCureHours: number;
+}
+
+export interface FinishSetting {
+  readonly coats: number;
+  readonly sqFtPerQuart: number;
+  readonly recoatHours: number;
+  readonly cureHours: number;
 }
 
 /** Common practice, or from memory where no published figure was found; every one can be changed by the shop. */
@@ -78,8 +97,25 @@ export const DEFAULT_SETTINGS: ShopSettings = {
     shank: 0.19,
     leftAbove: 0.375,
     spacing: 16,
+    frontLine: 2.5,
+    backLine: 1.5,
+    leastBite: 0.625,
+    edgeDistance: 1.5,
   },
-  connectors: { kind: 'loose tenon', width: 0.9375, depth: 1.1875, spacing: 6, firstFromEnd: 3, cover: 0.25 },
+  connectors: {
+    kind: 'loose tenon',
+    width: 0.9375,
+    depth: 1.1875,
+    spacing: 6,
+    firstFromEnd: 3,
+    cover: 0.25,
+    fromHardware: 1.5,
+  },
   spread: { glueSqFtPerGallon: 200, finishSqFtPerQuart: 100 },
   times: { acclimatiseHours: 72, clampHours: 2, cureHours: 24, recoatHours: 12, finishCureHours: 168 },
+  finishes: {
+    oil: { coats: 3, sqFtPerQuart: 100, recoatHours: 24, cureHours: 720 },
+    'hard wax': { coats: 2, sqFtPerQuart: 250, recoatHours: 12, cureHours: 240 },
+    film: { coats: 3, sqFtPerQuart: 125, recoatHours: 4, cureHours: 168 },
+  },
 };

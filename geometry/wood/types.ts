@@ -14,6 +14,8 @@ export interface Movement {
   readonly grain: 'mixed' | 'flat' | 'edge';
   /** A moisture content lies outside 6 to 14 %, where the coefficient was measured. */
   readonly extrapolated: boolean;
+  /** The wood is not in the table, so the liveliest one that is was reckoned with. */
+  readonly assumedSpecies: boolean;
 }
 
 /** What wood and hardware add to a joint. Lengths inches. */
