@@ -1,0 +1,123 @@
+import { CholeskyDecomposition, EigenvalueDecomposition, Matrix } from 'ml-matrix';
+
+/**
+ * Smallest squared pivot, of normal equations scaled to a unit diagonal, that still counts as determined. Rounding
+ * leaves about 1e-15 in a direction that nothing fixes; the loosest chain with one-degree corners keeps over 1e-6.
+ */
+const SINGULAR_PIVOT = 1e-12;
+
+/** Weighted rows of a linearised network: row * step = misfit, each already divided by its standard deviation. */
+export interface WeightedSystem {
+  readonly unknowns: number;
+  /** One row per observation, `unknowns` long. */
+  readonly rows: readonly Float64Array[];
+  /** (value at the points - observed) / sd */
+  readonly misfits: Float64Array;
+}
+
+/** Normal equations of the system, factored. */
+export interface FactoredNormals {
+  /** The Gauss-Newton step, inches for every unknown. */
+  step(): Float64Array;
+  /** Inverse of the normal matrix, row by row. */
+  covariance(): Float64Array;
+}
+
+/**
+ * Builds and factors the normal equations, scaled to a unit diagonal so that the size of coordinates and weights does
+ * not matter.
+ *
+ * @param damping - added to the unit diagonal; 0 for plain Gauss-Newton
+ * @returns null when the observations leave some direction open
+ */
+export function factorNormals(system: WeightedSystem, damping = 0): FactoredNormals | null {
+  const { unknowns } = system;
+  const { normal, scale } = scaledNormals(system);
+  for (let i = 0; i < unknowns; i++) normal.set(i, i, 1 + damping);
+  if (scale.includes(0)) return null;
+  const cholesky = new CholeskyDecomposition(normal);
+  if (!cholesky.isPositiveDefinite()) return null;
+  const lower = cholesky.lowerTriangularMatrix;
+  for (let i = 0; i < unknowns; i++) if (!(lower.get(i, i) ** 2 > SINGULAR_PIVOT)) return null;
+  return {
+    step: () => {
+      const right = scaledRight(system, scale);
+      const solved = cholesky.solve(Matrix.columnVector(right));
+      return Float64Array.from(scale, (s, i) => s * solved.get(i, 0));
+    },
+    covariance: () => unscaledInverse(cholesky, scale),
+  };
+}
+
+/**
+ * Directions in which the points can move without any observation noticing.
+ *
+ * @returns unit vectors over the unknowns; empty when everything is determined
+ */
+export function openDirections(system: WeightedSystem): readonly Float64Array[] {
+  const { unknowns } = system;
+  const { normal, scale } = scaledNormals(system);
+  for (let i = 0; i < unknowns; i++) normal.set(i, i, scale[i] === 0 ? 0 : 1);
+  const eigen = new EigenvalueDecomposition(normal, { assumeSymmetric: true });
+  const vectors = eigen.eigenvectorMatrix;
+  const open: Float64Array[] = [];
+  eigen.realEigenvalues.forEach((value, k) => {
+    if (value > 1e-9) return;
+    const v = Float64Array.from(scale, (s, i) => (s === 0 ? 1 : s) * vectors.get(i, k));
+    const size = Math.hypot(...v);
+    open.push(v.map((x) => x / size));
+  });
+  return open;
+}
+
+function scaledNormals({ unknowns, rows }: WeightedSystem): { normal: Matrix; scale: Float64Array } {
+  const sums = new Float64Array(unknowns * unknowns);
+  const used = new Int32Array(unknowns);
+  for (const row of rows) {
+    // A tape reading touches four points at most, so most of a row is nothing.
+    let count = 0;
+    for (let i = 0; i < unknowns; i++) if (row[i] !== 0) used[count++] = i;
+    for (let p = 0; p < count; p++) {
+      const i = used[p]!;
+      for (let q = 0; q <= p; q++) sums[i * unknowns + used[q]!]! += row[i]! * row[used[q]!]!;
+    }
+  }
+  const scale = new Float64Array(unknowns);
+  for (let i = 0; i < unknowns; i++) {
+    const d = sums[i * unknowns + i]!;
+    scale[i] = d > 0 ? 1 / Math.sqrt(d) : 0;
+  }
+  const normal = new Matrix(unknowns, unknowns);
+  for (let i = 0; i < unknowns; i++) {
+    for (let j = 0; j < i; j++) {
+      const value = sums[i * unknowns + j]! * scale[i]! * scale[j]!;
+      normal.set(i, j, value);
+      normal.set(j, i, value);
+    }
+  }
+  return { normal, scale };
+}
+
+function scaledRight({ unknowns, rows, misfits }: WeightedSystem, scale: Float64Array): Float64Array {
+  const right = new Float64Array(unknowns);
+  rows.forEach((row, k) => {
+    const misfit = misfits[k]!;
+    for (let i = 0; i < unknowns; i++) right[i]! -= row[i]! * misfit;
+  });
+  for (let i = 0; i < unknowns; i++) right[i]! *= scale[i]!;
+  return right;
+}
+
+function unscaledInverse(cholesky: CholeskyDecomposition, scale: Float64Array): Float64Array {
+  const n = scale.length;
+  const inverse = cholesky.solve(Matrix.eye(n, n));
+  const out = new Float64Array(n * n);
+  for (let i = 0; i < n; i++) {
+    for (let j = 0; j <= i; j++) {
+      const value = inverse.get(i, j) * scale[i]! * scale[j]!;
+      out[i * n + j] = value;
+      out[j * n + i] = value;
+    }
+  }
+  return out;
+}
