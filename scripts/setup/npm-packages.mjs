@@ -1,0 +1,86 @@
+// @ts-check
+import { createHash } from 'node:crypto';
+import { existsSync, readFileSync, writeFileSync } from 'node:fs';
+import path from 'node:path';
+
+import { run } from './children.mjs';
+import { diskFull, saysDiskFull, SetupProblem } from './problem.mjs';
+import { step } from './steps.mjs';
+
+const STAMP = 'node_modules/.offsquare-lock';
+
+/**
+ * Installs the packages of the lock file unless node_modules already holds them.
+ *
+ * @param {string} root - absolute path of the checkout
+ */
+export async function ensureNpmPackages(root) {
+  const wanted = lockHash(root);
+  const stamp = path.join(root, STAMP);
+  if (existsSync(stamp) && readFileSync(stamp, 'utf8') === wanted) return;
+  if (!installedByLock(root)) await step('Installing npm packages from the lock file', () => install(root));
+  try {
+    writeFileSync(stamp, wanted);
+  } catch {
+    // Somebody else's checkout: without the note the next start compares the two lists again, which is quick.
+  }
+}
+
+/**
+ * @param {string} root
+ * @returns {string} changes whenever the lock file does
+ */
+function lockHash(root) {
+  return createHash('sha256')
+    .update(readFileSync(path.join(root, 'package-lock.json')))
+    .digest('hex');
+}
+
+/**
+ * npm keeps its own record of what it has put into node_modules; where it agrees with the lock, nothing is missing.
+ *
+ * @param {string} root
+ */
+export function installedByLock(root) {
+  const record = path.join(root, 'node_modules/.package-lock.json');
+  if (!existsSync(record)) return false;
+  const wanted = packagesOf(path.join(root, 'package-lock.json'));
+  const present = packagesOf(record);
+  return Object.entries(wanted).every(
+    ([name, entry]) => name === '' || entry.optional || entry.link || present[name]?.version === entry.version,
+  );
+}
+
+/**
+ * @param {string} file
+ * @returns {Record<string, {version?: string, optional?: boolean, link?: boolean}>}
+ */
+function packagesOf(file) {
+  return JSON.parse(readFileSync(file, 'utf8')).packages ?? {};
+}
+
+/** @param {string} root */
+async function install(root) {
+  // Under `npm start` npm says where it is itself, which is right even when PATH is not.
+  const script = process.env.npm_execpath;
+  const [command, first] = script ? [process.execPath, [script]] : ['npm', []];
+  const { code, output } = await run(command, [...first, 'ci', '--no-audit', '--no-fund'], { cwd: root });
+  if (code === 0) return;
+  if (saysDiskFull(output)) throw diskFull(root);
+  if (/EACCES|EPERM/.test(output)) {
+    throw new SetupProblem(
+      `npm may not write to ${root}: give this user the right to write there, or use a checkout of your own.`,
+    );
+  }
+  if (/ENOTFOUND|EAI_AGAIN|ECONNREFUSED|ETIMEDOUT|ECONNRESET/.test(output)) {
+    throw new SetupProblem(
+      'The npm registry cannot be reached: check the network and "npm config get registry", then run the same command again.',
+    );
+  }
+  throw new SetupProblem(`npm could not install the packages: ${lastLines(output)}`);
+}
+
+/** @param {string} output */
+function lastLines(output) {
+  return output.trim().split('\n').slice(-6).join('\n');
+}
