@@ -1,4 +1,5 @@
 import type { Point, Polygon } from '../core/point';
+import type { DisplayStep } from '../tape/format-length';
 
 /**
  * The display list: what a drawing is made of, painted alike on screen, on paper and into files. Places are inches of
@@ -8,6 +9,16 @@ export type Scene = {
   /** Smallest box that shows the drawing, inches. */
   readonly bounds: { readonly minX: number; readonly minY: number; readonly maxX: number; readonly maxY: number };
   readonly items: readonly DrawItem[];
+  /** What the drawing is called. */
+  readonly title?: string;
+  /** The drawing in a sentence, for those who cannot see it. */
+  readonly alt?: string;
+  /**
+   * The drawing is a page of paper of this size, inches: the plane is the page, px are 1/96 in and scale with it.
+   * Items of layer 'text' that follow each other with the same id are read as one paragraph, 'title' as its heading;
+   * items of layer 'frame' are only decoration; all others belong to the figure.
+   */
+  readonly paper?: { readonly width: number; readonly height: number };
 };
 
 /** Colour by role; the painter's theme says which colour it is. On paper everything is black on white. */
@@ -22,6 +33,7 @@ export type Ink =
   | 'red'
   | 'redT'
   | 'tape'
+  | 'ontape'
   | 'edge'
   | 'line'
   | 'wall'
@@ -44,6 +56,30 @@ export interface TextStyle {
   readonly weight: Weight;
   readonly size: number;
   readonly ink: Ink;
+}
+
+/** Part of a line of mixed text. `style` is the item's own where left out. */
+export type TextRun =
+  | { readonly text: string; readonly style?: TextStyle }
+  | { readonly inches: number; readonly step: DisplayStep; readonly unit?: boolean; readonly style?: TextStyle };
+
+/** px to the right and up from the item's place, on the unturned axes: what stands beside a line stays beside it at any zoom. */
+export type Shift = readonly [number, number];
+
+/** How text stands at its place. */
+export interface TextPlace {
+  /** Left end, middle or right end of the baseline. */
+  readonly at: Point;
+  readonly anchor: 'start' | 'middle' | 'end';
+  /** `at` is half-way up the capitals instead of on the baseline. */
+  readonly middle?: boolean;
+  readonly shift?: Shift;
+  /** Radians counter-clockwise; the painter flips nothing. */
+  readonly turn?: number;
+  /** Ground painted under the text, so that it reads over lines. */
+  readonly ground?: Ink;
+  /** Line round the ground. */
+  readonly frame?: Ink;
 }
 
 /** What a drawing item belongs to, for selection, layers and export. */
@@ -109,40 +145,53 @@ export type DrawItem = Tag &
         readonly outline: Polygon;
         readonly pattern: 'waste' | 'dots' | 'grain';
         readonly ink: Ink;
+        readonly holes?: readonly Polygon[];
       }
-    | {
+    | (TextPlace & {
         readonly kind: 'text';
-        readonly at: Point;
         readonly text: string;
         readonly style: TextStyle;
-        readonly anchor: 'start' | 'middle' | 'end';
-        /** Radians counter-clockwise; the painter flips nothing. */
-        readonly turn?: number;
         /** Largest width, px; longer text is wrapped at words, further lines below. */
         readonly wrap?: number;
-        /** Ground painted under the text, so that it reads over lines. */
-        readonly ground?: Ink;
-      }
+        /** Only the outlines of the letters. */
+        readonly hollow?: boolean;
+      })
     /** A length with its fraction stacked, in the step given. */
-    | {
+    | (TextPlace & {
         readonly kind: 'length';
-        readonly at: Point;
         readonly inches: number;
-        readonly step: string;
+        readonly step: DisplayStep;
         readonly unit: boolean;
         readonly style: TextStyle;
-        readonly anchor: 'start' | 'middle' | 'end';
-        readonly turn?: number;
-        readonly ground?: Ink;
-      }
-    /** A yellow tape blade lying along `turn` with a length on it. */
+      })
+    /** Text and lengths in one line, wrapped like text. */
+    | (TextPlace & {
+        readonly kind: 'runs';
+        readonly runs: readonly TextRun[];
+        readonly style: TextStyle;
+        readonly wrap?: number;
+      })
+    /** A yellow tape blade, its middle at `at`, lying along `turn` with a length on it; null says it is not taped. */
     | {
         readonly kind: 'blade';
         readonly at: Point;
         readonly inches: number | null;
-        readonly step: string;
+        readonly step: DisplayStep;
         readonly turn: number;
         readonly state: 'set' | 'retake' | 'empty' | 'selected' | 'twice';
+        readonly shift?: Shift;
+        /** The measuring end lies on the right: the blade was flipped to keep its number upright. */
+        readonly hookRight?: boolean;
+      }
+    /** A corner's tag, centred on its place: the angle over one word; '?' over it while nobody checked. */
+    | {
+        readonly kind: 'badge';
+        readonly at: Point;
+        readonly shift?: Shift;
+        /** Interior angle, degrees; null while nothing is known. */
+        readonly angleDeg: number | null;
+        readonly word: string;
+        readonly state: 'set' | 'unchecked' | 'retake';
       }
     /** Measured distance between two points with end ticks, drawn `offset` px to the left of from-to. */
     | {
@@ -151,7 +200,7 @@ export type DrawItem = Tag &
         readonly to: Point;
         readonly offset: number;
         readonly inches: number;
-        readonly step: string;
+        readonly step: DisplayStep;
         readonly style: TextStyle;
       }
     | {
@@ -163,13 +212,28 @@ export type DrawItem = Tag &
         readonly ink: Ink;
         readonly text?: string;
         readonly turn?: number;
+        readonly shift?: Shift;
       }
   );
 
 /**
  * disc: ink ring on card with a letter (face up); square: ink square with a light letter (face down); numbered: disc with a
- * cut number; point: small ring at a corner; longPoint / shortPoint: filled / open triangle touching an edge with its tip;
- * grainArrow: two-headed arrow along `turn`; tickBox: an empty box; handle: the seam's drag handle; warn: filled triangle.
+ * cut number; dot: filled; point: small ring at a corner; longPoint / shortPoint: filled / open triangle, tip up; grainArrow:
+ * two-headed arrow along `turn`; tickBox: an empty box; handle: the seam's drag handle; warn: filled triangle; turnOver: show
+ * face underneath; noAccess: no hand gets in from below; logo: the sign of the program.
  */
 export type MarkShape =
-  'disc' | 'square' | 'numbered' | 'point' | 'longPoint' | 'shortPoint' | 'grainArrow' | 'tickBox' | 'handle' | 'warn';
+  | 'disc'
+  | 'square'
+  | 'numbered'
+  | 'dot'
+  | 'point'
+  | 'longPoint'
+  | 'shortPoint'
+  | 'grainArrow'
+  | 'tickBox'
+  | 'handle'
+  | 'warn'
+  | 'turnOver'
+  | 'noAccess'
+  | 'logo';
