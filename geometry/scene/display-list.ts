@@ -33,7 +33,7 @@ export type Ink =
   | 'red'
   | 'redT'
   | 'tape'
-  | 'ontape'
+  | 'tapeInk'
   | 'edge'
   | 'line'
   | 'wall'

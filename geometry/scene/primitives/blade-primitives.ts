@@ -23,7 +23,7 @@ const BLADE_PAD = 17;
 const HOOK = 5;
 const TICK_GAP = 4.4;
 
-const BLADE_TEXT: TextStyle = { face: 'body', weight: 'bold', size: 18, ink: 'ontape' };
+const BLADE_TEXT: TextStyle = { face: 'body', weight: 'bold', size: 18, ink: 'tapeInk' };
 const NOT_TAPED: TextStyle = { face: 'body', weight: 'bold', size: 16, ink: 'ink2' };
 
 /** A blade of the tape: ticks on its upper edge, a dark hook at the measuring end, the length in its middle. */
@@ -51,7 +51,7 @@ export function bladePrimitives(blade: Blade, view: View): Primitive[] {
   }
   return [
     ...ring(blade, body, view),
-    { kind: 'path', path: body, fill: 'tape', line: { paint: 'ontape', width: 1.3 * view.pixel } },
+    { kind: 'path', path: body, fill: 'tape', line: { paint: 'tapeInk', width: 1.3 * view.pixel } },
     ticks(width, to, view),
     hook(blade, width, at, to, view),
     ...label,
@@ -73,7 +73,7 @@ function ticks(width: number, to: (x: number, y: number) => Point, view: View): 
     const long = i % 8 === 0 ? 9 : i % 2 === 0 ? 5.5 : 3.5;
     path.push(...pathThrough([to(x, top), to(x, top + long)], false));
   }
-  return { kind: 'path', path, line: { paint: 'ontape', width: 1 * view.pixel } };
+  return { kind: 'path', path, line: { paint: 'tapeInk', width: 1 * view.pixel } };
 }
 
 function hook(blade: Blade, width: number, at: Point, to: (x: number, y: number) => Point, view: View): PathPrimitive {
@@ -93,7 +93,7 @@ function check(width: number, to: (x: number, y: number) => Point, view: View): 
   return {
     kind: 'path',
     path: pathThrough([to(x, y), to(x + 3.5, y + 4), to(x + 10, y - 4)], false),
-    line: { paint: 'ontape', width: 1.8 * view.pixel },
+    line: { paint: 'tapeInk', width: 1.8 * view.pixel },
   };
 }
 
