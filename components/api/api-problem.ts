@@ -14,6 +14,8 @@ export type ApiProblem =
       readonly code: ProblemCode;
       readonly detail: string;
       readonly issues: readonly { readonly path: string; readonly message: string }[];
+      /** The whole answer, for problems that carry more than a sentence. */
+      readonly body: unknown;
     };
 
 /** A call that failed. Compare `problem.kind` and `problem.code`, never the message. */
