@@ -65,7 +65,8 @@ export function run(command, args, { cwd, env = process.env, show = false, onOut
  * @param {string} command
  * @param {readonly string[]} args
  * @param {{cwd: string, env: NodeJS.ProcessEnv}} options
- * @returns {Promise<Ended>} settles when it ends
+ * @returns {Promise<Ended>} settles when it ends; code 0 also when it closed down as it should after a signal
+ * @throws {Interrupted} when a signal ended it before it could
  */
 export function runUntilStopped(command, args, { cwd, env }) {
   if (stoppedBy) return Promise.reject(new Interrupted(stoppedBy));
@@ -78,7 +79,7 @@ export function runUntilStopped(command, args, { cwd, env }) {
     });
     child.once('exit', (code) => {
       running.delete(child);
-      if (stoppedBy) reject(new Interrupted(stoppedBy));
+      if (stoppedBy && code !== 0) reject(new Interrupted(stoppedBy));
       else resolve({ code: code ?? 1, output: '' });
     });
   });

@@ -19,6 +19,9 @@ export class Interrupted extends Error {
   }
 }
 
+/** What shells give a program that ended by the signal. @type {Partial<Record<NodeJS.Signals, number>>} */
+const SIGNAL_EXIT_CODES = { SIGHUP: 129, SIGINT: 130, SIGTERM: 143 };
+
 const FULL_DISK = /ENOSPC|no space left on device|could not extend file|not enough space|disk quota exceeded|EDQUOT/i;
 
 /**
@@ -56,4 +59,12 @@ export function sentenceFor(error, where) {
     return `${failure.path ?? where} cannot be written by this user: give this user the right to write there, or use a checkout of your own.`;
   }
   return text;
+}
+
+/**
+ * @param {unknown} error
+ * @returns {number} what the program should exit with, never 0
+ */
+export function exitCodeFor(error) {
+  return (error instanceof Interrupted && SIGNAL_EXIT_CODES[error.signal]) || 1;
 }

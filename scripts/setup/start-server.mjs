@@ -9,12 +9,11 @@ import { holdCluster, releaseCluster } from '../pg/holders.mjs';
 import { checkStopped, passSignalsOn, run, runUntilStopped } from './children.mjs';
 import { ensureDebianPackages } from './debian-packages.mjs';
 import { ensureNpmPackages } from './npm-packages.mjs';
-import { Interrupted, sentenceFor, SetupProblem } from './problem.mjs';
+import { exitCodeFor, Interrupted, sentenceFor, SetupProblem } from './problem.mjs';
 import { POSTGRESQL } from './required-packages.mjs';
 import { step } from './steps.mjs';
 
 const SERVER = ['--import', 'tsx', 'server/index.ts'];
-const SIGNAL_EXIT_CODES = { SIGHUP: 129, SIGINT: 130, SIGTERM: 143 };
 
 /**
  * `npm start`: sets up what is missing, then runs the server until it is stopped. Sets the exit code.
@@ -101,10 +100,4 @@ function keptSecret(state) {
  */
 function withoutEmpty(environment) {
   return Object.fromEntries(Object.entries(environment).filter(([, value]) => value !== ''));
-}
-
-/** @param {unknown} error */
-function exitCodeFor(error) {
-  if (!(error instanceof Interrupted)) return 1;
-  return SIGNAL_EXIT_CODES[/** @type {keyof typeof SIGNAL_EXIT_CODES} */ (error.signal)] ?? 1;
 }

@@ -1,36 +1,35 @@
 // @ts-check
 
-/** A step that takes longer than this says that it is still at it, ms. */
-const FIRST_WORD_MS = 2_000;
-/** Where lines cannot be rewritten, one line in this time, ms. */
+/** Where lines cannot be rewritten, a step that goes on says so once in this time, ms. */
 const NEXT_LINE_MS = 10_000;
 
 /**
- * Says what is being done, how long it has been going on, and how long it took.
+ * Says what is being done, how long it has been going on, and how it ended.
  *
  * @template T
  * @param {string} title - such as 'Installing npm packages'
  * @param {() => Promise<T>} work
- * @param {NodeJS.WriteStream} [out]
+ * @param {(result: T) => string} [outcome] - what to say of the result, 'done' unless given
  * @returns {Promise<T>} what `work` gives
  */
-export async function step(title, work, out = process.stdout) {
+export async function step(title, work, outcome = () => 'done') {
+  const out = process.stdout;
   const began = Date.now();
-  const seconds = () => Math.round((Date.now() - began) / 1000);
+  const finish = (/** @type {string} */ word) => {
+    const line = `${title}: ${word} in ${took(began)}`;
+    out.write(out.isTTY ? `\r${line}\x1b[K\n` : `${line}\n`);
+  };
   out.write(out.isTTY ? `${title} ...` : `${title} ...\n`);
-  const every = out.isTTY ? 1_000 : NEXT_LINE_MS;
-  const timer = setInterval(() => {
-    if (out.isTTY && Date.now() - began >= FIRST_WORD_MS) out.write(`\r${title} ... ${seconds()} s`);
-    if (!out.isTTY) out.write(`  ${title}: ${seconds()} s so far\n`);
-  }, every);
+  const timer = setInterval(
+    () => out.write(out.isTTY ? `\r${title} ... ${took(began)}` : `${title} ... ${took(began)}\n`),
+    out.isTTY ? 1_000 : NEXT_LINE_MS,
+  );
   try {
     const result = await work();
-    out.write(out.isTTY ? `\r${title}: done in ${took(began)}\x1b[K\n` : `${title}: done in ${took(began)}\n`);
+    finish(outcome(result));
     return result;
   } catch (error) {
-    out.write(
-      out.isTTY ? `\r${title}: stopped after ${took(began)}\x1b[K\n` : `${title}: stopped after ${took(began)}\n`,
-    );
+    finish('stopped');
     throw error;
   } finally {
     clearInterval(timer);

@@ -1,5 +1,6 @@
 // @ts-check
-import { existsSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
+import { existsSync, mkdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
+import os from 'node:os';
 import path from 'node:path';
 
 import { run } from '../setup/children.mjs';
@@ -52,11 +53,25 @@ async function exportApp(root, folder) {
   const expo = path.join(root, 'node_modules/expo/bin/cli');
   const { code, output } = await run(process.execPath, [expo, 'export', '-p', 'web', '--output-dir', folder], {
     cwd: root,
-    env: { ...process.env, CI: '1', EXPO_NO_TELEMETRY: '1', EXPO_OFFLINE: '1' },
+    env: {
+      ...process.env,
+      NODE_ENV: 'production',
+      CI: '1',
+      EXPO_NO_TELEMETRY: '1',
+      EXPO_OFFLINE: '1',
+      TMPDIR: cacheFolder(),
+    },
   });
   if (code === 0) return;
   if (saysDiskFull(output)) throw diskFull(root);
   throw new SetupProblem(`The web app could not be built:\n${output.trim().split('\n').slice(-30).join('\n')}`);
+}
+
+/** The bundler's cache lies in the temporary folder under a name that all users share, and only the first could write it. */
+function cacheFolder() {
+  const folder = path.join(os.tmpdir(), `offsquare-build-${process.getuid?.() ?? 'user'}`);
+  mkdirSync(folder, { recursive: true, mode: 0o700 });
+  return folder;
 }
 
 /**
