@@ -1,0 +1,139 @@
+import { adjustNetwork } from './adjust-network';
+import type { Adjustment, NetworkResult } from './adjust-network';
+import { listNames } from './check-paths';
+import { chiSquareQuantile } from './chi-square';
+import type { NetworkObservation, NetworkPoint } from './network';
+import { assumedReading, roomObservations } from './room-observations';
+import type { RoomObservation } from './room-observations';
+import { wallEnd } from './room-frame';
+import type { RoomFrame } from './room-frame';
+import { expectedAngle, startShapes } from './start-shapes';
+import { undeterminedError } from './undetermined';
+import type { Point } from '../core/point';
+import type { RoomError, RoomInput } from './types';
+
+/** A room that has been fitted, before it is put into words. */
+export interface SolvedRoom {
+  readonly frame: RoomFrame;
+  /** In the fit, in the order of the adjustment's residuals. */
+  readonly active: readonly RoomObservation[];
+  readonly ignored: readonly RoomObservation[];
+  readonly adjustment: Adjustment;
+}
+
+export type SolveResult =
+  { readonly ok: true; readonly solved: SolvedRoom } | { readonly ok: false; readonly error: RoomError };
+
+/** A first start is taken at its word when chi2 is no worse than once in 1,000 honest rooms. */
+const GOOD_ENOUGH = 0.999;
+/** Chi2 of a room without spare readings is rounding only. */
+const EXACT = 1e-6;
+/** A corner nearer to straight than this may end up on either side, radians. */
+const NEARLY_STRAIGHT = (25 * Math.PI) / 180;
+/** A later start replaces an earlier one only if it is better by more than rounding. */
+const BETTER = 1e-6;
+const SUSPICIOUS = 3.29;
+
+/** Fits the room from the start that serves it best. */
+export function solveRoom(input: RoomInput, frame: RoomFrame): SolveResult {
+  const all = roomObservations(input, frame);
+  const ignored = all.filter((o) => o.ignored);
+  const active = all.filter((o) => !o.ignored);
+  const first = fitBest(input, frame, active);
+  if (first.kind !== 'open') return toResult(first, frame, active, ignored);
+  const reduced = withForgottenCorners(input, frame, active);
+  if (reduced.length > active.length) {
+    const second = fitBest(input, frame, reduced);
+    if (second.kind !== 'open') return toResult(second, frame, reduced, ignored);
+  }
+  return { ok: false, error: undeterminedError(input, frame, first.points, first.directions) };
+}
+
+/** Points to start from, in room axes: the first is the origin, the second lies on +x. */
+export function freePoints(points: readonly Point[]): readonly NetworkPoint[] {
+  return points.map((start, i) => ({ start, freeX: i > 0, freeY: i > 1 }));
+}
+
+/**
+ * When ignoring a corner's only reading leaves the room loose, that corner is one that nobody measured: it is assumed
+ * at its nominal angle like any other.
+ */
+function withForgottenCorners(
+  input: RoomInput,
+  frame: RoomFrame,
+  active: readonly RoomObservation[],
+): readonly RoomObservation[] {
+  const kept = new Set(active.filter((o) => o.kind !== 'wall' && o.kind !== 'tie').map((o) => o.subject));
+  const forgotten = frame.corners.flatMap((_, i) => (kept.has(i) ? [] : [i]));
+  const assumed = forgotten.map((i) => ({ ...assumedReading(input, frame, i), ignored: false, trusted: false }));
+  const at = active.findIndex((o) => o.kind === 'tie');
+  return at < 0 ? [...active, ...assumed] : [...active.slice(0, at), ...assumed, ...active.slice(at)];
+}
+
+function fitBest(input: RoomInput, frame: RoomFrame, active: readonly RoomObservation[]): NetworkResult {
+  const observations: readonly NetworkObservation[] = active.map((o) => o.observation);
+  const expected = frame.corners.map((_, i) => expectedAngle(input, frame, i));
+  let best: NetworkResult | null = null;
+  let bestScore: readonly [number, number] = [Infinity, Infinity];
+  for (const shape of startShapes(input, frame)) {
+    const result = adjustNetwork(freePoints(shape()), observations);
+    const score = scoreOf(result, frame, expected);
+    if (best === null || isBetter(score, bestScore)) {
+      best = result;
+      bestScore = score;
+    }
+    if (result.kind === 'adjusted' && score[0] === 0 && isGood(result.adjustment)) break;
+  }
+  return best!;
+}
+
+/** Corners on the wrong side, then chi2; smaller is better, and no fit at all is worst. */
+function scoreOf(result: NetworkResult, frame: RoomFrame, expected: readonly number[]): readonly [number, number] {
+  if (result.kind === 'diverged') return [Infinity, Infinity];
+  if (result.kind === 'open') return [Infinity, 0];
+  const { points, chi2 } = result.adjustment;
+  const wrong = frame.corners.filter((corner, i) => {
+    if (Math.abs(expected[i]! - Math.PI) < NEARLY_STRAIGHT) return false;
+    const [ax, ay] = points[corner.left]!;
+    const [bx, by] = points[corner.point]!;
+    const [cx, cy] = points[wallEnd(frame, corner.right)]!;
+    const turnsRight = (bx - ax) * (cy - by) - (by - ay) * (cx - bx) < 0;
+    return turnsRight !== expected[i]! < Math.PI;
+  });
+  return [wrong.length, chi2];
+}
+
+function isBetter(score: readonly [number, number], than: readonly [number, number]): boolean {
+  if (score[0] !== than[0]) return score[0] < than[0];
+  return score[1] < than[1] - BETTER * (1 + than[1]) || (than[1] === Infinity && score[1] < Infinity);
+}
+
+function isGood({ chi2, dof }: Adjustment): boolean {
+  return dof > 0 ? chi2 <= chiSquareQuantile(GOOD_ENOUGH, dof) : chi2 < EXACT;
+}
+
+function toResult(
+  result: Exclude<NetworkResult, { kind: 'open' }>,
+  frame: RoomFrame,
+  active: readonly RoomObservation[],
+  ignored: readonly RoomObservation[],
+): SolveResult {
+  if (result.kind === 'adjusted')
+    return { ok: true, solved: { frame, active, ignored, adjustment: result.adjustment } };
+  return { ok: false, error: contradiction(active, result.standardised) };
+}
+
+function contradiction(active: readonly RoomObservation[], standardised: readonly number[]): RoomError {
+  const worst = active
+    .map((o, i) => ({ o, size: Math.abs(standardised[i]!) }))
+    .filter(({ size }) => !(size <= SUSPICIOUS))
+    .sort((a, b) => b.size - a.size)
+    .slice(0, 4)
+    .map(({ o }) => o);
+  const names = [...new Set((worst.length > 0 ? worst : active).map((o) => o.name))];
+  return {
+    code: 'contradictory',
+    message: `No room fits these readings together: ${listNames(names)}. Take them again.`,
+    path: (worst[0] ?? active[0]!).path,
+  };
+}
