@@ -14,9 +14,17 @@ export interface JointSeason {
   readonly turnDry: number;
 }
 
-/** Change of the corner's angle for one unit of strain across the grain: half of sin 2f of either piece, added up. */
-export const turnPerStrain = (angles: TopJoint['angles']): number =>
-  (Math.sin(2 * toRadians(angles[0])) + Math.sin(2 * toRadians(angles[1]))) / 2;
+/** What of a joint the seasons work on. */
+export type SeasonJoint = Pick<TopJoint, 'angles' | 'length' | 'kind'>;
+
+/**
+ * Change of the corner's angle for one unit of strain across the grain: half of sin 2f of either piece, added up. The run
+ * that goes through a butt joint meets it along its own edge, which swelling does not turn.
+ */
+export function turnPerStrain({ angles, kind }: Pick<SeasonJoint, 'angles' | 'kind'>): number {
+  const both = (Math.sin(2 * toRadians(angles[0])) + Math.sin(2 * toRadians(angles[1]))) / 2;
+  return kind === 'butt' ? both / 2 : both;
+}
 
 /**
  * Seasonal opening of a joint, and the swing of its legs when it is glued.
@@ -28,12 +36,12 @@ export const turnPerStrain = (angles: TopJoint['angles']): number =>
  * @param legs - lengths of the two runs from the corner to their far ends, inches
  */
 export function jointSeason(
-  joint: Pick<TopJoint, 'angles' | 'length'>,
+  joint: SeasonJoint,
   legs: readonly [number, number],
   movement: Pick<Movement, 'emc' | 'coefficient'>,
 ): JointSeason {
   const { make, summer, winter } = movement.emc;
-  const perStrain = turnPerStrain(joint.angles);
+  const perStrain = turnPerStrain(joint);
   const wetStrain = movement.coefficient * Math.max(0, Math.max(summer, winter) - make);
   const dryStrain = movement.coefficient * Math.max(0, make - Math.min(summer, winter));
   const worst = Math.abs(perStrain) * Math.max(wetStrain, dryStrain);
@@ -60,7 +68,7 @@ export interface SeasonRemedy {
  * @returns only ways that help by at least a tenth, best first
  */
 export function seasonRemedies(
-  joint: Pick<TopJoint, 'angles' | 'length'>,
+  joint: SeasonJoint,
   movement: Pick<Movement, 'emc' | 'coefficient'>,
   edgeCoefficient: number,
 ): readonly SeasonRemedy[] {
