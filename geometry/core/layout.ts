@@ -192,6 +192,8 @@ export interface JointChoice {
   readonly through?: string;
   /** Diagonal: length of the diagonal's front, inches. */
   readonly width?: number;
+  /** Diagonal: angle at which it leaves the left-hand run's front, degrees; the same on both sides when missing. */
+  readonly angle?: number;
   readonly assembled: 'shop' | 'site';
 }
 

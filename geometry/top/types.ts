@@ -14,7 +14,7 @@ export interface LaidRun {
   readonly right: RunEnd;
   /** Whole strip between its ends, before seams and cutouts. */
   readonly outline: Polygon;
-  /** Along the wall from its left end to the run's ends on the back line and on the front line. */
+  /** Along the wall from its left end to the run's ends on the back line and on the straight part of the front line. */
   readonly backFrom: number;
   readonly backTo: number;
   readonly frontFrom: number;
@@ -29,6 +29,8 @@ export interface PieceEnd {
   readonly finished: boolean;
   /** Corner radius at an open end, inches. */
   readonly radius: number;
+  /** Slope of the cut through the thickness, degrees off square; 45 where a waterfall leg meets its top. */
+  readonly bevel?: number;
 }
 
 /** What is cut from a slab. */
@@ -38,11 +40,16 @@ export interface Piece {
   readonly letter: string;
   readonly on: string;
   readonly kind: 'run' | 'island' | 'strip' | 'leg';
-  /** Room axes, counter-clockwise; ignores corner radii and cutouts. */
+  /**
+   * Room axes, counter-clockwise; ignores corner radii and cutouts. A leg is folded flat outwards from its end; a strip
+   * lies below the room.
+   */
   readonly outline: Polygon;
   /**
    * The same outline as it is laid out on a slab, good face up: x along the grain from 0, y from the front edge (0)
-   * to the back edge (depth).
+   * to the back edge (depth). `left` and `right` are its ends at small and large x: for a run on the far side of its wall
+   * they are the other way round than seen from the room. With a diagonal front the lowest point is y = 0, and the
+   * outline is not convex.
    */
   readonly shape: Polygon;
   /** Room place of the shape's origin, and the direction of its x axis. */
@@ -78,7 +85,7 @@ export interface TopJoint {
   /** Interior corner angle between the back lines, degrees, and its sd (degrees). */
   readonly corner: number;
   readonly cornerSd: number;
-  /** Angles between each run's back edge and the joint, degrees. */
+  /** Angles between each run's back edge and the joint, degrees; at a butt joint those of both cut ends. */
   readonly angles: readonly [number, number];
   /** Opening at the far end for the corner's own sd, inches. */
   readonly openingPerSd: number;
@@ -97,6 +104,8 @@ export interface TopSeam {
   readonly visible: number;
   readonly inCutout: string | null;
   readonly pinned: boolean;
+  /** A seam along the grain, hardly seen: `at` is then inches from the front edge. */
+  readonly edge?: true;
 }
 
 export interface PlacedCutout {
@@ -111,6 +120,8 @@ export interface PlacedCutout {
   readonly depth: number;
   readonly frontStrip: number;
   readonly backStrip: number;
+  /** Inches of cut edge across the grain, to be sealed. */
+  readonly endGrain?: number;
   readonly letters: readonly string[];
 }
 

@@ -1,0 +1,173 @@
+import type { Base, Step } from '../core/layout';
+import type { SeamLimits } from '../core/settings';
+import type { Deck } from '../top/deck';
+import type { DeckCut } from '../top/deck-cells';
+import type { LaidCutout } from '../top/lay-cutouts';
+import { inches } from '../top/sentence';
+import type { LayProblem } from '../top/types';
+import { ripPlaces, rowsOf } from './deck-rows';
+import { divide, fewest, seamPlace, seamPlaces, type SeamPlace, type Span } from './divide-row';
+import { zoneAt } from './free-stretches';
+import { deepest, longestPiece, type LongStock, type WholePieces } from './long-stock';
+import { readPins } from './pins';
+import { seamZones, visibleAt, type Hole, type Row, type Zone } from './seam-zones';
+
+/** What decides about the seams of one deck. */
+export interface SeamGround {
+  readonly deck: Deck;
+  readonly holes: readonly Hole[];
+  /** What stands along its wall; none for an island. */
+  readonly bases: readonly Base[];
+  /** Pinned places, inches along the wall. */
+  readonly pins: readonly number[];
+  readonly limits: SeamLimits;
+  readonly stock: LongStock;
+  readonly whole: WholePieces;
+  /** Longest piece that can be carried in. */
+  readonly carried: number;
+  readonly step: Step;
+}
+
+/** A cross seam (own x, in one row) or an edge seam (own y). */
+export interface PlannedSeam {
+  readonly kind: 'cross' | 'edge';
+  readonly row: number;
+  readonly at: number;
+  readonly visible: number;
+  readonly inCutout: LaidCutout | null;
+  readonly pinned: boolean;
+}
+
+export interface SeamPlan {
+  readonly cut: DeckCut;
+  readonly seams: readonly PlannedSeam[];
+  readonly problems: readonly LayProblem[];
+}
+
+/** More seams than lengths call for that are tried before the rules are given up. */
+const MORE_SEAMS = 2;
+/** Seams of neighbouring rows of an island stand at least this far apart, inches. Common practice. */
+export const STAGGER = 12;
+
+/**
+ * Decides where a deck is cut: along the grain where it is deeper than every slab, across it where a row is longer than
+ * the longest slab or than what can be carried in, and wherever a seam is pinned.
+ */
+export function placeSeams(ground: SeamGround): SeamPlan {
+  const { deck, holes, limits } = ground;
+  const rips = ripPlaces(deck, deepest(ground.stock), holes, limits);
+  const problems: LayProblem[] = [];
+  const seams: PlannedSeam[] = rips.map((y, i) => ({
+    kind: 'edge',
+    row: i + 1,
+    at: y,
+    visible: edgeVisible(deck, holes, y),
+    inCutout: null,
+    pinned: false,
+  }));
+  let before: readonly number[] = [];
+  const cross = rowsOf(deck, rips).map((row, index) => {
+    const rowZones = seamZones(row, holes, ground.bases, limits, ground.step);
+    const zones = [...rowZones, ...before.map((x) => staggerZone(x, ground.step))];
+    const pins = index === 0 ? readPins(ground, row, zones, problems) : [];
+    const placed = divideRow(ground, row, zones, pins, problems);
+    for (const { x } of placed) {
+      seams.push({ kind: 'cross', row: index, at: x, ...visibleAt(row, holes, x), pinned: pins.includes(x) });
+    }
+    before = placed.map(({ x }) => x);
+    return before;
+  });
+  return { cut: { rows: rips, cross }, seams, problems };
+}
+
+function staggerZone(x: number, step: Step): Zone {
+  return { from: x - STAGGER, to: x + STAGGER, why: `within ${inches(STAGGER, step)} of a seam in the next row` };
+}
+
+/** Longest piece a row may be cut into, or Infinity when it can stay whole. */
+export function rowLimit({ stock, whole, carried }: SeamGround, row: Row): number {
+  const length = row.to - row.from;
+  const depth = row.top - row.bottom;
+  if (length > carried) return Math.min(carried, longestPiece(stock, depth));
+  return whole.take(length, depth) ? Infinity : longestPiece(stock, depth);
+}
+
+function divideRow(
+  ground: SeamGround,
+  row: Row,
+  zones: readonly Zone[],
+  pins: readonly number[],
+  problems: LayProblem[],
+): readonly SeamPlace[] {
+  const longest = rowLimit(ground, row);
+  const marks = [row.from, ...pins, row.to];
+  const placed: SeamPlace[] = [];
+  for (let i = 1; i < marks.length; i++) {
+    const span = { from: marks[i - 1]!, to: marks[i]!, longest, shortest: ground.limits.shortestPiece };
+    placed.push(...divideSpan(ground, row, zones, span, problems));
+    if (i < marks.length - 1) placed.push(seamPlace(row, ground.holes, marks[i]!));
+  }
+  return placed;
+}
+
+function divideSpan(
+  ground: SeamGround,
+  row: Row,
+  zones: readonly Zone[],
+  span: Span,
+  problems: LayProblem[],
+): readonly SeamPlace[] {
+  const least = fewest(span);
+  if (least === 0) return [];
+  const places = seamPlaces(row, ground.holes, zones, span);
+  for (let count = least; count <= least + MORE_SEAMS; count++) {
+    const found = divide(span, places, count);
+    if (found) return found.places;
+  }
+  return forced(ground, row, zones, span, least, problems);
+}
+
+/** No allowed set exists: the least bad one, and a sentence about every rule it breaks. */
+function forced(
+  ground: SeamGround,
+  row: Row,
+  zones: readonly Zone[],
+  span: Span,
+  least: number,
+  problems: LayProblem[],
+): readonly SeamPlace[] {
+  const ends: Zone[] = [
+    { from: -Infinity, to: row.insideFrom, why: '' },
+    { from: row.insideTo, to: Infinity, why: '' },
+  ];
+  const open = { ...span, shortest: 0 };
+  const spread = Array.from({ length: least }, (_, i) => span.from + ((span.to - span.from) * (i + 1)) / (least + 1));
+  const places = seamPlaces(row, ground.holes, ends, open, spread).map((place) =>
+    zoneAt(zones, place.x) ? { ...place, cost: place.cost + BROKEN_RULE } : place,
+  );
+  const found = divide(open, places, least)?.places ?? spread.map((x) => seamPlace(row, ground.holes, x));
+  for (const { x } of found) {
+    const zone = zoneAt(zones, x);
+    problems.push({
+      code: 'seam-no-place',
+      message:
+        `Top ${ground.deck.id} has to be cut, but no allowed place is left: ` +
+        `the seam at ${inches(ground.deck.sign * x, ground.step)} is ${zone?.why ?? 'too near another seam'}.`,
+      at: { run: ground.deck.id },
+    });
+  }
+  return found;
+}
+
+/** A broken rule outweighs any length of visible seam, inches. */
+const BROKEN_RULE = 1000;
+
+/** Inches of an edge seam outside cutouts. */
+function edgeVisible(deck: Deck, holes: readonly Hole[], y: number): number {
+  const turned = (outline: Hole['outline']) => outline.map(([x, v]) => [v, x] as const);
+  const inside = (outline: Hole['outline']) => {
+    const row = { deck, bottom: -Infinity, top: Infinity, from: 0, to: 0, insideFrom: 0, insideTo: 0 };
+    return visibleAt({ ...row, deck: { ...deck, shape: 'free', outline: turned(outline) } }, [], y).visible;
+  };
+  return holes.reduce((sum, hole) => sum - inside(hole.outline), inside(deck.outline));
+}

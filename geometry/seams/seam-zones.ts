@@ -1,0 +1,147 @@
+import type { Base, Step } from '../core/layout';
+import type { SeamLimits } from '../core/settings';
+import type { Box } from '../core/polygon';
+import type { Polygon } from '../core/point';
+import type { Deck, DeckEnd } from '../top/deck';
+import { crossings } from '../top/deck-span';
+import { cutoutName, type LaidCutout } from '../top/lay-cutouts';
+import { inches } from '../top/sentence';
+
+/** A stretch of a deck where no seam may be (its two ends may carry one), own x, and why, after 'it would be'. */
+export interface Zone {
+  readonly from: number;
+  readonly to: number;
+  readonly why: string;
+}
+
+/** A cutout on the deck that is searched, in the deck's axes. */
+export interface Hole {
+  readonly cutout: LaidCutout;
+  readonly outline: Polygon;
+  readonly box: Box;
+}
+
+/** One row of a deck that is to be divided: between two rips, or the whole depth. */
+export interface Row {
+  readonly deck: Deck;
+  readonly bottom: number;
+  readonly top: number;
+  /** Long points, own x. */
+  readonly from: number;
+  readonly to: number;
+  /** Short points: a seam outside them would cross an end. */
+  readonly insideFrom: number;
+  readonly insideTo: number;
+}
+
+/** Places where the rules of the shop allow no seam. */
+export function seamZones(
+  row: Row,
+  holes: readonly Hole[],
+  bases: readonly Base[],
+  limits: SeamLimits,
+  step: Step,
+): readonly Zone[] {
+  const { deck } = row;
+  const zones: Zone[] = [
+    endZone(row, deck.left, 'left', limits, step),
+    endZone(row, deck.right, 'right', limits, step),
+  ];
+  for (const hole of holes)
+    if (hole.box.minY < row.top && hole.box.maxY > row.bottom) zones.push(...holeZones(hole, limits, step));
+  for (const base of bases) {
+    const zone = baseZone(deck, base, row, limits, step);
+    if (zone) zones.push(zone);
+  }
+  return zones;
+}
+
+function endZone(row: Row, end: DeckEnd, side: 'left' | 'right', limits: SeamLimits, step: Step): Zone {
+  const rule = endRule(end, limits, step);
+  const short = limits.shortestPiece;
+  if (side === 'left') {
+    const byRule = row.insideFrom + rule.distance;
+    const to = Math.max(byRule, row.from + short);
+    return { from: -Infinity, to, why: byRule >= row.from + short ? rule.why : shortPiece(short, step) };
+  }
+  const byRule = row.insideTo - rule.distance;
+  const from = Math.min(byRule, row.to - short);
+  return { from, to: Infinity, why: byRule <= row.to - short ? rule.why : shortPiece(short, step) };
+}
+
+const shortPiece = (short: number, step: Step): string => `leaving a piece shorter than ${inches(short, step)}`;
+
+function endRule(end: DeckEnd, limits: SeamLimits, step: Step): { distance: number; why: string } {
+  if (end.kind === 'joint') {
+    return { distance: limits.fromJoint, why: `within ${inches(limits.fromJoint, step)} of a joint` };
+  }
+  if (end.kind === 'open' || end.kind === 'waterfall') {
+    return { distance: limits.fromOpenEnd, why: `within ${inches(limits.fromOpenEnd, step)} of an open end` };
+  }
+  return { distance: 0, why: 'across the end' };
+}
+
+function holeZones({ cutout, box }: Hole, limits: SeamLimits, step: Step): readonly Zone[] {
+  const name = cutoutName(cutout.cutout);
+  const { kind, radius } = cutout.placed;
+  if (kind === 'tap') {
+    // A round hole has no corners to break out: it only has to keep wood round it.
+    const keep = limits.insideCutout;
+    return [{ from: box.minX - keep, to: box.maxX + keep, why: `within ${inches(keep, step)} of ${name}` }];
+  }
+  const outside = limits.fromCutoutCorner;
+  const why = `within ${inches(outside, step)} of a corner of ${name}`;
+  const inside = radius + limits.insideCutout;
+  if (kind === 'notch' || box.maxX - box.minX < 2 * inside) {
+    return [{ from: box.minX - outside, to: box.maxX + outside, why }];
+  }
+  const close = `within ${inches(inside, step)} of a side of ${name}`;
+  return [
+    { from: box.minX - outside, to: box.minX + inside, why },
+    { from: box.minX, to: box.minX + inside, why: close },
+    { from: box.maxX - inside, to: box.maxX + outside, why },
+    { from: box.maxX - inside, to: box.maxX, why: close },
+  ];
+}
+
+/** Bases that carry nothing in their middle. */
+const HOLLOW: ReadonlySet<Base['kind']> = new Set(['dishwasher', 'range', 'opening']);
+
+function baseZone(deck: Deck, base: Base, row: Row, limits: SeamLimits, step: Step): Zone | null {
+  if (!HOLLOW.has(base.kind)) return null;
+  const end = base.to === 'end' ? (deck.sign === 1 ? row.to : -row.from) : base.to;
+  // A dishwasher or range carries no top at all; in a plain opening the sides of the cabinets beside it still reach a little.
+  const reach = base.kind === 'opening' ? limits.support : 0;
+  const [from, to] = [base.from + reach, end - reach];
+  if (to <= from) return null;
+  const name = base.label ?? (base.kind === 'opening' ? 'opening' : base.kind);
+  const why = reach > 0 ? `over the ${name} with no support within ${inches(reach, step)}` : `over the ${name}`;
+  return deck.sign === 1 ? { from, to, why } : { from: -to, to: -from, why };
+}
+
+/** Inches of a seam at x that stay on the finished top, and the cutout it mostly falls in. */
+export function visibleAt(
+  row: Row,
+  holes: readonly Hole[],
+  x: number,
+): { visible: number; inCutout: LaidCutout | null } {
+  let visible = within(row.deck.shape === 'strip' ? [row.bottom, row.top] : crossings(row.deck.outline, x), row);
+  let most = 0;
+  let inCutout: LaidCutout | null = null;
+  for (const { cutout, outline, box } of holes) {
+    if (x <= box.minX || x >= box.maxX) continue;
+    const gone = within(crossings(outline, x), row);
+    visible -= gone;
+    if (gone > most) [most, inCutout] = [gone, cutout];
+  }
+  return { visible: Math.max(0, visible), inCutout };
+}
+
+/** Length of the stretches between pairs of marks that lies inside the row. */
+function within(marks: readonly number[], { bottom, top }: Row): number {
+  let sum = 0;
+  for (let i = 0; i + 1 < marks.length; i += 2) {
+    sum += Math.max(0, Math.min(top, marks[i + 1]!) - Math.max(bottom, marks[i]!));
+  }
+  return sum;
+}

@@ -1,0 +1,276 @@
+import type { JointChoice, Layout, Run, RunEnd } from '../core/layout';
+import { along, scale } from '../core/vector';
+import { cornerJoint, type CornerJoint, type JointEnd, type RunLines } from './corner-joint';
+import { SAME_POINT, stripOutline, toOwn, type Deck, type DeckEnd } from './deck';
+import { layEnd, type EndSide } from './run-end';
+import { outlineToRoom } from './deck';
+import { inches } from './sentence';
+import type { SolvedRoom } from './solved-room';
+import type { LaidRun, LayProblem } from './types';
+import { alongWall, wallFrames, type WallFrame } from './wall-frame';
+import { highestBump } from './wall-profile';
+
+/** A joint between two laid runs, before pieces have letters. */
+export interface LaidJoint extends CornerJoint {
+  readonly between: readonly [string, string];
+  /** Standard deviation of the corner, degrees. */
+  readonly cornerSd: number;
+  readonly assembled: 'shop' | 'site';
+}
+
+export interface LaidRuns {
+  readonly runs: readonly LaidRun[];
+  readonly decks: readonly Deck[];
+  readonly joints: readonly LaidJoint[];
+  readonly problems: readonly LayProblem[];
+  readonly walls: readonly WallFrame[];
+}
+
+/** Slack of the tape before a run counts as longer than its wall, inches. */
+const WALL_SLACK = 1 / 16;
+
+/**
+ * Lays every run along its wall, with its ends at the room's own angles.
+ *
+ * @returns the runs that could be laid, their decks (own axes), the joints between them, and a sentence for whatever
+ *   could not be laid or looks wrong; nothing is dropped in silence
+ */
+export function layRuns(layout: Layout, room: SolvedRoom): LaidRuns {
+  const walls = wallFrames(room);
+  const problems: LayProblem[] = [];
+  const lines = new Map<string, RunLines>();
+  for (const run of layout.runs) {
+    const laid = runLines(run, walls, layout, problems);
+    if (laid) lines.set(run.id, laid);
+  }
+  const { joints, ends } = layJoints(layout, room, lines, walls, problems);
+  const runs: LaidRun[] = [];
+  const decks: Deck[] = [];
+  for (const run of layout.runs) {
+    const own = lines.get(run.id);
+    if (!own) continue;
+    const laid = layOne(run, own, ends, walls, layout, problems);
+    if (!laid) continue;
+    runs.push(laid.run);
+    decks.push(laid.deck);
+  }
+  const standing = new Set(runs.map((run) => run.id));
+  return { runs, decks, joints: joints.filter((j) => j.between.every((id) => standing.has(id))), problems, walls };
+}
+
+function runLines(run: Run, walls: readonly WallFrame[], layout: Layout, problems: LayProblem[]): RunLines | null {
+  const at = { run: run.id };
+  const wall = walls.find((w) => w.id === run.wall);
+  const refuse = (code: string, message: string) => {
+    problems.push({ code, message, at: { ...at, ...(wall && { wall: wall.id }) } });
+    return null;
+  };
+  if (!wall) return refuse('run-no-wall', `Run ${run.id} lies on wall ${run.wall}, which is not in this room.`);
+  if (!(run.depth > 0)) return refuse('run-no-depth', `Run ${run.id} has no depth. Type how deep the top is.`);
+  const ignoresFrom = followsCorner(run.left);
+  const ignoresTo = followsCorner(run.right);
+  const from = ignoresFrom ? 0 : run.from;
+  const to = ignoresTo ? wall.length : alongWall(wall, run.to);
+  if (!(to > from)) {
+    const length = `from ${inches(from, layout.step)} to ${inches(to, layout.step)}`;
+    return refuse('run-no-length', `Run ${run.id} has no length: it goes ${length} along wall ${wall.label}.`);
+  }
+  if (from < -WALL_SLACK || to > wall.length + WALL_SLACK) {
+    const past = Math.max(-from, to - wall.length);
+    refuse(
+      'run-longer-than-wall',
+      `Run ${run.id} goes ${inches(past, layout.step)} past the end of wall ${wall.label}, ` +
+        `which is ${inches(wall.length, layout.step)} long.`,
+    );
+  }
+  const side = run.side ?? 'front';
+  const sign = side === 'back' ? -1 : 1;
+  const standoff = run.backGap + highestBump(wall.profile, from, to, side);
+  const offset = (off: number) => ({
+    origin: along(wall.start, wall.inward, sign * off),
+    direction: wall.along,
+  });
+  return {
+    id: run.id,
+    wall,
+    sign,
+    standoff,
+    depth: run.depth,
+    back: offset(standoff),
+    front: offset(standoff + run.depth),
+  };
+}
+
+const followsCorner = (end: RunEnd): boolean => end.kind === 'wall' || end.kind === 'joint';
+
+interface JointEnds {
+  readonly left: Map<string, JointEnd>;
+  readonly right: Map<string, JointEnd>;
+  readonly stepped: Set<string>;
+}
+
+function layJoints(
+  layout: Layout,
+  room: SolvedRoom,
+  lines: ReadonlyMap<string, RunLines>,
+  walls: readonly WallFrame[],
+  problems: LayProblem[],
+): { joints: LaidJoint[]; ends: JointEnds } {
+  const ends: JointEnds = { left: new Map(), right: new Map(), stepped: new Set() };
+  const joints: LaidJoint[] = [];
+  const waiting = new Map<string, Run>();
+  for (const run of layout.runs) {
+    if (run.left.kind !== 'joint' || !lines.has(run.id)) continue;
+    const key = `${run.wall} ${run.side ?? 'front'}`;
+    if (waiting.has(key)) problems.push(alone(run, 'left', 'another run already ends at that corner'));
+    else waiting.set(key, run);
+  }
+  const choices = new Map(layout.joints.map((choice) => [pairKey(...choice.between), choice]));
+  const met = new Set<string>();
+  for (const run of layout.runs) {
+    const own = lines.get(run.id);
+    if (run.right.kind !== 'joint' || !own) continue;
+    const nextWall = walls.find((w) => w.index === own.wall.next);
+    const partner = nextWall && waiting.get(`${nextWall.id} ${run.side ?? 'front'}`);
+    if (!nextWall || !partner || partner.id === run.id) {
+      const why = nextWall
+        ? `no run on wall ${nextWall.label} joins it`
+        : `wall ${own.wall.label} has no neighbor there`;
+      problems.push(alone(run, 'right', why));
+      continue;
+    }
+    waiting.delete(`${partner.wall} ${partner.side ?? 'front'}`);
+    met.add(pairKey(run.id, partner.id));
+    const choice = choices.get(pairKey(run.id, partner.id)) ?? null;
+    const result = cornerJoint(own, lines.get(partner.id)!, choice);
+    const joint = 'joint' in result ? result.joint : null;
+    if (!joint) {
+      problems.push(badJoint(run.id, partner.id, 'why' in result ? result.why : ''));
+      continue;
+    }
+    ends.right.set(run.id, joint.left);
+    ends.left.set(partner.id, joint.right);
+    if (joint.kind === 'step') ends.stepped.add(run.depth > partner.depth ? `${run.id} right` : `${partner.id} left`);
+    joints.push({
+      ...joint,
+      between: [run.id, partner.id],
+      cornerSd: cornerSdOf(room, own.wall.id, nextWall.id),
+      assembled: choice?.assembled ?? 'shop',
+    });
+  }
+  for (const run of waiting.values()) problems.push(alone(run, 'left', 'no run joins it there'));
+  for (const choice of layout.joints) {
+    if (met.has(pairKey(...choice.between))) continue;
+    problems.push(badJoint(...choice.between, 'they do not meet at a corner'));
+  }
+  return { joints, ends };
+}
+
+const pairKey = (a: string, b: string): string => (a < b ? `${a}\u0000${b}` : `${b}\u0000${a}`);
+
+function alone(run: Run, side: EndSide, why: string): LayProblem {
+  return {
+    code: 'joint-alone',
+    message: `Run ${run.id} should end on a joint at its ${side}, but ${why}. It is cut square at the wall's end.`,
+    at: { run: run.id, wall: run.wall },
+  };
+}
+
+function badJoint(a: string, b: string, why: string): LayProblem {
+  return {
+    code: 'joint-impossible',
+    message: `Runs ${a} and ${b} cannot be joined: ${why}.`,
+    at: { run: a, joint: `${a}-${b}` },
+  };
+}
+
+function cornerSdOf(room: SolvedRoom, left: string, right: string): number {
+  return room.corners.find((c) => c.between[0] === left && c.between[1] === right)?.sd ?? 0;
+}
+
+function layOne(
+  run: Run,
+  own: RunLines,
+  joints: JointEnds,
+  walls: readonly WallFrame[],
+  layout: Layout,
+  problems: LayProblem[],
+): { run: LaidRun; deck: Deck } | null {
+  const endOf = (side: EndSide): JointEnd => {
+    const joined = joints[side].get(run.id);
+    if (joined) return joined;
+    const laid = layEnd(run, own, side, walls, layout.step);
+    if (laid.problem) problems.push(laid.problem);
+    return laid.at;
+  };
+  const left = endOf('left');
+  const right = endOf('right');
+  if (right.back - left.back < -SAME_POINT || right.front - left.front < -SAME_POINT) {
+    const edge = right.back - left.back < right.front - left.front ? 'back' : 'front';
+    problems.push({
+      code: 'run-too-short',
+      message: `Run ${run.id} has no ${edge} edge left between its two ends: its depth of ${inches(run.depth, layout.step)} does not fit this wall.`,
+      at: { run: run.id, wall: run.wall },
+    });
+    return null;
+  }
+  const deck = runDeck(run, own, left, right, joints);
+  return {
+    run: {
+      id: run.id,
+      wall: run.wall,
+      back: own.back,
+      front: own.front,
+      depth: run.depth,
+      left: run.left,
+      right: run.right,
+      outline: outlineToRoom(deck.frame, deck.outline),
+      backFrom: left.back,
+      backTo: right.back,
+      frontFrom: left.front,
+      frontTo: right.front,
+    },
+    deck,
+  };
+}
+
+function runDeck(run: Run, own: RunLines, left: JointEnd, right: JointEnd, joints: JointEnds): Deck {
+  const { wall, sign, standoff, depth } = own;
+  const frame = {
+    origin: along(wall.start, wall.inward, sign * (standoff + depth)),
+    x: scale(wall.along, sign),
+    y: scale(wall.inward, -sign),
+  };
+  const deckEnd = (end: RunEnd, at: JointEnd, side: EndSide): DeckEnd => ({
+    kind: end.kind,
+    back: sign * at.back,
+    front: sign * at.front,
+    wing: at.wing && toOwn(frame, at.wing),
+    finished: end.kind === 'open' || end.kind === 'appliance' || joints.stepped.has(`${run.id} ${side}`),
+    radius: end.kind === 'open' ? end.radius : 0,
+  });
+  const [a, b] = [deckEnd(run.left, left, 'left'), deckEnd(run.right, right, 'right')];
+  const [first, last] = sign === 1 ? [a, b] : [b, a];
+  const pastChainEnd =
+    (wall.next === null && right.back > wall.length + WALL_SLACK) ||
+    (wall.previous === null && left.back < -WALL_SLACK);
+  return {
+    id: run.id,
+    kind: 'run',
+    frame,
+    sign,
+    depth,
+    outline: stripOutline(first, last, depth),
+    shape: 'strip',
+    left: first,
+    right: last,
+    frontSeen: true,
+    backSeen: pastChainEnd,
+  };
+}
+
+/** Kind of joint chosen for two runs, or null. */
+export function choiceFor(layout: Layout, a: string, b: string): JointChoice | null {
+  const key = pairKey(a, b);
+  return layout.joints.find((choice) => pairKey(...choice.between) === key) ?? null;
+}

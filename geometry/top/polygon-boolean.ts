@@ -1,0 +1,35 @@
+import polygonClipping from 'polygon-clipping';
+import type { Point, Polygon } from '../core/point';
+import { counterClockwise, signedArea } from '../core/polygon';
+
+/** Slivers smaller than this come from rounding, square inches. */
+const SLIVER = 1e-7;
+
+type Pairs = [number, number][];
+const ring = (polygon: Polygon): Pairs => polygon.map(([x, y]) => [x, y]);
+
+/** Parts of `a` that lie inside `b`, counter-clockwise, holes left out (neither outline may have any). */
+export function intersection(a: Polygon, b: Polygon): readonly Polygon[] {
+  return outers(polygonClipping.intersection([ring(a)], [ring(b)]));
+}
+
+/** Parts of `a` that lie outside all of `others`, counter-clockwise outer outlines with their holes behind them. */
+export function difference(
+  a: Polygon,
+  others: readonly Polygon[],
+): readonly { readonly outline: Polygon; readonly holes: readonly Polygon[] }[] {
+  const parts = polygonClipping.difference([ring(a)], ...others.map((other) => [ring(other)]));
+  return parts.map(([outline, ...holes]) => ({
+    outline: counterClockwise(open(outline ?? [])),
+    holes: holes.map(open),
+  }));
+}
+
+function outers(parts: [number, number][][][]): readonly Polygon[] {
+  return parts
+    .map(([outline]) => counterClockwise(open(outline ?? [])))
+    .filter((outline) => signedArea(outline) > SLIVER);
+}
+
+/** The package repeats the first point at the end. */
+const open = (closed: Pairs): readonly Point[] => closed.slice(0, -1);
