@@ -10,7 +10,7 @@ export async function up(knex: Knex): Promise<void> {
   await protectTenantTable(
     knex,
     'shops',
-    ['select', 'update (name, currency, units, step, settings, letterhead, next_job_number, version, updated_at)'],
+    ['select', 'update (name, currency, units, step, settings, letterhead, next_job_number, updated_at)'],
     'id',
   );
   await protectTenantTable(knex, 'memberships', ['select', 'update (role, left_at)'], 'shop_id');
@@ -27,7 +27,6 @@ async function createShops(knex: Knex): Promise<void> {
     t.jsonb('settings').notNullable().comment('geometry/core/settings.ts');
     t.jsonb('letterhead').notNullable().defaultTo('{}');
     t.integer('next_job_number').notNullable().defaultTo(1);
-    t.integer('version').notNullable().defaultTo(1);
     t.timestamp('created_at', TIMESTAMP).notNullable().defaultTo(knex.fn.now(3));
     t.timestamp('updated_at', TIMESTAMP).notNullable().defaultTo(knex.fn.now(3));
     t.check("name <> ''", {}, 'shops_name_given');

@@ -24,7 +24,6 @@ async function createJobs(knex: Knex): Promise<void> {
     byPerson(t, 'jobs', 'installer_id', 'optional');
     byPerson(t, 'jobs', 'designer_id', 'optional');
     byPerson(t, 'jobs', 'shop_hand_id', 'optional');
-    t.integer('version').notNullable().defaultTo(1);
     t.timestamp('updated_at', TIMESTAMP).notNullable().defaultTo(knex.fn.now(3));
     t.timestamp('archived_at', TIMESTAMP);
     t.unique(['shop_id', 'number'], { indexName: 'jobs_shop_id_number_key' });
@@ -37,13 +36,12 @@ async function createJobs(knex: Knex): Promise<void> {
 }
 
 async function createLayouts(knex: Knex): Promise<void> {
-  const columns = ['select', 'insert', 'update (doc, seq, thumbnail, thumbnail_seq, updated_at)'];
+  const columns = ['select', 'insert', 'update (doc, seq, thumbnail, updated_at)'];
   await createTenantTable(knex, 'layouts', columns, (t) => {
     belongsTo(t, 'layouts', 'job_id', 'jobs');
     t.jsonb('doc').notNullable().comment('shared/layout/layout-schema.ts');
     t.integer('seq').notNullable().defaultTo(0).comment('Edits applied so far');
     t.jsonb('thumbnail').comment('Outlines for the jobs list, inches');
-    t.integer('thumbnail_seq').notNullable().defaultTo(-1);
     t.timestamp('updated_at', TIMESTAMP).notNullable().defaultTo(knex.fn.now(3));
     t.unique(['shop_id', 'job_id'], { indexName: 'layouts_job_key' });
     t.check('seq >= 0', {}, 'layouts_seq_counts_up');

@@ -12,7 +12,6 @@ export async function up(knex: Knex): Promise<void> {
     t.decimal('crook', null).comment('Bow of the edge over the whole length, in');
     t.decimal('straightening', null).comment('Taken off to straighten an edge, in');
     t.text('supplier').notNullable().defaultTo('');
-    t.integer('version').notNullable().defaultTo(1);
     t.timestamp('updated_at', TIMESTAMP).notNullable().defaultTo(knex.fn.now(3));
     t.check('price_cents >= 0', {}, 'stock_slabs_price_not_negative');
     t.check('count >= 0', {}, 'stock_slabs_count_not_negative');
