@@ -1,8 +1,8 @@
 import type { Layout } from '../core/layout';
 import type { ShopSettings } from '../core/settings';
 import type { Finding } from '../findings/types';
-import type { NestPlan } from '../nest/types';
-import type { RoomFit } from '../room/types';
+import type { NestInstance, NestPlan } from '../nest/types';
+import type { RoomError, RoomFit } from '../room/types';
 import type { PlacedCutout, Piece, TopJoint, TopSeam, Tops } from '../top/types';
 import type { JointWood, Movement, ScrewChoice, Step } from '../wood/types';
 
@@ -10,13 +10,17 @@ import type { JointWood, Movement, ScrewChoice, Step } from '../wood/types';
 export interface Plan {
   readonly engine: string;
   readonly room: RoomFit | null;
-  /** Why there is no room yet; everything below is then empty. */
-  readonly roomError: { readonly code: string; readonly message: string; readonly path: string } | null;
+  /** Why the room is not known yet; the sketch stands in for what is missing where it can. */
+  readonly roomError: RoomError | null;
+  /** Walls nobody has taped. */
+  readonly untaped: readonly string[];
   readonly tops: Tops;
   readonly pieces: readonly (Piece & { readonly weight: number })[];
   readonly joints: readonly (TopJoint & JointWood)[];
   readonly seams: readonly TopSeam[];
   readonly cutouts: readonly PlacedCutout[];
+  /** What the nest search takes for this plan. */
+  readonly instance: NestInstance;
   /** Null while the nest result belongs to other pieces, or is still being searched. */
   readonly nest: NestPlan | null;
   readonly cost: {

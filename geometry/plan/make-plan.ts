@@ -1,0 +1,56 @@
+import type { Layout } from '../core/layout';
+import type { ShopSettings } from '../core/settings';
+import type { NestPlan } from '../nest/types';
+import { jointWood } from '../wood/joint-wood';
+import { movementOf } from '../wood/movement';
+import { orderOfWork } from '../wood/schedule';
+import { chooseScrew } from '../wood/screws';
+import { pieceWeight } from '../wood/weight';
+import { layRoom, type Laid } from './lay-room';
+import { nestInstanceOf } from './nest-instance';
+import type { Plan, PlanInput } from './types';
+
+/** Version of everything that computes; stored with every revision. */
+export const ENGINE = '1.0.0';
+
+/**
+ * Everything computed from a layout, the shop's settings and a nest result. Pure and deterministic; starts no search. A
+ * nest result that belongs to other pieces (its instance is another) is left out, never stretched to fit.
+ */
+export function makePlan({ layout, settings, nest }: PlanInput): Plan {
+  return finishPlan(layRoom(layout, settings), layout, settings, nest);
+}
+
+/** The part of the plan that follows once room and tops are known. */
+export function finishPlan(laid: Laid, layout: Layout, settings: ShopSettings, given: NestPlan | null): Plan {
+  const { room, tops } = laid;
+  const { material, climate, fixing } = layout;
+  const deepest = Math.max(0, ...tops.pieces.filter((piece) => piece.kind !== 'strip').map((piece) => piece.depth));
+  const movement = movementOf(material, climate, deepest || material.slabDepth, settings);
+  const instance = nestInstanceOf(layout, tops.pieces);
+  const nest = given !== null && given.instance === instance.id ? given : null;
+  const pieces = tops.pieces.map((piece) => ({
+    ...piece,
+    weight: pieceWeight(piece.netArea, piece.thickness, material.species, movement.emc.make),
+  }));
+  const joints = tops.joints.map((joint) => ({ ...joint, ...jointWood(joint, tops, movement, settings) }));
+  const screws = chooseScrew(fixing, material.thickness, settings);
+  return {
+    engine: ENGINE,
+    room: room.fit,
+    roomError: room.error,
+    untaped: room.untaped,
+    tops,
+    pieces,
+    joints,
+    seams: tops.seams,
+    cutouts: tops.cutouts,
+    instance,
+    nest,
+    cost: nest && { slabs: nest.cost, lowerBound: nest.lowerBound, gap: nest.gap, proved: nest.proved },
+    movement,
+    screws,
+    findings: [],
+    schedule: orderOfWork({ layout, settings, tops }),
+  };
+}
