@@ -28,13 +28,13 @@ module.exports = {
     {
       ...node,
       displayName: 'unit',
-      testMatch: ['<rootDir>/tests/{geometry,shared,scripts,cli}/**/*.test.ts'],
+      testMatch: ['<rootDir>/tests/{geometry,shared,cli}/**/*.test.ts'],
     },
     {
       ...node,
       ...postgres,
       displayName: 'server',
-      testMatch: ['<rootDir>/tests/{server,migrations,seeds}/**/*.test.ts'],
+      testMatch: ['<rootDir>/tests/{server,migrations,seeds,scripts}/**/*.test.ts'],
     },
     {
       ...common,

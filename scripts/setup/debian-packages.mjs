@@ -6,6 +6,9 @@ import { run } from './children.mjs';
 import { diskFull, saysDiskFull, SetupProblem } from './problem.mjs';
 import { step } from './steps.mjs';
 
+/** Another apt at work, such as the nightly update, is waited for, s. */
+const LOCK_PATIENCE = ['-o', 'DPkg::Lock::Timeout=120'];
+
 /**
  * @typedef {object} DebianPackage
  * @property {string} name - as apt knows it
@@ -14,17 +17,31 @@ import { step } from './steps.mjs';
  */
 
 /**
+ * What has to be known of the machine; tests give one of their own.
+ *
+ * @typedef {object} Machine
+ * @property {number | undefined} uid - of the user, 0 for root
+ * @property {(program: string) => string | null} find
+ * @property {(command: string, args: readonly string[]) => Promise<import('./children.mjs').Ended>} run
+ */
+
+/** @type {Machine} */
+const THIS_MACHINE = { uid: process.getuid?.(), find: onPath, run };
+
+/**
  * Installs the packages that are missing. Root does so directly, others through sudo if it asks for no password.
  *
  * @param {readonly DebianPackage[]} packages
+ * @param {Machine} [machine]
+ * @throws {SetupProblem} when this user may not install, or apt-get cannot
  */
-export async function ensureDebianPackages(packages) {
+export async function ensureDebianPackages(packages, machine = THIS_MACHINE) {
   const missing = packages.filter((candidate) => !candidate.present());
   if (missing.length === 0) return;
   const names = missing.map(({ name }) => name);
-  const asRoot = await rootPrefix();
+  const asRoot = await rootPrefix(machine);
   if (!asRoot) throw new SetupProblem(mayNotInstall(missing));
-  await step(`Installing ${names.join(' and ')} from Debian's packages`, () => install(asRoot, names));
+  await step(`Installing ${names.join(' and ')} from Debian's packages`, () => install(machine, asRoot, names));
   const still = missing.filter((candidate) => !candidate.present());
   if (still.length > 0) {
     throw new SetupProblem(
@@ -50,26 +67,34 @@ export function onPath(program) {
   return null;
 }
 
-/** @returns {Promise<string[] | null>} words to put before a command so that root runs it; null when we may not */
-async function rootPrefix() {
-  if (!onPath('apt-get')) return null;
-  if (process.getuid?.() === 0) return [];
-  if (!onPath('sudo')) return null;
-  const { code } = await run('sudo', ['-n', 'true']);
+/**
+ * @param {Machine} machine
+ * @returns {Promise<string[] | null>} words to put before a command so that root runs it; null when we may not
+ */
+async function rootPrefix({ uid, find, run: runProgram }) {
+  if (!find('apt-get')) return null;
+  if (uid === 0) return [];
+  if (!find('sudo')) return null;
+  const { code } = await runProgram('sudo', ['-n', 'true']);
   return code === 0 ? ['sudo', '-n'] : null;
 }
 
 /**
+ * @param {Machine} machine
  * @param {readonly string[]} asRoot
  * @param {readonly string[]} names
  */
-async function install(asRoot, names) {
-  const first = await apt(asRoot, ['install', '-y', '--no-install-recommends', ...names]);
+async function install(machine, asRoot, names) {
+  const apt = (/** @type {string[]} */ ...args) => {
+    const words = [...asRoot, 'env', 'DEBIAN_FRONTEND=noninteractive', 'apt-get', '-q', ...LOCK_PATIENCE, ...args];
+    return machine.run(/** @type {string} */ (words[0]), words.slice(1));
+  };
+  const first = await apt('install', '-y', '--no-install-recommends', ...names);
   if (first.code === 0) return;
   if (saysDiskFull(first.output)) throw diskFull('/');
   // A fresh machine has no package lists yet, and old lists name files that are gone.
-  const update = await apt(asRoot, ['update']);
-  const second = await apt(asRoot, ['install', '-y', '--no-install-recommends', ...names]);
+  const update = await apt('update');
+  const second = await apt('install', '-y', '--no-install-recommends', ...names);
   if (second.code === 0) return;
   const output = update.output + second.output;
   if (saysDiskFull(output)) throw diskFull('/');
@@ -77,24 +102,6 @@ async function install(asRoot, names) {
   throw new SetupProblem(
     `apt-get could not install ${names.join(' ')} (${said}): put that right, then run the same command again.`,
   );
-}
-
-/**
- * @param {readonly string[]} asRoot
- * @param {readonly string[]} args
- */
-function apt(asRoot, args) {
-  const [command, ...rest] = [
-    ...asRoot,
-    'env',
-    'DEBIAN_FRONTEND=noninteractive',
-    'apt-get',
-    '-q',
-    '-o',
-    'DPkg::Lock::Timeout=120',
-    ...args,
-  ];
-  return run(/** @type {string} */ (command), rest);
 }
 
 /** @param {readonly DebianPackage[]} missing */

@@ -8,7 +8,7 @@ const VERSION_MARK = '__VERSION__';
 const FILES_MARK = "'__FILES__'";
 
 /** Kept for use without a signal: code, fonts and pictures of the app, and its one page. */
-const KEPT = /^(_expo\/static\/|assets\/)|^(index\.html|logo\.svg|manifest\.webmanifest)$/;
+const KEPT = /^(_expo\/static\/|assets\/)|^(index\.html|register-sw\.js|logo\.svg|manifest\.webmanifest)$/;
 /** The compressed twins are the server's affair, the solver runs on the server, and the router's own pictures are never shown. */
 const LEFT_OUT = /\.(br|gz|map|wasm)$|^assets\/node_modules\/expo-router\//;
 
