@@ -1,5 +1,5 @@
 import 'react-native';
-import type { KeyboardEvent, MouseEvent, PointerEvent } from 'react';
+import type { KeyboardEvent, MouseEvent } from 'react';
 
 /** What react-native-web hands to the DOM and React Native's own types do not know. */
 interface WebProps {
@@ -33,10 +33,6 @@ interface WebProps {
   onMouseDown?: (event: MouseEvent<HTMLElement>) => void;
   onMouseEnter?: (event: MouseEvent<HTMLElement>) => void;
   onMouseLeave?: (event: MouseEvent<HTMLElement>) => void;
-  onPointerDown?: (event: PointerEvent<HTMLElement>) => void;
-  onPointerMove?: (event: PointerEvent<HTMLElement>) => void;
-  onPointerUp?: (event: PointerEvent<HTMLElement>) => void;
-  onPointerCancel?: (event: PointerEvent<HTMLElement>) => void;
 }
 
 declare module 'react-native' {

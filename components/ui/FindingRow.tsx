@@ -1,0 +1,98 @@
+import type { ReactNode } from 'react';
+import { StyleSheet, View } from 'react-native';
+
+import { Icon } from './Icon';
+import type { IconName } from './icon-shapes';
+import { PieceLetter } from './PieceLetter';
+import { Press } from './Press';
+import { Text } from './Text';
+import { color, space, type ColorName } from './tokens';
+
+/** must: holds the sign-off. look: somebody should look at it. note: good to know. */
+export type Weight = 'must' | 'look' | 'note';
+
+export const weightLooks: Readonly<
+  Record<Weight, { readonly icon: IconName; readonly word: string; readonly tone: ColorName }>
+> = {
+  must: { icon: 'warn', word: 'Must fix', tone: 'red' },
+  look: { icon: 'look', word: 'Look at', tone: 'red' },
+  note: { icon: 'note', word: 'Note', tone: 'ink2' },
+};
+
+export interface FindingRowProps {
+  readonly weight: Weight;
+  /** The fact, bold. A Fraction may stand in it. */
+  readonly fact: ReactNode;
+  /** What to do, or what it means. */
+  readonly act?: ReactNode;
+  /** Letters of the pieces it is about. */
+  readonly pieces?: readonly string[];
+  /** Somebody accepted it and said why; it stays listed. */
+  readonly accepted?: { readonly by: string; readonly reason: string };
+  /** Zooms to it and lights the pieces. */
+  readonly onPress?: () => void;
+  /** Buttons under it: "Accept", "Move the seam". */
+  readonly actions?: ReactNode;
+}
+
+/** One finding: shape, word and pieces, the fact, and what to do. */
+export function FindingRow({ weight, fact, act, pieces = [], accepted, onPress, actions }: FindingRowProps) {
+  const look = weightLooks[weight];
+  const body = (
+    <>
+      <View style={styles.sign}>
+        <Icon name={look.icon} tone={accepted ? 'ink2' : look.tone} />
+      </View>
+      <View style={styles.words}>
+        <View style={styles.head}>
+          <Text kind="labelSmall" tone={accepted ? 'ink2' : look.tone}>
+            {accepted ? `${look.word}, accepted` : look.word}
+          </Text>
+          <View style={styles.letters}>
+            {pieces.map((letter) => (
+              <PieceLetter key={letter} letter={letter} />
+            ))}
+          </View>
+        </View>
+        <Text kind="strong">{fact}</Text>
+        {act && <Text kind="second">{act}</Text>}
+        {accepted && <Text kind="second">{`${accepted.by}: ${accepted.reason}`}</Text>}
+      </View>
+    </>
+  );
+  return (
+    <View style={styles.row}>
+      {onPress ? (
+        <Press onPress={onPress} hoverGround={color.chalkT} style={styles.press}>
+          {body}
+        </Press>
+      ) : (
+        <View style={styles.press}>{body}</View>
+      )}
+      {actions && <View style={styles.actions}>{actions}</View>}
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  row: { borderBottomWidth: 1, borderBottomColor: color.line },
+  press: {
+    flexDirection: 'row',
+    gap: space.m,
+    paddingVertical: space.m,
+    paddingHorizontal: space.l,
+    outlineOffset: -3,
+  },
+  sign: { paddingTop: 2 },
+  words: { flex: 1, minWidth: 0 },
+  head: { flexDirection: 'row', alignItems: 'center', justifyContent: 'space-between', gap: space.s, minHeight: 24 },
+  letters: { flexDirection: 'row', gap: space.xs },
+  actions: {
+    flexDirection: 'row',
+    flexWrap: 'wrap',
+    gap: space.s,
+    paddingLeft: 52,
+    paddingRight: space.l,
+    paddingBottom: space.m,
+  },
+});
