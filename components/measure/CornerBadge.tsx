@@ -1,9 +1,9 @@
 import { StyleSheet, View } from 'react-native';
 import { Path, Svg } from 'react-native-svg';
 
-import { Press } from '@/components/ui/Press';
-import { Text } from '@/components/ui/Text';
-import { color } from '@/components/ui/tokens';
+import { Press } from '../ui/Press';
+import { Text } from '../ui/Text';
+import { color } from '../ui/tokens';
 
 /** Within this many degrees of 90 a corner counts as square. */
 const SQUARE_WITHIN = 0.1;

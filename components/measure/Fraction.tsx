@@ -1,9 +1,9 @@
 import { StyleSheet, View } from 'react-native';
 
 import { spokenLength, splitLength, type DisplayStep, type LengthStyle } from '@/geometry/tape/format-length';
-import { HiddenText, Text } from '@/components/ui/Text';
-import { color, type ColorName } from '@/components/ui/tokens';
-import { webStyle } from '@/components/ui/web-style';
+import { HiddenText, Text } from '../ui/Text';
+import { color, type ColorName } from '../ui/tokens';
+import { webStyle } from '../ui/web-style';
 
 /** Size of numerator and denominator against the whole number, and the smallest that can still be read. */
 const STACK_RATIO = 0.66;

@@ -2,9 +2,9 @@ import { useEffect, useRef, useState, type KeyboardEvent, type ReactNode } from 
 import { StyleSheet, View } from 'react-native';
 
 import { spokenLength } from '@/geometry/tape/format-length';
-import type { IconName } from '@/components/ui/icon-shapes';
-import { useLocalSetting, useLocalSwitch } from '@/components/ui/local-setting';
-import { HiddenText, Text } from '@/components/ui/Text';
+import type { IconName } from '../ui/icon-shapes';
+import { useLocalSetting, useLocalSwitch } from '../ui/local-setting';
+import { HiddenText, Text } from '../ui/Text';
 
 import { Fraction, FractionParts } from './Fraction';
 import { InchRuler } from './InchRuler';

@@ -1,9 +1,9 @@
 import { StyleSheet, View } from 'react-native';
 
 import { splitLength, spokenLength } from '@/geometry/tape/format-length';
-import { Press } from '@/components/ui/Press';
-import { color } from '@/components/ui/tokens';
-import { webStyle } from '@/components/ui/web-style';
+import { Press } from '../ui/Press';
+import { color } from '../ui/tokens';
+import { webStyle } from '../ui/web-style';
 
 import { FractionParts } from './Fraction';
 import { keepFocus } from './keep-focus';

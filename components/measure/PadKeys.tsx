@@ -1,11 +1,11 @@
 import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
-import { Icon } from '@/components/ui/Icon';
-import type { IconName } from '@/components/ui/icon-shapes';
-import { Press } from '@/components/ui/Press';
-import { Text } from '@/components/ui/Text';
-import { color, radius } from '@/components/ui/tokens';
+import { Icon } from '../ui/Icon';
+import type { IconName } from '../ui/icon-shapes';
+import { Press } from '../ui/Press';
+import { Text } from '../ui/Text';
+import { color, radius } from '../ui/tokens';
 
 import { FractionParts } from './Fraction';
 import { keepFocus } from './keep-focus';

@@ -2,11 +2,11 @@ import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import { spokenLength, type DisplayStep } from '@/geometry/tape/format-length';
-import { Icon } from '@/components/ui/Icon';
-import { Press } from '@/components/ui/Press';
-import { Text } from '@/components/ui/Text';
-import { color } from '@/components/ui/tokens';
-import { webStyle } from '@/components/ui/web-style';
+import { Icon } from '../ui/Icon';
+import { Press } from '../ui/Press';
+import { Text } from '../ui/Text';
+import { color } from '../ui/tokens';
+import { webStyle } from '../ui/web-style';
 
 import { bladeTicks } from './blade-ticks';
 import { Fraction } from './Fraction';

@@ -1,6 +1,8 @@
 import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
+import type { Severity } from '@/geometry/findings/types';
+
 import { Icon } from './Icon';
 import type { IconName } from './icon-shapes';
 import { PieceLetter } from './PieceLetter';
@@ -8,19 +10,17 @@ import { Press } from './Press';
 import { Text } from './Text';
 import { color, space, type ColorName } from './tokens';
 
-/** must: holds the sign-off. look: somebody should look at it. note: good to know. */
-export type Weight = 'must' | 'look' | 'note';
-
-export const weightLooks: Readonly<
-  Record<Weight, { readonly icon: IconName; readonly word: string; readonly tone: ColorName }>
+/** stop holds the sign-off, warn wants somebody to look, note is good to know. */
+export const severityLooks: Readonly<
+  Record<Severity, { readonly icon: IconName; readonly word: string; readonly tone: ColorName }>
 > = {
-  must: { icon: 'warn', word: 'Must fix', tone: 'red' },
-  look: { icon: 'look', word: 'Look at', tone: 'red' },
+  stop: { icon: 'warn', word: 'Must fix', tone: 'red' },
+  warn: { icon: 'look', word: 'Look at', tone: 'red' },
   note: { icon: 'note', word: 'Note', tone: 'ink2' },
 };
 
 export interface FindingRowProps {
-  readonly weight: Weight;
+  readonly severity: Severity;
   /** The fact, bold. A Fraction may stand in it. */
   readonly fact: ReactNode;
   /** What to do, or what it means. */
@@ -36,8 +36,8 @@ export interface FindingRowProps {
 }
 
 /** One finding: shape, word and pieces, the fact, and what to do. */
-export function FindingRow({ weight, fact, act, pieces = [], accepted, onPress, actions }: FindingRowProps) {
-  const look = weightLooks[weight];
+export function FindingRow({ severity, fact, act, pieces = [], accepted, onPress, actions }: FindingRowProps) {
+  const look = severityLooks[severity];
   const body = (
     <>
       <View style={styles.sign}>
