@@ -1,0 +1,5 @@
+import { JobsScreen } from '@/components/jobs/JobsScreen';
+
+export default function Jobs() {
+  return <JobsScreen />;
+}
