@@ -9,6 +9,9 @@ export interface FindingPlace {
   readonly wall?: string;
   readonly corner?: readonly [string, string];
   readonly slab?: string;
+  readonly base?: string;
+  /** Tells two facts of one rule at one place apart, such as a side or a reading. */
+  readonly detail?: string;
 }
 
 /** Something a person has to fix ('stop'), look at ('warn') or know ('note'). */

@@ -1,0 +1,79 @@
+import type { Base, Run } from '../core/layout';
+import { wallLabel } from '../core/layout';
+import { solvedRoom } from '../top/solved-room';
+import type { LaidRun, PlacedCutout, TopJoint } from '../top/types';
+import type { WallFrame } from '../top/wall-frame';
+import { wallFrames } from '../top/wall-frame';
+import type { Section } from '../wood/sections';
+import { assembledSections } from '../wood/sections';
+import type { FindingContext } from './context';
+import type { Finding } from './types';
+import { sizeText, listText } from './words';
+
+/** The context with what several rules ask for, worked out once. */
+export interface Facts extends FindingContext {
+  readonly walls: readonly WallFrame[];
+  readonly wallById: ReadonlyMap<string, WallFrame>;
+  readonly runById: ReadonlyMap<string, Run>;
+  readonly laidById: ReadonlyMap<string, LaidRun>;
+  readonly basesByWall: ReadonlyMap<string, readonly Base[]>;
+  readonly sections: readonly Section[];
+}
+
+/** One rule: everything it finds, nothing when all is well. */
+export type Rule = (facts: Facts) => readonly Finding[];
+
+export function factsOf(context: FindingContext): Facts {
+  const { layout, fit, tops } = context;
+  const walls = fit ? wallFrames(solvedRoom(fit, layout.room)).byIndex.filter((wall) => wall !== undefined) : [];
+  const basesByWall = new Map<string, Base[]>();
+  for (const base of layout.bases) {
+    const onWall = basesByWall.get(base.wall);
+    if (onWall) onWall.push(base);
+    else basesByWall.set(base.wall, [base]);
+  }
+  return {
+    ...context,
+    walls,
+    wallById: new Map(walls.map((wall) => [wall.id, wall])),
+    runById: new Map(layout.runs.map((run) => [run.id, run])),
+    laidById: new Map(tops.runs.map((run) => [run.id, run])),
+    basesByWall,
+    sections: assembledSections(tops),
+  };
+}
+
+/** A length as it is read off the tape, in the layout's step: "8 1/4 in". */
+export const size = (facts: Pick<Facts, 'layout'>, inches: number): string => sizeText(inches, facts.layout.step);
+
+/** Label of a wall by its id: A, B, C … */
+export function wallName(facts: Facts, id: string): string {
+  const index = facts.layout.room.walls.findIndex((wall) => wall.id === id);
+  return index < 0 ? id : wallLabel(index);
+}
+
+/** "A-B" for a corner between two walls. */
+export const cornerName = (facts: Facts, between: readonly [string, string]): string =>
+  `${wallName(facts, between[0])}-${wallName(facts, between[1])}`;
+
+/** Letters of the pieces of a run or island. */
+export const lettersOn = (facts: Facts, on: string): readonly string[] =>
+  facts.tops.pieces.filter((piece) => piece.on === on).map((piece) => piece.letter);
+
+/** "P and Q on wall A". */
+export function runName(facts: Facts, id: string): string {
+  const letters = listText(lettersOn(facts, id)) || 'The top';
+  const run = facts.laidById.get(id);
+  return run ? `${letters} on wall ${wallName(facts, run.wall)}` : letters;
+}
+
+/** "Joint P to Q". */
+export const jointName = (joint: Pick<TopJoint, 'letters'>): string =>
+  `Joint ${joint.letters[0]} to ${joint.letters[1]}`;
+
+/** "The sink", or its label. */
+export const cutoutName = (cutout: Pick<PlacedCutout, 'kind' | 'label'>): string =>
+  cutout.label || `The ${cutout.kind === 'free' ? 'cutout' : cutout.kind === 'tap' ? 'tap hole' : cutout.kind}`;
+
+/** Bases along a run's wall; none for an island. */
+export const basesUnder = (facts: Facts, run: LaidRun): readonly Base[] => facts.basesByWall.get(run.wall) ?? [];

@@ -1,0 +1,37 @@
+import { handsFor, LIFT_CAUTION, teamCapacityLb } from '../wood/hands';
+import { LIFTING, TEAM_LIFT } from '../wood/handbook';
+import { spanOf } from '../wood/sections';
+import type { Facts, Rule } from './facts';
+import { finding } from './finding';
+import type { Finding } from './types';
+import { listText, pounds } from './words';
+
+/** A section that needs more hands than the crew has, or more than three. */
+export const heavySection: Rule = (facts) =>
+  facts.sections.flatMap((letters) => {
+    const pieces = facts.pieces.filter((piece) => letters.includes(piece.letter));
+    const weightLb = pieces.reduce((sum, piece) => sum + piece.weight, 0);
+    const hands = handsFor(weightLb, spanOf(pieces));
+    const { crew } = facts.layout.access;
+    if (hands.people <= crew && hands.people < 4) return [];
+    return [heavy(facts, letters, weightLb, hands)];
+  });
+
+function heavy(
+  facts: Facts,
+  letters: readonly string[],
+  weightLb: number,
+  hands: ReturnType<typeof handsFor>,
+): Finding {
+  const { crew } = facts.layout.access;
+  const most = Math.min(Math.max(Math.floor(crew), 1), 3) as 1 | 2 | 3;
+  const need = hands.people === 4 ? 'four people or a lifting aid' : `${hands.people} people`;
+  return finding({
+    code: 'heavy-section',
+    severity: 'warn',
+    text: `${listText(letters)} ${letters.length > 1 ? 'weigh' : 'weighs'} ${pounds(weightLb)} and ${letters.length > 1 ? 'need' : 'needs'} ${need}; the crew is ${crew}, and ${most} together lift ${pounds(teamCapacityLb(most))}. Lifting index ${hands.liftingIndex.toFixed(1)}.`,
+    action: `${letters.length > 1 ? 'Join it on site, or bring' : 'Bring'} more hands or a lifting aid. ${LIFT_CAUTION}`,
+    at: { pieces: letters },
+    source: `${LIFTING}, p. 7; ${TEAM_LIFT}`,
+  });
+}

@@ -1,0 +1,70 @@
+import { dot, subtract } from '../core/vector';
+import type { LaidRun } from '../top/types';
+import type { WallFrame } from '../top/wall-frame';
+import { checkOverhang, EDGE_LOAD, type OverhangWay } from '../wood/overhang';
+import { sourceText } from '../wood/sourced';
+import { speciesOf } from '../wood/species';
+import { baseReach, carriesTop } from '../wood/under';
+import { basesUnder, runName, size, type Facts, type Rule } from './facts';
+import { finding } from './finding';
+import type { Finding } from './types';
+import { pounds, sizePair } from './words';
+
+interface Overhang {
+  readonly side: 'front' | 'left' | 'right';
+  readonly way: OverhangWay;
+  readonly length: number;
+}
+
+/** A part of a top that hangs past the cabinets further than it stays stiff. */
+export const overhangUnsupported: Rule = (facts) => {
+  const species = speciesOf(facts.layout.material.species);
+  if (!species) return [];
+  const { grain, thickness } = facts.layout.material;
+  return facts.tops.runs.flatMap((laid) => {
+    const wall = facts.wallById.get(laid.wall);
+    if (!wall || facts.runById.get(laid.id)?.side === 'back') return [];
+    return overhangs(facts, laid, wall).flatMap((overhang) => {
+      const check = checkOverhang(species, grain, overhang.way, overhang.length, thickness);
+      return check.holds ? [] : [tooFar(facts, laid, overhang, check)];
+    });
+  });
+};
+
+/** Past the front of the shallowest cabinet, across the grain; past the last cabinet at an open end, along it. */
+function overhangs(facts: Facts, laid: LaidRun, wall: WallFrame): readonly Overhang[] {
+  const [from, to] = [Math.min(laid.backFrom, laid.frontFrom), Math.max(laid.backTo, laid.frontTo)];
+  const bases = basesUnder(facts, laid).filter((base) => {
+    const [a, b] = baseReach(wall, base);
+    return carriesTop(base) && b > from && a < to;
+  });
+  const ends: Overhang[] = (['left', 'right'] as const).flatMap((side): Overhang[] => {
+    const end = laid[side];
+    if (end.kind !== 'open') return [];
+    const reaches = bases.map((base) => baseReach(wall, base));
+    const drawn =
+      side === 'left' ? Math.min(...reaches.map((r) => r[0])) - from : to - Math.max(...reaches.map((r) => r[1]));
+    return [{ side, way: 'along', length: bases.length > 0 ? drawn : end.overhang }];
+  });
+  if (bases.length === 0) return ends;
+  const reach = dot(subtract(laid.front.origin, wall.start), wall.inward);
+  const front = reach - Math.min(...bases.map((base) => base.depth));
+  return [{ side: 'front', way: 'across', length: front }, ...ends];
+}
+
+function tooFar(
+  facts: Facts,
+  laid: LaidRun,
+  { side, way, length }: Overhang,
+  check: ReturnType<typeof checkOverhang>,
+): Finding {
+  const [sags, limit] = sizePair(check.sag, check.allowed, facts.layout.step);
+  return finding({
+    code: 'overhang-unsupported',
+    severity: 'warn',
+    text: `${runName(facts, laid.id)} hangs ${size(facts, length)} past the cabinets at the ${side}, ${way} the grain: ${pounds(EDGE_LOAD.value)} on the edge bends it ${sags}, and ${limit} is the limit.`,
+    action: `Put brackets or a panel under it, or keep it to ${size(facts, Math.floor(check.longest * 8) / 8)}. Advice, not an engineer's approval.`,
+    at: { run: laid.id, detail: side },
+    source: `P L^3 / 3 E I with E of the Wood Handbook; ${sourceText(EDGE_LOAD)}`,
+  });
+}
