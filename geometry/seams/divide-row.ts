@@ -1,4 +1,4 @@
-import { freeStretches } from './free-stretches';
+import { freeStretches, type Stretch } from './free-stretches';
 import { visibleAt, type Hole, type Row, type Zone } from './seam-zones';
 
 /** A place for a seam with what it costs: visible inches and penalties. */
@@ -23,32 +23,56 @@ const OFF_MIDDLE = 0.02;
 const AT_COOKTOP = 6;
 /** Penalty for every inch a piece differs from an even share: only where nothing else decides. */
 const UNEVEN = 0.002;
-/** Places tried in the open, inches apart. */
-const GRID = 1;
+/** Places tried where nothing draws a seam, inches apart. */
+const GRID = 4;
 /** Float noise that a length may be over, inches. */
 const SLACK = 1e-6;
 
 /**
- * Places worth trying: whole inches along the wall, the ends of every allowed stretch, the middles of cutouts, and
- * `extra` ones where they are allowed.
+ * Places worth trying for `count` seams: the ends of every allowed stretch, the middles of cutouts, even shares, the
+ * furthest each seam can stand from either end, and a grid between.
+ *
+ * @param extra - further places, taken where they are allowed
  */
 export function seamPlaces(
   row: Row,
   holes: readonly Hole[],
   zones: readonly Zone[],
   span: Span,
+  count: number,
   extra: readonly number[] = [],
 ): readonly SeamPlace[] {
-  const free = freeStretches(zones, span.from, span.to);
-  const xs: number[] = [];
+  const [first, last] = [span.to - span.longest * count, span.from + span.longest * count];
+  const free = freeStretches(zones, Math.max(span.from, first), Math.min(span.to, last));
+  const xs: number[] = [...chain(free, span, count)];
   for (const [from, to] of free) {
     xs.push(from, to);
     for (let x = Math.ceil(from / GRID) * GRID; x < to; x += GRID) xs.push(x);
   }
-  const allowed = (x: number) => free.some(([from, to]) => x >= from && x <= to);
-  for (const x of [...extra, ...holes.map(({ box }) => (box.minX + box.maxX) / 2)]) if (allowed(x)) xs.push(x);
+  const even = (span.to - span.from) / (count + 1);
+  const wanted = [...extra, ...holes.map(({ box }) => (box.minX + box.maxX) / 2)];
+  for (let n = 1; n <= count; n++) wanted.push(Math.round(span.from + n * even));
+  for (const x of wanted) if (free.some(([from, to]) => x >= from && x <= to)) xs.push(x);
   xs.sort((a, b) => a - b);
   return xs.filter((x, i) => i === 0 || x - xs[i - 1]! > SLACK).map((x) => seamPlace(row, holes, x));
+}
+
+/** Seams as far apart as they can be, from the left and from the right: if any set of `count` exists, one of these does. */
+function chain(free: readonly Stretch[], { from, to, longest }: Span, count: number): readonly number[] {
+  const xs: number[] = [];
+  let [left, right] = [from, to];
+  for (let n = 0; n < count; n++) {
+    const reach = left + longest;
+    const back = right - longest;
+    let [next, previous] = [-Infinity, Infinity];
+    for (const [a, b] of free) {
+      if (a <= reach) next = Math.max(next, Math.min(b, reach));
+      if (b >= back) previous = Math.min(previous, Math.max(a, back));
+    }
+    if (next > left) xs.push((left = next));
+    if (previous < right) xs.push((right = previous));
+  }
+  return xs;
 }
 
 /** What a seam at x would cost. */

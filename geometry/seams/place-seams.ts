@@ -1,4 +1,4 @@
-import type { Base, Step } from '../core/layout';
+import type { Step } from '../core/layout';
 import type { SeamLimits } from '../core/settings';
 import type { Deck } from '../top/deck';
 import type { DeckCut } from '../top/deck-cells';
@@ -10,14 +10,14 @@ import { divide, fewest, seamPlace, seamPlaces, type SeamPlace, type Span } from
 import { zoneAt } from './free-stretches';
 import { deepest, longestPiece, type LongStock, type WholePieces } from './long-stock';
 import { readPins } from './pins';
-import { seamZones, visibleAt, type Hole, type Row, type Zone } from './seam-zones';
+import { seamZones, visibleAt, type Hole, type Row, type Support, type Zone } from './seam-zones';
 
 /** What decides about the seams of one deck. */
 export interface SeamGround {
   readonly deck: Deck;
   readonly holes: readonly Hole[];
   /** What stands along its wall; none for an island. */
-  readonly bases: readonly Base[];
+  readonly supports: readonly Support[];
   /** Pinned places, inches along the wall. */
   readonly pins: readonly number[];
   readonly limits: SeamLimits;
@@ -32,6 +32,9 @@ export interface SeamGround {
 export interface PlannedSeam {
   readonly kind: 'cross' | 'edge';
   readonly row: number;
+  /** Own y of the row's front and back edge. */
+  readonly bottom: number;
+  readonly top: number;
   readonly at: number;
   readonly visible: number;
   readonly inCutout: LaidCutout | null;
@@ -41,6 +44,8 @@ export interface PlannedSeam {
 export interface SeamPlan {
   readonly cut: DeckCut;
   readonly seams: readonly PlannedSeam[];
+  /** Longest piece each row may be cut into; Infinity where it can stay whole. */
+  readonly longest: readonly number[];
   readonly problems: readonly LayProblem[];
 }
 
@@ -60,24 +65,30 @@ export function placeSeams(ground: SeamGround): SeamPlan {
   const seams: PlannedSeam[] = rips.map((y, i) => ({
     kind: 'edge',
     row: i + 1,
+    bottom: y,
+    top: y,
     at: y,
     visible: edgeVisible(deck, holes, y),
     inCutout: null,
     pinned: false,
   }));
+  const longest: number[] = [];
   let before: readonly number[] = [];
   const cross = rowsOf(deck, rips).map((row, index) => {
-    const rowZones = seamZones(row, holes, ground.bases, limits, ground.step);
+    const rowZones = seamZones(row, holes, ground.supports, limits, ground.step);
     const zones = [...rowZones, ...before.map((x) => staggerZone(x, ground.step))];
     const pins = index === 0 ? readPins(ground, row, zones, problems) : [];
-    const placed = divideRow(ground, row, zones, pins, problems);
+    longest.push(rowLimit(ground, row));
+    const placed = divideRow(ground, row, zones, pins, longest[index]!, problems);
     for (const { x } of placed) {
-      seams.push({ kind: 'cross', row: index, at: x, ...visibleAt(row, holes, x), pinned: pins.includes(x) });
+      const { bottom, top } = row;
+      const pinned = pins.includes(x);
+      seams.push({ kind: 'cross', row: index, bottom, top, at: x, ...visibleAt(row, holes, x), pinned });
     }
     before = placed.map(({ x }) => x);
     return before;
   });
-  return { cut: { rows: rips, cross }, seams, problems };
+  return { cut: { rows: rips, cross }, seams, longest, problems };
 }
 
 function staggerZone(x: number, step: Step): Zone {
@@ -85,7 +96,7 @@ function staggerZone(x: number, step: Step): Zone {
 }
 
 /** Longest piece a row may be cut into, or Infinity when it can stay whole. */
-export function rowLimit({ stock, whole, carried }: SeamGround, row: Row): number {
+function rowLimit({ stock, whole, carried }: SeamGround, row: Row): number {
   const length = row.to - row.from;
   const depth = row.top - row.bottom;
   if (length > carried) return Math.min(carried, longestPiece(stock, depth));
@@ -97,9 +108,9 @@ function divideRow(
   row: Row,
   zones: readonly Zone[],
   pins: readonly number[],
+  longest: number,
   problems: LayProblem[],
 ): readonly SeamPlace[] {
-  const longest = rowLimit(ground, row);
   const marks = [row.from, ...pins, row.to];
   const placed: SeamPlace[] = [];
   for (let i = 1; i < marks.length; i++) {
@@ -119,9 +130,8 @@ function divideSpan(
 ): readonly SeamPlace[] {
   const least = fewest(span);
   if (least === 0) return [];
-  const places = seamPlaces(row, ground.holes, zones, span);
   for (let count = least; count <= least + MORE_SEAMS; count++) {
-    const found = divide(span, places, count);
+    const found = divide(span, seamPlaces(row, ground.holes, zones, span, count), count);
     if (found) return found.places;
   }
   return forced(ground, row, zones, span, least, problems);
@@ -142,7 +152,7 @@ function forced(
   ];
   const open = { ...span, shortest: 0 };
   const spread = Array.from({ length: least }, (_, i) => span.from + ((span.to - span.from) * (i + 1)) / (least + 1));
-  const places = seamPlaces(row, ground.holes, ends, open, spread).map((place) =>
+  const places = seamPlaces(row, ground.holes, ends, open, least, spread).map((place) =>
     zoneAt(zones, place.x) ? { ...place, cost: place.cost + BROKEN_RULE } : place,
   );
   const found = divide(open, places, least)?.places ?? spread.map((x) => seamPlace(row, ground.holes, x));

@@ -1,4 +1,4 @@
-import type { Base, Step } from '../core/layout';
+import type { BaseKind, Step } from '../core/layout';
 import type { SeamLimits } from '../core/settings';
 import type { Box } from '../core/polygon';
 import type { Polygon } from '../core/point';
@@ -21,6 +21,14 @@ export interface Hole {
   readonly box: Box;
 }
 
+/** Something that stands along the deck's wall, inches along the wall. */
+export interface Support {
+  readonly kind: BaseKind;
+  readonly from: number;
+  readonly to: number;
+  readonly name: string;
+}
+
 /** One row of a deck that is to be divided: between two rips, or the whole depth. */
 export interface Row {
   readonly deck: Deck;
@@ -38,7 +46,7 @@ export interface Row {
 export function seamZones(
   row: Row,
   holes: readonly Hole[],
-  bases: readonly Base[],
+  supports: readonly Support[],
   limits: SeamLimits,
   step: Step,
 ): readonly Zone[] {
@@ -49,8 +57,8 @@ export function seamZones(
   ];
   for (const hole of holes)
     if (hole.box.minY < row.top && hole.box.maxY > row.bottom) zones.push(...holeZones(hole, limits, step));
-  for (const base of bases) {
-    const zone = baseZone(deck, base, row, limits, step);
+  for (const support of supports) {
+    const zone = supportZone(deck, support, limits, step);
     if (zone) zones.push(zone);
   }
   return zones;
@@ -105,16 +113,14 @@ function holeZones({ cutout, box }: Hole, limits: SeamLimits, step: Step): reado
 }
 
 /** Bases that carry nothing in their middle. */
-const HOLLOW: ReadonlySet<Base['kind']> = new Set(['dishwasher', 'range', 'opening']);
+const HOLLOW: ReadonlySet<BaseKind> = new Set(['dishwasher', 'range', 'opening']);
 
-function baseZone(deck: Deck, base: Base, row: Row, limits: SeamLimits, step: Step): Zone | null {
-  if (!HOLLOW.has(base.kind)) return null;
-  const end = base.to === 'end' ? (deck.sign === 1 ? row.to : -row.from) : base.to;
+function supportZone(deck: Deck, { kind, name, ...at }: Support, limits: SeamLimits, step: Step): Zone | null {
+  if (!HOLLOW.has(kind)) return null;
   // A dishwasher or range carries no top at all; in a plain opening the sides of the cabinets beside it still reach a little.
-  const reach = base.kind === 'opening' ? limits.support : 0;
-  const [from, to] = [base.from + reach, end - reach];
+  const reach = kind === 'opening' ? limits.support : 0;
+  const [from, to] = [at.from + reach, at.to - reach];
   if (to <= from) return null;
-  const name = base.label ?? (base.kind === 'opening' ? 'opening' : base.kind);
   const why = reach > 0 ? `over the ${name} with no support within ${inches(reach, step)}` : `over the ${name}`;
   return deck.sign === 1 ? { from, to, why } : { from: -to, to: -from, why };
 }

@@ -1,10 +1,9 @@
 import type { Cutout, Layout } from '../core/layout';
-import { boundingBox, type Box } from '../core/polygon';
+import type { Box } from '../core/polygon';
 import type { Polygon } from '../core/point';
-import { insideConvex, isConvex } from './clip-convex';
+import { isConvex } from './clip-convex';
 import { cutoutShape } from './cutout-outline';
 import { outlineToRoom, type Deck } from './deck';
-import { inches } from './sentence';
 import { spanAt } from './deck-span';
 import type { LayProblem, PlacedCutout } from './types';
 
@@ -22,8 +21,7 @@ export interface LaidCutout {
 /**
  * Puts every cutout on its run or island.
  *
- * @returns the cutouts in the layout's order, and a sentence for each that lies off its top or across an edge where it
- *   may not; such a cutout is laid all the same, unless its top is not there
+ * @returns the cutouts in the layout's order, and a sentence for each that has no top or no size
  */
 export function layCutouts(
   layout: Layout,
@@ -43,10 +41,7 @@ export function layCutouts(
       problems.push({ code: 'cutout-no-size', message: `${name} has no size. Type its width and depth.`, at });
       continue;
     }
-    const laid = layOne(cutout, deck);
-    cutouts.push(laid);
-    const message = edgeProblem(laid, name, layout);
-    if (message) problems.push({ ...message, at });
+    cutouts.push(layOne(cutout, deck));
   }
   return { cutouts, problems };
 }
@@ -105,24 +100,4 @@ function acrossGrain(outline: Polygon): number {
   let sum = 0;
   outline.forEach((a, i) => (sum += Math.abs(outline[(i + 1) % outline.length]![1] - a[1])));
   return sum;
-}
-
-function edgeProblem(
-  { cutout, deck, outline, box }: LaidCutout,
-  name: string,
-  layout: Layout,
-): Omit<LayProblem, 'at'> | null {
-  const whole = boundingBox(deck.outline);
-  const off = box.minX >= whole.maxX || box.maxX <= whole.minX || box.minY >= whole.maxY || box.maxY <= whole.minY;
-  if (off) return { code: 'cutout-off-top', message: `${name} lies off top ${deck.id}.` };
-  if (cutout.kind === 'notch' || cutout.kind === 'free' || cutout.mount === 'apron') return null;
-  if (deck.shape !== 'free' && insideConvex(deck.outline, outline)) return null;
-  const past = Math.max(-box.minY, box.maxY - deck.depth, whole.minX - box.minX, box.maxX - whole.maxX);
-  if (past > 0) {
-    return {
-      code: 'cutout-over-edge',
-      message: `${name} reaches ${inches(past, layout.step)} past the edge of top ${deck.id}.`,
-    };
-  }
-  return null;
 }

@@ -1,29 +1,21 @@
-import type { JointChoice, Layout, Run, RunEnd } from '../core/layout';
+import type { Layout, Run, RunEnd } from '../core/layout';
 import { along, scale } from '../core/vector';
-import { cornerJoint, type CornerJoint, type JointEnd, type RunLines } from './corner-joint';
-import { SAME_POINT, stripOutline, toOwn, type Deck, type DeckEnd } from './deck';
+import type { JointEnd, RunLines } from './corner-joint';
+import { layJoints, type JointEnds, type LaidJoint } from './lay-joints';
+import { outlineToRoom, SAME_POINT, stripOutline, toOwn, type Deck, type DeckEnd } from './deck';
 import { layEnd, type EndSide } from './run-end';
-import { outlineToRoom } from './deck';
 import { inches } from './sentence';
 import type { SolvedRoom } from './solved-room';
 import type { LaidRun, LayProblem } from './types';
-import { alongWall, wallFrames, type WallFrame } from './wall-frame';
+import { alongWall, wallFrames, type RoomWalls, type WallFrame } from './wall-frame';
 import { highestBump } from './wall-profile';
-
-/** A joint between two laid runs, before pieces have letters. */
-export interface LaidJoint extends CornerJoint {
-  readonly between: readonly [string, string];
-  /** Standard deviation of the corner, degrees. */
-  readonly cornerSd: number;
-  readonly assembled: 'shop' | 'site';
-}
 
 export interface LaidRuns {
   readonly runs: readonly LaidRun[];
   readonly decks: readonly Deck[];
   readonly joints: readonly LaidJoint[];
   readonly problems: readonly LayProblem[];
-  readonly walls: readonly WallFrame[];
+  readonly walls: RoomWalls;
 }
 
 /** Slack of the tape before a run counts as longer than its wall, inches. */
@@ -43,7 +35,8 @@ export function layRuns(layout: Layout, room: SolvedRoom): LaidRuns {
     const laid = runLines(run, walls, layout, problems);
     if (laid) lines.set(run.id, laid);
   }
-  const { joints, ends } = layJoints(layout, room, lines, walls, problems);
+  const { joints, ends, problems: jointProblems } = layJoints(layout, room, lines, walls);
+  problems.push(...jointProblems);
   const runs: LaidRun[] = [];
   const decks: Deck[] = [];
   for (const run of layout.runs) {
@@ -58,9 +51,9 @@ export function layRuns(layout: Layout, room: SolvedRoom): LaidRuns {
   return { runs, decks, joints: joints.filter((j) => j.between.every((id) => standing.has(id))), problems, walls };
 }
 
-function runLines(run: Run, walls: readonly WallFrame[], layout: Layout, problems: LayProblem[]): RunLines | null {
+function runLines(run: Run, walls: RoomWalls, layout: Layout, problems: LayProblem[]): RunLines | null {
   const at = { run: run.id };
-  const wall = walls.find((w) => w.id === run.wall);
+  const wall = walls.byId.get(run.wall);
   const refuse = (code: string, message: string) => {
     problems.push({ code, message, at: { ...at, ...(wall && { wall: wall.id }) } });
     return null;
@@ -85,7 +78,7 @@ function runLines(run: Run, walls: readonly WallFrame[], layout: Layout, problem
   }
   const side = run.side ?? 'front';
   const sign = side === 'back' ? -1 : 1;
-  const standoff = run.backGap + highestBump(wall.profile, from, to, side);
+  const standoff = standoffOf(run, wall);
   const offset = (off: number) => ({
     origin: along(wall.start, wall.inward, sign * off),
     direction: wall.along,
@@ -101,98 +94,20 @@ function runLines(run: Run, walls: readonly WallFrame[], layout: Layout, problem
   };
 }
 
+/** How far the back edge stands off the wall line: the gap plus the highest bump along the run, inches. */
+export function standoffOf(run: Run, wall: WallFrame): number {
+  const from = followsCorner(run.left) ? 0 : run.from;
+  const to = followsCorner(run.right) ? wall.length : alongWall(wall, run.to);
+  return run.backGap + highestBump(wall.profile, from, to, run.side);
+}
+
 const followsCorner = (end: RunEnd): boolean => end.kind === 'wall' || end.kind === 'joint';
-
-interface JointEnds {
-  readonly left: Map<string, JointEnd>;
-  readonly right: Map<string, JointEnd>;
-  readonly stepped: Set<string>;
-}
-
-function layJoints(
-  layout: Layout,
-  room: SolvedRoom,
-  lines: ReadonlyMap<string, RunLines>,
-  walls: readonly WallFrame[],
-  problems: LayProblem[],
-): { joints: LaidJoint[]; ends: JointEnds } {
-  const ends: JointEnds = { left: new Map(), right: new Map(), stepped: new Set() };
-  const joints: LaidJoint[] = [];
-  const waiting = new Map<string, Run>();
-  for (const run of layout.runs) {
-    if (run.left.kind !== 'joint' || !lines.has(run.id)) continue;
-    const key = `${run.wall} ${run.side ?? 'front'}`;
-    if (waiting.has(key)) problems.push(alone(run, 'left', 'another run already ends at that corner'));
-    else waiting.set(key, run);
-  }
-  const choices = new Map(layout.joints.map((choice) => [pairKey(...choice.between), choice]));
-  const met = new Set<string>();
-  for (const run of layout.runs) {
-    const own = lines.get(run.id);
-    if (run.right.kind !== 'joint' || !own) continue;
-    const nextWall = walls.find((w) => w.index === own.wall.next);
-    const partner = nextWall && waiting.get(`${nextWall.id} ${run.side ?? 'front'}`);
-    if (!nextWall || !partner || partner.id === run.id) {
-      const why = nextWall
-        ? `no run on wall ${nextWall.label} joins it`
-        : `wall ${own.wall.label} has no neighbor there`;
-      problems.push(alone(run, 'right', why));
-      continue;
-    }
-    waiting.delete(`${partner.wall} ${partner.side ?? 'front'}`);
-    met.add(pairKey(run.id, partner.id));
-    const choice = choices.get(pairKey(run.id, partner.id)) ?? null;
-    const result = cornerJoint(own, lines.get(partner.id)!, choice);
-    const joint = 'joint' in result ? result.joint : null;
-    if (!joint) {
-      problems.push(badJoint(run.id, partner.id, 'why' in result ? result.why : ''));
-      continue;
-    }
-    ends.right.set(run.id, joint.left);
-    ends.left.set(partner.id, joint.right);
-    if (joint.kind === 'step') ends.stepped.add(run.depth > partner.depth ? `${run.id} right` : `${partner.id} left`);
-    joints.push({
-      ...joint,
-      between: [run.id, partner.id],
-      cornerSd: cornerSdOf(room, own.wall.id, nextWall.id),
-      assembled: choice?.assembled ?? 'shop',
-    });
-  }
-  for (const run of waiting.values()) problems.push(alone(run, 'left', 'no run joins it there'));
-  for (const choice of layout.joints) {
-    if (met.has(pairKey(...choice.between))) continue;
-    problems.push(badJoint(...choice.between, 'they do not meet at a corner'));
-  }
-  return { joints, ends };
-}
-
-const pairKey = (a: string, b: string): string => (a < b ? `${a}\u0000${b}` : `${b}\u0000${a}`);
-
-function alone(run: Run, side: EndSide, why: string): LayProblem {
-  return {
-    code: 'joint-alone',
-    message: `Run ${run.id} should end on a joint at its ${side}, but ${why}. It is cut square at the wall's end.`,
-    at: { run: run.id, wall: run.wall },
-  };
-}
-
-function badJoint(a: string, b: string, why: string): LayProblem {
-  return {
-    code: 'joint-impossible',
-    message: `Runs ${a} and ${b} cannot be joined: ${why}.`,
-    at: { run: a, joint: `${a}-${b}` },
-  };
-}
-
-function cornerSdOf(room: SolvedRoom, left: string, right: string): number {
-  return room.corners.find((c) => c.between[0] === left && c.between[1] === right)?.sd ?? 0;
-}
 
 function layOne(
   run: Run,
   own: RunLines,
   joints: JointEnds,
-  walls: readonly WallFrame[],
+  walls: RoomWalls,
   layout: Layout,
   problems: LayProblem[],
 ): { run: LaidRun; deck: Deck } | null {
@@ -267,10 +182,4 @@ function runDeck(run: Run, own: RunLines, left: JointEnd, right: JointEnd, joint
     frontSeen: true,
     backSeen: pastChainEnd,
   };
-}
-
-/** Kind of joint chosen for two runs, or null. */
-export function choiceFor(layout: Layout, a: string, b: string): JointChoice | null {
-  const key = pairKey(a, b);
-  return layout.joints.find((choice) => pairKey(...choice.between) === key) ?? null;
 }

@@ -4,7 +4,7 @@ import { along } from '../core/vector';
 import { STRAIGHT_WITHIN, type JointEnd, type RunLines } from './corner-joint';
 import { degrees, inches } from './sentence';
 import type { LayProblem } from './types';
-import { alongWall, footOn, interiorAngle, type WallFrame } from './wall-frame';
+import { alongWall, footOn, interiorAngle, type RoomWalls, type WallFrame } from './wall-frame';
 import { highestBump } from './wall-profile';
 
 export type EndSide = 'left' | 'right';
@@ -22,7 +22,7 @@ export interface LaidEnd {
  *
  * @param side - left or right as seen from the room
  */
-export function layEnd(run: Run, lines: RunLines, side: EndSide, walls: readonly WallFrame[], step: Step): LaidEnd {
+export function layEnd(run: Run, lines: RunLines, side: EndSide, walls: RoomWalls, step: Step): LaidEnd {
   const end = run[side];
   const { wall } = lines;
   if (end.kind === 'wall') return wallEnd(run, lines, side, walls, step);
@@ -33,10 +33,10 @@ export function layEnd(run: Run, lines: RunLines, side: EndSide, walls: readonly
 
 const squareAt = (at: number): JointEnd => ({ back: at, front: at, wing: null });
 
-function wallEnd(run: Run, lines: RunLines, side: EndSide, walls: readonly WallFrame[], step: Step): LaidEnd {
+function wallEnd(run: Run, lines: RunLines, side: EndSide, walls: RoomWalls, step: Step): LaidEnd {
   const { wall } = lines;
   const index = side === 'left' ? wall.previous : wall.next;
-  const neighbour = walls.find((w) => w.index === index);
+  const neighbour = index === null ? undefined : walls.byIndex[index];
   const fallback = squareAt(side === 'left' ? 0 : wall.length);
   const refuse = (message: string): LaidEnd => ({
     at: fallback,

@@ -24,30 +24,39 @@ export interface WallFrame {
   readonly next: number | null;
 }
 
-/** Walls of the room in order; a wall whose two ends coincide is left out. */
-export function wallFrames(room: SolvedRoom): readonly WallFrame[] {
+/** The room's walls, to be looked up. */
+export interface RoomWalls {
+  readonly byId: ReadonlyMap<string, WallFrame>;
+  /** By place in the room; undefined where a wall's two ends coincide. */
+  readonly byIndex: readonly (WallFrame | undefined)[];
+}
+
+/** Walls of the room in order. */
+export function wallFrames(room: SolvedRoom): RoomWalls {
+  const byIndex = room.walls.map((_, index) => wallFrame(room, index));
+  return { byIndex, byId: new Map(byIndex.flatMap((wall) => (wall ? [[wall.id, wall] as const] : []))) };
+}
+
+function wallFrame(room: SolvedRoom, index: number): WallFrame | undefined {
+  const { id, profile } = room.walls[index]!;
   const count = room.walls.length;
-  const frames: WallFrame[] = [];
-  room.walls.forEach((wall, index) => {
-    const start = room.points[index];
-    const end = room.closed ? room.points[(index + 1) % room.points.length] : room.points[index + 1];
-    const along = start && end ? unit(start, end) : null;
-    if (!start || !end || !along) return;
-    frames.push({
-      id: wall.id,
-      index,
-      label: wallLabel(index),
-      start,
-      end,
-      along,
-      inward: rightNormal(along),
-      length: distance(start, end),
-      profile: wall.profile,
-      previous: index > 0 ? index - 1 : room.closed ? count - 1 : null,
-      next: index < count - 1 ? index + 1 : room.closed ? 0 : null,
-    });
-  });
-  return frames;
+  const start = room.points[index];
+  const end = room.closed ? room.points[(index + 1) % room.points.length] : room.points[index + 1];
+  const along = start && end ? unit(start, end) : null;
+  if (!start || !end || !along) return undefined;
+  return {
+    id,
+    index,
+    label: wallLabel(index),
+    start,
+    end,
+    along,
+    inward: rightNormal(along),
+    length: distance(start, end),
+    profile,
+    previous: index > 0 ? index - 1 : room.closed ? count - 1 : null,
+    next: index < count - 1 ? index + 1 : room.closed ? 0 : null,
+  };
 }
 
 /** Interior (room side) angle between a wall and the next one, radians within (0, 2 pi): 90 degrees at an inside corner. */
