@@ -1,7 +1,7 @@
 import { toDegrees } from '../core/angle';
+import type { ExpectedAngle } from './expected-angles';
 import { cornerInput, cornerName } from './room-frame';
 import type { RoomFrame } from './room-frame';
-import { measuredAngle } from './start-shapes';
 import type { RoomError, RoomInput } from './types';
 
 /**
@@ -14,9 +14,9 @@ const WORST_SUM_DEG = 60;
  * Whether the corners of a closed ring add up to (n - 2) x 180 degrees, at least roughly. When they do not, the error
  * names the corner that is most likely on the wrong side, or else the one furthest from its drawing.
  */
-export function checkClosing(input: RoomInput, frame: RoomFrame): RoomError | null {
+export function checkClosing(input: RoomInput, frame: RoomFrame, expected: readonly ExpectedAngle[]): RoomError | null {
   if (!frame.closed) return null;
-  const angles = frame.corners.map((_, i) => toDegrees(measuredAngle(input, frame, i)));
+  const angles = expected.map((e) => toDegrees(e.measured));
   const needed = (frame.corners.length - 2) * 180;
   const sum = angles.reduce((a, b) => a + b, 0);
   if (Math.abs(sum - needed) <= WORST_SUM_DEG) return null;

@@ -1,10 +1,17 @@
-import { CholeskyDecomposition, EigenvalueDecomposition, Matrix } from 'ml-matrix';
+import { CholeskyDecomposition, EigenvalueDecomposition, Matrix, QrDecomposition } from 'ml-matrix';
 
 /**
- * Smallest squared pivot, of normal equations scaled to a unit diagonal, that still counts as determined. Rounding
- * leaves about 1e-15 in a direction that nothing fixes; the loosest chain with one-degree corners keeps over 1e-6.
+ * Squared pivots, of normal equations scaled to a unit diagonal. A chain of twelve walls with 0.001 in and one-degree
+ * readings side by side keeps over 1e-7; where nothing fixes a direction, rounding leaves up to 1e-8. Between these the
+ * orthogonal factor of the rows themselves decides, which is clear about it but slower.
  */
-const SINGULAR_PIVOT = 1e-12;
+const WEAK_PIVOT = 1e-9;
+export const DOUBTFUL_PIVOT = 1e-5;
+/** Smallest diagonal of the orthogonal factor, over unit columns, that is more than rounding. */
+const FULL_RANK = 1e-8;
+
+/** Eigenvalue, of normal equations scaled to a unit diagonal, that is nothing but rounding. */
+const OPEN_EIGENVALUE = 1e-12;
 
 /** Weighted rows of a linearised network: row * step = misfit, each already divided by its standard deviation. */
 export interface WeightedSystem {
@@ -17,6 +24,8 @@ export interface WeightedSystem {
 
 /** Normal equations of the system, factored. */
 export interface FactoredNormals {
+  /** Smallest squared pivot; under `DOUBTFUL_PIVOT` ask `hasFullRank`. */
+  readonly pivot: number;
   /** The Gauss-Newton step, inches for every unknown. */
   step(): Float64Array;
   /** Inverse of the normal matrix, row by row. */
@@ -38,8 +47,11 @@ export function factorNormals(system: WeightedSystem, damping = 0): FactoredNorm
   const cholesky = new CholeskyDecomposition(normal);
   if (!cholesky.isPositiveDefinite()) return null;
   const lower = cholesky.lowerTriangularMatrix;
-  for (let i = 0; i < unknowns; i++) if (!(lower.get(i, i) ** 2 > SINGULAR_PIVOT)) return null;
+  let pivot = Infinity;
+  for (let i = 0; i < unknowns; i++) pivot = Math.min(pivot, lower.get(i, i) ** 2);
+  if (pivot < WEAK_PIVOT && !hasFullRank(system)) return null;
   return {
+    pivot,
     step: () => {
       const right = scaledRight(system, scale);
       const solved = cholesky.solve(Matrix.columnVector(right));
@@ -50,24 +62,34 @@ export function factorNormals(system: WeightedSystem, damping = 0): FactoredNorm
 }
 
 /**
- * Directions in which the points can move without any observation noticing.
+ * Directions in which the points can move without any observation noticing; where rounding leaves none, the direction
+ * that is noticed least.
  *
- * @returns unit vectors over the unknowns; empty when everything is determined
+ * @returns unit vectors over the unknowns, at least one
  */
 export function openDirections(system: WeightedSystem): readonly Float64Array[] {
   const { unknowns } = system;
   const { normal, scale } = scaledNormals(system);
   for (let i = 0; i < unknowns; i++) normal.set(i, i, scale[i] === 0 ? 0 : 1);
   const eigen = new EigenvalueDecomposition(normal, { assumeSymmetric: true });
-  const vectors = eigen.eigenvectorMatrix;
-  const open: Float64Array[] = [];
-  eigen.realEigenvalues.forEach((value, k) => {
-    if (value > 1e-9) return;
-    const v = Float64Array.from(scale, (s, i) => (s === 0 ? 1 : s) * vectors.get(i, k));
+  const limit = Math.max(OPEN_EIGENVALUE, Math.min(...eigen.realEigenvalues));
+  return eigen.realEigenvalues.flatMap((value, k) => {
+    if (value > limit) return [];
+    const v = Float64Array.from(scale, (s, i) => (s === 0 ? 1 : s) * eigen.eigenvectorMatrix.get(i, k));
     const size = Math.hypot(...v);
-    open.push(v.map((x) => x / size));
+    return [v.map((x) => x / size)];
   });
-  return open;
+}
+
+/** Whether the observations hold the points in every direction. */
+export function hasFullRank({ unknowns, rows }: WeightedSystem): boolean {
+  if (rows.length < unknowns) return false;
+  const sizes = new Float64Array(unknowns);
+  for (const row of rows) row.forEach((x, i) => (sizes[i]! += x * x));
+  const scaled = new Matrix(rows.map((row) => row.map((x, i) => (x === 0 ? 0 : x / Math.sqrt(sizes[i]!)))));
+  const factor = new QrDecomposition(scaled).upperTriangularMatrix;
+  for (let i = 0; i < unknowns; i++) if (!(Math.abs(factor.get(i, i)) > FULL_RANK)) return false;
+  return true;
 }
 
 function scaledNormals({ unknowns, rows }: WeightedSystem): { normal: Matrix; scale: Float64Array } {

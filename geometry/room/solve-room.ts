@@ -1,3 +1,5 @@
+import type { Point } from '../core/point';
+import { cross, subtract } from '../core/vector';
 import { adjustNetwork } from './adjust-network';
 import type { Adjustment, NetworkResult } from './adjust-network';
 import { listNames } from './check-paths';
@@ -6,10 +8,10 @@ import type { NetworkObservation, NetworkPoint } from './network';
 import { assumedReading, roomObservations } from './room-observations';
 import type { RoomObservation } from './room-observations';
 import { wallEnd } from './room-frame';
-import type { RoomFrame } from './room-frame';
-import { expectedAngle, startShapes } from './start-shapes';
+import type { FrameCorner, RoomFrame } from './room-frame';
+import type { ExpectedAngle } from './expected-angles';
+import { startShapes } from './start-shapes';
 import { undeterminedError } from './undetermined';
-import type { Point } from '../core/point';
 import type { RoomError, RoomInput } from './types';
 
 /** A room that has been fitted, before it is put into words. */
@@ -35,15 +37,15 @@ const BETTER = 1e-6;
 const SUSPICIOUS = 3.29;
 
 /** Fits the room from the start that serves it best. */
-export function solveRoom(input: RoomInput, frame: RoomFrame): SolveResult {
+export function solveRoom(input: RoomInput, frame: RoomFrame, expected: readonly ExpectedAngle[]): SolveResult {
   const all = roomObservations(input, frame);
   const ignored = all.filter((o) => o.ignored);
   const active = all.filter((o) => !o.ignored);
-  const first = fitBest(input, frame, active);
+  const first = fitBest(input, frame, expected, active);
   if (first.kind !== 'open') return toResult(first, frame, active, ignored);
   const reduced = withForgottenCorners(input, frame, active);
   if (reduced.length > active.length) {
-    const second = fitBest(input, frame, reduced);
+    const second = fitBest(input, frame, expected, reduced);
     if (second.kind !== 'open') return toResult(second, frame, reduced, ignored);
   }
   return { ok: false, error: undeterminedError(input, frame, first.points, first.directions) };
@@ -70,42 +72,59 @@ function withForgottenCorners(
   return at < 0 ? [...active, ...assumed] : [...active.slice(0, at), ...assumed, ...active.slice(at)];
 }
 
-function fitBest(input: RoomInput, frame: RoomFrame, active: readonly RoomObservation[]): NetworkResult {
+function fitBest(
+  input: RoomInput,
+  frame: RoomFrame,
+  expected: readonly ExpectedAngle[],
+  active: readonly RoomObservation[],
+): NetworkResult {
   const observations: readonly NetworkObservation[] = active.map((o) => o.observation);
-  const expected = frame.corners.map((_, i) => expectedAngle(input, frame, i));
   let best: NetworkResult | null = null;
-  let bestScore: readonly [number, number] = [Infinity, Infinity];
-  for (const shape of startShapes(input, frame)) {
+  let bestScore = HOPELESS;
+  for (const shape of startShapes(input, frame, expected)) {
     const result = adjustNetwork(freePoints(shape()), observations);
     const score = scoreOf(result, frame, expected);
     if (best === null || isBetter(score, bestScore)) {
       best = result;
       bestScore = score;
     }
-    if (result.kind === 'adjusted' && score[0] === 0 && isGood(result.adjustment)) break;
+    if (score.wrong === 0 && score.doubtful === 0 && score.good) break;
   }
   return best!;
 }
 
-/** Corners on the wrong side, then chi2; smaller is better, and no fit at all is worst. */
-function scoreOf(result: NetworkResult, frame: RoomFrame, expected: readonly number[]): readonly [number, number] {
-  if (result.kind === 'diverged') return [Infinity, Infinity];
-  if (result.kind === 'open') return [Infinity, 0];
-  const { points, chi2 } = result.adjustment;
-  const wrong = frame.corners.filter((corner, i) => {
-    if (Math.abs(expected[i]! - Math.PI) < NEARLY_STRAIGHT) return false;
-    const [ax, ay] = points[corner.left]!;
-    const [bx, by] = points[corner.point]!;
-    const [cx, cy] = points[wallEnd(frame, corner.right)]!;
-    const turnsRight = (bx - ax) * (cy - by) - (by - ay) * (cx - bx) < 0;
-    return turnsRight !== expected[i]! < Math.PI;
-  });
-  return [wrong.length, chi2];
+interface Score {
+  /** Corners on the side that a reading or the drawing rules out. */
+  readonly wrong: number;
+  readonly good: boolean;
+  /** Corners on the other side than a rough sketch has them. */
+  readonly doubtful: number;
+  readonly chi2: number;
 }
 
-function isBetter(score: readonly [number, number], than: readonly [number, number]): boolean {
-  if (score[0] !== than[0]) return score[0] < than[0];
-  return score[1] < than[1] - BETTER * (1 + than[1]) || (than[1] === Infinity && score[1] < Infinity);
+const HOPELESS: Score = { wrong: Infinity, good: false, doubtful: Infinity, chi2: Infinity };
+
+function scoreOf(result: NetworkResult, frame: RoomFrame, expected: readonly ExpectedAngle[]): Score {
+  if (result.kind === 'diverged') return HOPELESS;
+  if (result.kind === 'open') return { ...HOPELESS, chi2: 0 };
+  const { points, chi2 } = result.adjustment;
+  const turned = frame.corners.flatMap((corner, i) => (isTurned(points, frame, corner, expected[i]!) ? [i] : []));
+  const wrong = turned.filter((i) => expected[i]!.firm).length;
+  return { wrong, good: isGood(result.adjustment), doubtful: turned.length - wrong, chi2 };
+}
+
+function isTurned(points: readonly Point[], frame: RoomFrame, corner: FrameCorner, { said }: ExpectedAngle): boolean {
+  if (Math.abs(said - Math.PI) < NEARLY_STRAIGHT) return false;
+  const into = subtract(points[corner.point]!, points[corner.left]!);
+  const out = subtract(points[wallEnd(frame, corner.right)]!, points[corner.point]!);
+  return cross(into, out) < 0 !== said < Math.PI;
+}
+
+function isBetter(score: Score, than: Score): boolean {
+  if (score.wrong !== than.wrong) return score.wrong < than.wrong;
+  if (score.good !== than.good) return score.good;
+  if (score.doubtful !== than.doubtful) return score.doubtful < than.doubtful;
+  return score.chi2 < than.chi2 - BETTER * (1 + than.chi2) || (than.chi2 === Infinity && score.chi2 < Infinity);
 }
 
 function isGood({ chi2, dof }: Adjustment): boolean {

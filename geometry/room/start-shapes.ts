@@ -1,12 +1,12 @@
 import { Matrix, solve } from 'ml-matrix';
 
-import { DEGREE } from '../core/angle';
 import type { Point } from '../core/point';
 import { distance, rotate, subtract } from '../core/vector';
 import { closeTraverse, walk } from './close-traverse';
 import type { Leg } from './close-traverse';
-import { cornerInput, DEFAULT_NOMINAL_DEG, wallEnd } from './room-frame';
-import type { FrameCorner, RoomFrame } from './room-frame';
+import type { ExpectedAngle } from './expected-angles';
+import { wallEnd } from './room-frame';
+import type { RoomFrame } from './room-frame';
 import type { RoomInput } from './types';
 
 /** Weight of a guessed wall length beside closing the ring: enough to settle walls that closure leaves open. */
@@ -17,15 +17,27 @@ const SHORTEST_SHARE = 0.05;
 const OTHER_GUESSES = [0.4, 2.5] as const;
 
 /**
- * Shapes from which the adjustment may start, the most likely first; each is worked out when it is called. A tape
- * triangle cannot tell an inside from an outside corner, so its side is that of `expectedAngle`.
+ * Shapes from which the adjustment may start, the most likely first; each is worked out when it is called. Where only a
+ * sketch says which way a corner turns, each such corner is also tried the other way round.
  */
-export function startShapes(input: RoomInput, frame: RoomFrame): readonly (() => readonly Point[])[] {
-  const measured = frame.corners.map((_, i) => measuredAngle(input, frame, i));
-  const expected = frame.corners.map((_, i) => expectedAngle(input, frame, i));
+export function startShapes(
+  input: RoomInput,
+  frame: RoomFrame,
+  expected: readonly ExpectedAngle[],
+): readonly (() => readonly Point[])[] {
+  const measured = expected.map((e) => e.measured);
   const shapes = [
     () => walkShape(input, frame, turnsToBearings(frame, measured), 1),
-    () => walkShape(input, frame, turnsToBearings(frame, expected), 1),
+    () =>
+      walkShape(
+        input,
+        frame,
+        turnsToBearings(
+          frame,
+          expected.map((e) => e.said),
+        ),
+        1,
+      ),
   ];
   const { sketch } = input;
   if (sketch) {
@@ -38,19 +50,12 @@ export function startShapes(input: RoomInput, frame: RoomFrame): readonly (() =>
       shapes.push(() => walkShape(input, frame, turnsToBearings(frame, measured), guess, false));
     }
   }
+  expected.forEach((e, i) => {
+    if (e.firm) return;
+    const turned = measured.map((angle, k) => (k === i ? 2 * Math.PI - angle : angle));
+    shapes.push(() => walkShape(input, frame, turnsToBearings(frame, turned), 1));
+  });
   return shapes;
-}
-
-/**
- * Interior angle that a corner should have, radians: its protractor reading, else the nominal angle when one was given,
- * else that of the sketch when a triangle was taped, else square.
- */
-export function expectedAngle(input: RoomInput, frame: RoomFrame, corner: number): number {
-  const said = cornerInput(input, frame.corners[corner]!);
-  if (said?.angleDeg !== undefined) return said.angleDeg * DEGREE;
-  if (said?.nominalDeg !== undefined) return said.nominalDeg * DEGREE;
-  if (said?.triangle && input.sketch) return sketchAngle(input.sketch, frame, frame.corners[corner]!);
-  return DEFAULT_NOMINAL_DEG * DEGREE;
 }
 
 /** The points turned and moved so that the first is the origin and the second lies on +x. */
@@ -58,28 +63,6 @@ export function toRoomAxes(points: readonly Point[]): readonly Point[] {
   const first = points[0]!;
   const turn = -bearingOf(first, points[1]!);
   return points.map((p) => rotate(subtract(p, first), turn));
-}
-
-/**
- * Interior angle from the corner's own reading, radians: by the law of cosines for a triangle, on the side of the
- * expected angle; the expected angle when there is no reading.
- */
-export function measuredAngle(input: RoomInput, frame: RoomFrame, corner: number): number {
-  const said = cornerInput(input, frame.corners[corner]!);
-  const expected = expectedAngle(input, frame, corner);
-  if (said?.angleDeg !== undefined || !said?.triangle) return expected;
-  const { a, b, c } = said.triangle;
-  const cosine = (a * a + b * b - c * c) / (2 * a * b);
-  const inside = Math.acos(Math.min(1, Math.max(-1, cosine)));
-  return expected > Math.PI ? 2 * Math.PI - inside : inside;
-}
-
-function sketchAngle(sketch: readonly Point[], frame: RoomFrame, corner: FrameCorner): number {
-  const at = sketch[corner.point]!;
-  const back = bearingOf(at, sketch[corner.left]!);
-  const fore = bearingOf(at, sketch[wallEnd(frame, corner.right)]!);
-  const angle = fore - back;
-  return angle < 0 ? angle + 2 * Math.PI : angle;
 }
 
 const bearingOf = (from: Point, to: Point): number => Math.atan2(to[1] - from[1], to[0] - from[0]);
