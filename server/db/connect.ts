@@ -22,7 +22,13 @@ export function connect(databaseUrl: string, poolSize = 10): Knex {
     },
     pool: { min: 0, max: poolSize },
     acquireConnectionTimeout: 10_000,
+    log: { warn: warnOnce },
   });
+}
+
+/** A failed connection is thrown as well as printed; the caller says it better. */
+function warnOnce(message: string): void {
+  if (!message.startsWith('Acquire connection error')) console.warn(message);
 }
 
 /** pg gives these two as text, since they may hold more than a double can. Here they never do, and a price must not be added as text. */

@@ -1,7 +1,13 @@
 import { statSync } from 'node:fs';
 import path from 'node:path';
 
-import express, { type Request, type RequestHandler, type Response, type Router } from 'express';
+import express, {
+  type ErrorRequestHandler,
+  type Request,
+  type RequestHandler,
+  type Response,
+  type Router,
+} from 'express';
 
 const YEAR_MS = 365 * 24 * 3600 * 1000;
 const ENCODINGS = { br: '.br', gzip: '.gz' } as const;
@@ -29,8 +35,19 @@ export function staticFiles(webRoot: string): Router {
   }
   router.use(express.static(webRoot, { index: false, redirect: false, setHeaders: askAgain }));
   router.get('/{*rest}', appPage(webRoot));
+  router.use(noSuchFile, missingFile);
   return router;
 }
+
+const noSuchFile: RequestHandler = (_req, res) => {
+  res.status(404).type('text').send('There is no such file.\n');
+};
+
+/** A missing file with a hash in its name comes as an error, which Express would log with its stack each time. */
+const missingFile: ErrorRequestHandler = (error: { status?: number }, req, res, next) => {
+  if (error.status === 404 && !res.headersSent) noSuchFile(req, res, next);
+  else next(error);
+};
 
 function askAgain(res: Response): void {
   res.setHeader('Cache-Control', 'no-cache');
@@ -68,7 +85,8 @@ function appPage(webRoot: string): RequestHandler {
     // What a customer's link shows must not stay in a shared phone's cache.
     res.set('Cache-Control', isCustomerPage(req) ? 'no-store' : 'no-cache');
     res.sendFile('index.html', { root: webRoot, cacheControl: false }, (error) => {
-      if (error && !res.headersSent) res.status(503).type('text').send('The web app is not built yet: run npm start.\n');
+      if (error && !res.headersSent)
+        res.status(503).type('text').send('The web app is not built yet: run npm start.\n');
     });
   };
 }

@@ -76,7 +76,7 @@ describe('staticFiles', () => {
   ])('answers %s with 404, not with a page', async (address) => {
     const answer = await request(app).get(address);
     expect(answer.status).toBe(404);
-    expect(answer.text).not.toContain('root');
+    expect(answer.text).toBe('There is no such file.\n');
   });
 
   it('says what to do when the app is not built', async () => {
