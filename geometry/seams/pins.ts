@@ -44,6 +44,7 @@ export function readPins(
         : 'would cut across the end of the top';
     problems.push({
       code: cuts ? 'pin-not-allowed' : 'pin-impossible',
+      ...(cuts && { severity: 'warn' as const }),
       message: `The seam pinned at ${along(x)} on top ${deck.id} ${why}. ${where}`,
       at: { run: deck.id },
     });

@@ -160,6 +160,7 @@ function forced(
     const zone = zoneAt(zones, x);
     problems.push({
       code: 'seam-no-place',
+      severity: 'warn',
       message:
         `Top ${ground.deck.id} has to be cut, but no allowed place is left: ` +
         `the seam at ${inches(ground.deck.sign * x, ground.step)} is ${zone?.why ?? 'too near another seam'}.`,

@@ -117,11 +117,9 @@ const HOLLOW: ReadonlySet<BaseKind> = new Set(['dishwasher', 'range', 'opening']
 
 function supportZone(deck: Deck, { kind, name, ...at }: Support, limits: SeamLimits, step: Step): Zone | null {
   if (!HOLLOW.has(kind)) return null;
-  // A dishwasher or range carries no top at all; in a plain opening the sides of the cabinets beside it still reach a little.
-  const reach = kind === 'opening' ? limits.support : 0;
-  const [from, to] = [at.from + reach, at.to - reach];
+  const [from, to] = [at.from + limits.support, at.to - limits.support];
   if (to <= from) return null;
-  const why = reach > 0 ? `over the ${name} with no support within ${inches(reach, step)}` : `over the ${name}`;
+  const why = `over the ${name} with no support within ${inches(limits.support, step)}`;
   return deck.sign === 1 ? { from, to, why } : { from: -to, to: -from, why };
 }
 

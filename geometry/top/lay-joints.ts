@@ -125,6 +125,7 @@ function jointOf(
   if (corner < SHARPEST || corner > WIDEST) {
     problems.push({
       code: 'joint-sharp',
+      severity: 'warn',
       message:
         `The corner between runs ${left.id} and ${right.id} is ${degrees(corner)}. ` +
         `Joints are meant for ${SHARPEST} to ${WIDEST} degrees: check this one on site.`,

@@ -77,6 +77,7 @@ function bumpBeside(
   if (bump <= clearance) return null;
   return {
     code: 'end-touches-bump',
+    severity: 'warn',
     message:
       `Wall ${neighbour.label} sticks out ${inches(bump, step)} beside run ${run.id}, ` +
       `more than the clearance of ${inches(clearance, step)}.`,

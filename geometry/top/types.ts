@@ -130,6 +130,8 @@ export interface LayProblem {
   readonly code: string;
   readonly message: string;
   readonly at: { readonly run?: string; readonly cutout?: string; readonly wall?: string; readonly joint?: string };
+  /** It is laid as drawn, but somebody has to look at it; without this it has to be changed. */
+  readonly severity?: 'warn';
 }
 
 /** Everything that lies in the room. */
