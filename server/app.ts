@@ -13,15 +13,33 @@ import { route } from './http/route';
 import { securityHeaders } from './http/security-headers';
 import { staticFiles } from './http/static-files';
 import { authRoutes } from './routes/auth-routes';
+import { crewRoutes } from './routes/crew-routes';
+import { eventRoutes } from './routes/event-routes';
+import { jobFileRoutes } from './routes/job-file-routes';
 import { jobRoutes } from './routes/job-routes';
 import { layoutRoutes } from './routes/layout-routes';
 import { meRoutes } from './routes/me-routes';
+import { nestRoutes } from './routes/nest-routes';
+import { rackRoutes } from './routes/rack-routes';
+import { revisionRoutes } from './routes/revision-routes';
+import { shopRoutes } from './routes/shop-routes';
+import { stockRoutes } from './routes/stock-routes';
 import { createAccessTokens } from './services/access-tokens';
 import { AuthService } from './services/auth-service';
 import { CrewService } from './services/crew-service';
+import { EventHub } from './services/event-hub';
 import { checkHealth } from './services/health-service';
+import { InvitationService } from './services/invitation-service';
+import { JobFileService } from './services/job-file-service';
 import { JobService } from './services/job-service';
 import { LayoutService } from './services/layout-service';
+import { NestService } from './services/nest-service';
+import { openApiDocument } from './services/openapi';
+import { RackService } from './services/rack-service';
+import { RevisionService } from './services/revision-service';
+import { ShopService } from './services/shop-service';
+import { StockService } from './services/stock-service';
+import { NestPool } from './work/nest-pool';
 
 /** A layout with 60 walls, 300 notes and 800 pieces of stock stays well under this. */
 const LARGEST_BODY = '4mb';
@@ -43,22 +61,38 @@ export function createApp({ config, db, log = pino({ level: config.logLevel }), 
   app.set('trust proxy', 'loopback');
   app.use(requestLog(log));
   app.use(securityHeaders());
-  app.use(API_ROOT, api(config, db), noSuchAddress(), problemHandler(log));
+  app.use(API_ROOT, api(config, db, log), noSuchAddress(), problemHandler(log));
   if (webRoot) app.use(staticFiles(webRoot));
   return app;
 }
 
-function api(config: Config, db: Knex): Router {
+function api(config: Config, db: Knex, log: Logger): Router {
   const limits = createLimits();
   const tokens = createAccessTokens(config.tokenSecret);
   const router = Router();
   router.use(limits.requests, express.json({ limit: LARGEST_BODY, strict: true }), authenticate(tokens));
 
   const auth = new AuthService(db, tokens, config.publicUrl);
-  router.use(authRoutes(auth, limits, config.publicUrl.startsWith('https:')));
-  router.use(meRoutes(new CrewService(db)));
-  router.use(jobRoutes(new JobService(db)));
-  router.use(layoutRoutes(new LayoutService(db)));
+  const crew = new CrewService(db);
+  const nests = new NestService(db, new NestPool());
+  router.use(
+    authRoutes(auth, limits, config.publicUrl.startsWith('https:')),
+    meRoutes(crew),
+    crewRoutes(crew, new InvitationService(db, config.publicUrl)),
+    shopRoutes(new ShopService(db)),
+    jobRoutes(new JobService(db, log)),
+    jobFileRoutes(new JobFileService(db, log)),
+    layoutRoutes(new LayoutService(db, log)),
+    revisionRoutes(new RevisionService(db)),
+    nestRoutes(nests),
+    stockRoutes(new StockService(db)),
+    rackRoutes(new RackService(db)),
+    eventRoutes(new EventHub(db)),
+  );
   route(router, getHealth, 200, () => checkHealth(db));
+  const document = openApiDocument();
+  router.get('/openapi.json', (_req, res) => {
+    res.json(document);
+  });
   return router;
 }

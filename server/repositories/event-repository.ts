@@ -17,6 +17,8 @@ export async function announce(trx: Knex.Transaction, shopId: string, event: obj
 }
 
 export interface Listening {
+  /** Resolves at the first moment from which nothing is missed. */
+  readonly ready: Promise<void>;
   stop(): Promise<void>;
 }
 
@@ -29,6 +31,10 @@ export function listen(db: Knex, heard: (announcement: Announcement) => void, lo
   let connection: Client | null = null;
   let timer: NodeJS.Timeout | null = null;
   let stopped = false;
+  let tellReady = (): void => {};
+  const ready = new Promise<void>((resolve) => {
+    tellReady = resolve;
+  });
 
   const again = (): void => {
     if (stopped || timer) return;
@@ -56,7 +62,7 @@ export function listen(db: Knex, heard: (announcement: Announcement) => void, lo
       fresh.on('notification', ({ payload }) => heard(JSON.parse(payload ?? 'null') as Announcement));
       await fresh.query(`listen ${CHANNEL}`);
       connection = fresh;
-      if (stopped) await fresh.end();
+      tellReady();
     } catch {
       again();
     }
@@ -64,6 +70,7 @@ export function listen(db: Knex, heard: (announcement: Announcement) => void, lo
 
   const opening = open();
   return {
+    ready,
     async stop() {
       stopped = true;
       if (timer) clearTimeout(timer);

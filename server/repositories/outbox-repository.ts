@@ -38,11 +38,13 @@ export async function takeWaitingMail(trx: Knex.Transaction, limit: number): Pro
     .select<WaitingMail[]>('id', 'shop_id as shopId', 'kind', 'to_address as to', 'subject', 'body', 'attempts');
 }
 
-export async function markSent(trx: Knex.Transaction, id: string): Promise<void> {
+/** @param forget - wipe what was sent */
+export async function markSent(trx: Knex.Transaction, id: string, forget: boolean): Promise<void> {
+  const wiped = forget ? { body: '' } : {};
   await trx('outbox')
     .where({ id })
     .increment('attempts', 1)
-    .update({ sent_at: trx.fn.now(3), last_error: null });
+    .update({ sent_at: trx.fn.now(3), last_error: null, ...wiped });
 }
 
 /** Notes a failed try: again after `waitSeconds`, or never when null. */

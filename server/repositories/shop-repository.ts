@@ -1,16 +1,16 @@
 import type { Knex } from 'knex';
 
 import type { Step, Units } from '@/geometry/core/layout';
-import type { ShopSettings } from '@/geometry/core/settings';
 
-export interface Shop {
+export interface ShopRecord {
   readonly id: string;
   readonly name: string;
   /** ISO 4217. */
   readonly currency: string;
   readonly units: Units;
   readonly step: Step;
-  readonly settings: ShopSettings;
+  /** As stored; see completeSettings. */
+  readonly settings: Readonly<Record<string, unknown>>;
   readonly letterhead: Letterhead;
 }
 
@@ -23,8 +23,8 @@ export interface Letterhead {
 const COLUMNS = ['id', 'name', 'currency', 'units', 'step', 'settings', 'letterhead'] as const;
 
 /** The shop of the transaction. @throws Error without one, which a request that has an actor never is */
-export async function findShop(trx: Knex.Transaction): Promise<Shop> {
-  const shop = await trx('shops').first<Shop>(...COLUMNS);
+export async function findShop(trx: Knex.Transaction): Promise<ShopRecord> {
+  const shop = await trx('shops').first<ShopRecord>(...COLUMNS);
   if (!shop) throw new Error('the transaction sees no shop');
   return shop;
 }
@@ -33,8 +33,8 @@ export async function findShop(trx: Knex.Transaction): Promise<Shop> {
 export async function updateShop(
   trx: Knex.Transaction,
   shopId: string,
-  change: Partial<Omit<Shop, 'id'>>,
-): Promise<Shop> {
+  change: Partial<Omit<ShopRecord, 'id'>>,
+): Promise<ShopRecord> {
   const { settings, letterhead, ...plain } = change;
   const [shop] = await trx('shops')
     .where({ id: shopId })
@@ -44,7 +44,7 @@ export async function updateShop(
       ...(letterhead ? { letterhead: JSON.stringify(letterhead) } : {}),
       updated_at: trx.fn.now(3),
     })
-    .returning<Shop[]>([...COLUMNS]);
+    .returning<ShopRecord[]>([...COLUMNS]);
   if (!shop) throw new Error('the transaction sees no shop');
   return shop;
 }

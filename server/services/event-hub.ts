@@ -35,6 +35,11 @@ export class EventHub {
     return () => this.unsubscribe(shopId, listener);
   }
 
+  /** Resolves when whoever has subscribed misses nothing from now on. */
+  async ready(): Promise<void> {
+    await this.listening?.ready;
+  }
+
   private unsubscribe(shopId: string, listener: Listener): void {
     const ofShop = this.listeners.get(shopId);
     ofShop?.delete(listener);

@@ -1,4 +1,5 @@
 import type { Knex } from 'knex';
+import type { Logger } from 'pino';
 
 import type { BodyOf, ParsedQuery } from '@/shared/contracts/contract';
 import type {
@@ -16,20 +17,24 @@ import { listActs, logAct } from '../repositories/audit-repository';
 import { findRole } from '../repositories/crew-repository';
 import { findJob, insertJob, listJobs, lockJob, updateJob, type JobFields } from '../repositories/job-repository';
 import { insertLayout } from '../repositories/layout-repository';
-import { findShop, takeJobNumber } from '../repositories/shop-repository';
+import { takeJobNumber } from '../repositories/shop-repository';
 import type { Actor } from './actor';
 import { announce } from './event-hub';
 import { inShop, inShopOnce, notAllowed } from './in-shop';
 import { toJob, toListItem } from './job-view';
 import { newLayout } from './new-layout';
 import { pageOfRows, readPagingKey } from './paging-key';
-import { thumbnailOf } from './thumbnail';
+import { readShop } from './read-shop';
+import { drawThumbnail } from './thumbnail';
 
 type JobChange = BodyOf<typeof updateJobContract>;
 
 /** Jobs: the list, opening one, what is known of it, and its way through the stages. */
 export class JobService {
-  constructor(private readonly db: Knex) {}
+  constructor(
+    private readonly db: Knex,
+    private readonly log: Logger,
+  ) {}
 
   list(actor: Actor, query: ParsedQuery<typeof listJobsContract>): Promise<Page<JobListItem>> {
     return inShop(this.db, actor, 'job.see', async (trx) => {
@@ -47,7 +52,7 @@ export class JobService {
   /** Opens a job with an empty layout that holds the shop's usual choices and its stock. */
   create(actor: Actor, fields: BodyOf<typeof createJob>): Promise<Job> {
     return inShopOnce(this.db, actor, 'job.edit', async (trx) => {
-      const shop = await findShop(trx);
+      const shop = await readShop(trx);
       const doc = await newLayout(trx, shop);
       const number = await takeJobNumber(trx, shop.id);
       const jobId = await insertJob(trx, {
@@ -57,7 +62,7 @@ export class JobService {
         customer_name: fields.customerName ?? '',
         site_address: fields.siteAddress ?? '',
       });
-      await insertLayout(trx, { shopId: shop.id, jobId, doc, thumbnail: thumbnailOf(doc, shop.settings) });
+      await insertLayout(trx, { shopId: shop.id, jobId, doc, thumbnail: drawThumbnail(doc, shop.settings, this.log) });
       return toJob(await this.changed(trx, actor, jobId, 'job.created', { number }));
     });
   }

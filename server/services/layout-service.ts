@@ -1,4 +1,5 @@
 import type { Knex } from 'knex';
+import type { Logger } from 'pino';
 
 import type { Layout } from '@/geometry/core/layout';
 import type { EditsOutcome, LoggedEdit } from '@/shared/contracts/layouts';
@@ -16,15 +17,18 @@ import {
   type StoredEdit,
   type StoredLayout,
 } from '../repositories/layout-repository';
-import { findShop } from '../repositories/shop-repository';
 import type { Actor } from './actor';
 import { announce } from './event-hub';
 import { inShop } from './in-shop';
-import { thumbnailOf } from './thumbnail';
+import { readShop } from './read-shop';
+import { drawThumbnail } from './thumbnail';
 
 /** Layouts and the edits that are the only way they change. */
 export class LayoutService {
-  constructor(private readonly db: Knex) {}
+  constructor(
+    private readonly db: Knex,
+    private readonly log: Logger,
+  ) {}
 
   /** @throws ProblemError not_found */
   get(actor: Actor, layoutId: string): Promise<StoredLayout> {
@@ -77,13 +81,13 @@ export class LayoutService {
     held: StoredLayout,
     next: { readonly doc: Layout; readonly seq: number; readonly edits: readonly NewEdit[] },
   ): Promise<void> {
-    const { settings } = await findShop(trx);
+    const { settings } = await readShop(trx);
     await storeEdits(trx, {
       shopId: actor.shopId,
       personId: actor.personId,
       layoutId: held.id,
       ...next,
-      thumbnail: thumbnailOf(next.doc, settings),
+      thumbnail: drawThumbnail(next.doc, settings, this.log),
     });
     await updateJob(trx, held.jobId, {});
     await announce(trx, actor.shopId, { kind: 'layout', jobId: held.jobId, layoutId: held.id, seq: next.seq });

@@ -2,7 +2,7 @@ import type { Knex } from 'knex';
 
 import type { Layout } from '@/geometry/core/layout';
 import { emptyLayout } from '@/shared/layout/empty-layout';
-import type { Shop } from '../repositories/shop-repository';
+import type { Shop } from '@/shared/contracts/shop';
 import { stockOfShop } from './stock-for-layout';
 
 /** An empty layout with the shop's units, tape and stock. */

@@ -1,0 +1,14 @@
+import { Router } from 'express';
+
+import { createStock, deleteStock, listStock, updateStock } from '@/shared/contracts/stock';
+import { route } from '../http/route';
+import type { StockService } from '../services/stock-service';
+
+export function stockRoutes(stock: StockService): Router {
+  const router = Router();
+  route(router, listStock, 200, ({ actor }) => stock.list(actor));
+  route(router, createStock, 201, ({ actor, body }) => stock.create(actor, body));
+  route(router, updateStock, 200, ({ actor, params, body }) => stock.update(actor, params.slabId, body));
+  route(router, deleteStock, 204, ({ actor, params }) => stock.delete(actor, params.slabId));
+  return router;
+}
