@@ -25,6 +25,9 @@ export function useLivePlan(store: EditorStore, settings: ShopSettings): LivePla
   const instance = useMemo(() => nestInstanceOf(layout, laid.tops.pieces), [layout, laid]);
   // While a finger drags, the slabs wait: the search begins when it rests.
   const nest = useNest(dragging || laid.room.untaped.length > 0 ? null : instance);
-  const plan = useMemo(() => finishPlan(laid, layout, settings, nest.plan), [laid, layout, settings, nest.plan]);
+  const plan = useMemo(
+    () => finishPlan(laid, layout, settings, { nest: nest.plan, nestProblem: nest.error }),
+    [laid, layout, settings, nest.plan, nest.error],
+  );
   return { layout, plan, nest };
 }

@@ -1,6 +1,9 @@
 import type { Layout } from '../core/layout';
 import type { ShopSettings } from '../core/settings';
-import type { NestPlan } from '../nest/types';
+import { findingsOf } from '../findings/catalogue';
+import type { NestError, NestPlan } from '../nest/types';
+import { gettingIn } from '../top/getting-in';
+import { assembledSections } from '../wood/sections';
 import { jointWood } from '../wood/joint-wood';
 import { movementOf } from '../wood/movement';
 import { orderOfWork } from '../wood/schedule';
@@ -17,23 +20,37 @@ export const ENGINE = '1.0.0';
  * Everything computed from a layout, the shop's settings and a nest result. Pure and deterministic; starts no search. A
  * nest result that belongs to other pieces (its instance is another) is left out, never stretched to fit.
  */
-export function makePlan({ layout, settings, nest }: PlanInput): Plan {
-  return finishPlan(layRoom(layout, settings), layout, settings, nest);
+export function makePlan({ layout, settings, nest, nestProblem }: PlanInput): Plan {
+  return finishPlan(layRoom(layout, settings), layout, settings, { nest, nestProblem });
+}
+
+/** What a search for slabs gave: a plan, or why there is none. */
+export interface NestGiven {
+  readonly nest: NestPlan | null;
+  readonly nestProblem?: NestError['error'] | null;
 }
 
 /** The part of the plan that follows once room and tops are known. */
-export function finishPlan(laid: Laid, layout: Layout, settings: ShopSettings, given: NestPlan | null): Plan {
+export function finishPlan(laid: Laid, layout: Layout, settings: ShopSettings, given: NestGiven): Plan {
   const { room, tops } = laid;
   const { material, climate, fixing } = layout;
   const deepest = Math.max(0, ...tops.pieces.filter((piece) => piece.kind !== 'strip').map((piece) => piece.depth));
   const movement = movementOf(material, climate, deepest || material.slabDepth, settings);
   const instance = nestInstanceOf(layout, tops.pieces);
-  const nest = given !== null && given.instance === instance.id ? given : null;
+  const nest = given.nest !== null && given.nest.instance === instance.id ? given.nest : null;
   const pieces = tops.pieces.map((piece) => ({
     ...piece,
     weight: pieceWeight(piece.netArea, piece.thickness, material.species, movement.emc.make),
   }));
   const joints = tops.joints.map((joint) => ({ ...joint, ...jointWood(joint, tops, movement, settings) }));
+  const byLetter = new Map(pieces.map((piece) => [piece.letter, piece]));
+  const passages = assembledSections(tops).map((letters) =>
+    gettingIn(
+      letters.map((letter) => byLetter.get(letter)!),
+      layout.access,
+      layout.step,
+    ),
+  );
   const screws = chooseScrew(fixing, material.thickness, settings);
   return {
     engine: ENGINE,
@@ -50,7 +67,18 @@ export function finishPlan(laid: Laid, layout: Layout, settings: ShopSettings, g
     cost: nest && { slabs: nest.cost, lowerBound: nest.lowerBound, gap: nest.gap, proved: nest.proved },
     movement,
     screws,
-    findings: [],
+    findings: findingsOf({
+      layout,
+      settings,
+      fit: room.error ? null : room.fit,
+      tops,
+      pieces,
+      joints,
+      movement,
+      nest,
+      nestProblem: given.nestProblem ?? null,
+      passages,
+    }),
     schedule: orderOfWork({ layout, settings, tops }),
   };
 }

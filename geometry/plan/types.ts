@@ -1,7 +1,7 @@
 import type { Layout } from '../core/layout';
 import type { ShopSettings } from '../core/settings';
 import type { Finding } from '../findings/types';
-import type { NestInstance, NestPlan } from '../nest/types';
+import type { NestError, NestInstance, NestPlan } from '../nest/types';
 import type { RoomError, RoomFit } from '../room/types';
 import type { PlacedCutout, Piece, TopJoint, TopSeam, Tops } from '../top/types';
 import type { JointWood, Movement, ScrewChoice, Step } from '../wood/types';
@@ -39,4 +39,6 @@ export interface PlanInput {
   readonly layout: Layout;
   readonly settings: ShopSettings;
   readonly nest: NestPlan | null;
+  /** Why the pieces cannot be nested, when a search said so. */
+  readonly nestProblem?: NestError['error'] | null;
 }
