@@ -2,6 +2,7 @@ import { baseReach } from '../wood/under';
 import { basesUnder, runName, size, type Rule } from './facts';
 import { finding } from './finding';
 import { PRACTICE } from './sources';
+import { capital } from './words';
 
 /** A top over a dishwasher: steam comes up under its front edge. */
 export const dishwasherSteam: Rule = (facts) =>
@@ -16,7 +17,7 @@ export const dishwasherSteam: Rule = (facts) =>
         finding({
           code: 'dishwasher-steam',
           severity: 'note',
-          text: `${runName(facts, laid.id)} lies over ${size(facts, over)} of dishwasher: steam wets the underside and the front edge.`,
+          text: `${capital(runName(facts, laid.id))} lies over ${size(facts, over)} of dishwasher: steam wets the underside and the front edge.`,
           action: 'Seal the underside twice there and fix the steam guard that its maker supplies.',
           at: { run: laid.id, base: base.id },
           source: PRACTICE,

@@ -8,7 +8,7 @@ import type { Section } from '../wood/sections';
 import { assembledSections } from '../wood/sections';
 import type { FindingContext } from './context';
 import type { Finding } from './types';
-import { sizeText, listText } from './words';
+import { sizeText } from './words';
 
 /** The context with what several rules ask for, worked out once. */
 export interface Facts extends FindingContext {
@@ -60,11 +60,11 @@ export const cornerName = (facts: Facts, between: readonly [string, string]): st
 export const lettersOn = (facts: Facts, on: string): readonly string[] =>
   facts.tops.pieces.filter((piece) => piece.on === on).map((piece) => piece.letter);
 
-/** "P and Q on wall A". */
+/** "the top on wall A (P, Q)", "the island (U)". */
 export function runName(facts: Facts, id: string): string {
-  const letters = listText(lettersOn(facts, id)) || 'The top';
+  const letters = lettersOn(facts, id).join(', ');
   const run = facts.laidById.get(id);
-  return run ? `${letters} on wall ${wallName(facts, run.wall)}` : letters;
+  return `${run ? `the top on wall ${wallName(facts, run.wall)}` : 'the island'}${letters && ` (${letters})`}`;
 }
 
 /** "Joint P to Q". */

@@ -3,7 +3,7 @@ import { shrinkageOf } from '../wood/movement';
 import { runName, size, type Rule } from './facts';
 import { finding } from './finding';
 import { MOVEMENT_SOURCE } from './sources';
-import { sizePair } from './words';
+import { capital, sizePair } from './words';
 
 /** A gap that is covered when the top is set and no longer when the wood has shrunk. */
 export const gapOpensInWinter: Rule = (facts) =>
@@ -20,7 +20,7 @@ export const gapOpensInWinter: Rule = (facts) =>
       finding({
         code: 'gap-opens-in-winter',
         severity: 'warn',
-        text: `${runName(facts, run.id)} shrinks ${size(facts, shrinkage)} by the driest season: the gap at the wall opens to ${gap} and the backsplash covers ${limit}.`,
+        text: `${capital(runName(facts, run.id))} shrinks ${size(facts, shrinkage)} by the driest season: the gap at the wall opens to ${gap} and the backsplash covers ${limit}.`,
         action: 'Take a thicker backsplash, or scribe closer as far as the swelling allows.',
         at: { run: run.id, wall: run.wall },
         source: MOVEMENT_SOURCE,

@@ -2,7 +2,7 @@ import { leastBackGap, swellingOf } from '../wood/movement';
 import { runName, size, type Rule } from './facts';
 import { finding } from './finding';
 import { MOVEMENT_SOURCE } from './sources';
-import { sizePair } from './words';
+import { capital, sizePair } from './words';
 
 /** A back gap that the top outgrows in its wettest season. */
 export const gapUnderSwelling: Rule = (facts) =>
@@ -15,7 +15,7 @@ export const gapUnderSwelling: Rule = (facts) =>
       finding({
         code: 'gap-under-swelling',
         severity: 'stop',
-        text: `${runName(facts, run.id)} has a back gap of ${gap} and grows ${grows} by the wettest season.`,
+        text: `${capital(runName(facts, run.id))} has a back gap of ${gap} and grows ${grows} by the wettest season.`,
         action: `Make the back gap ${size(facts, leastBackGap(laid.depth, facts.movement))} or more, or take the slabs in wetter.`,
         at: { run: run.id, wall: run.wall },
         source: MOVEMENT_SOURCE,

@@ -8,7 +8,7 @@ import { baseReach, carriesTop } from '../wood/under';
 import { basesUnder, runName, size, type Facts, type Rule } from './facts';
 import { finding } from './finding';
 import type { Finding } from './types';
-import { pounds, sizePair } from './words';
+import { capital, pounds, sizePair } from './words';
 
 interface Overhang {
   readonly side: 'front' | 'left' | 'right';
@@ -62,7 +62,7 @@ function tooFar(
   return finding({
     code: 'overhang-unsupported',
     severity: 'warn',
-    text: `${runName(facts, laid.id)} hangs ${size(facts, length)} past the cabinets at the ${side}, ${way} the grain: ${pounds(EDGE_LOAD.value)} on the edge bends it ${sags}, and ${limit} is the limit.`,
+    text: `${capital(runName(facts, laid.id))} hangs ${size(facts, length)} past the cabinets at the ${side}, ${way} the grain: ${pounds(EDGE_LOAD.value)} on the edge bends it ${sags}, and ${limit} is the limit.`,
     action: `Put brackets or a panel under it, or keep it to ${size(facts, Math.floor(check.longest * 8) / 8)}. Advice, not an engineer's approval.`,
     at: { run: laid.id, detail: side },
     source: `P L^3 / 3 E I with E of the Wood Handbook; ${sourceText(EDGE_LOAD)}`,

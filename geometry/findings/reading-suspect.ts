@@ -1,6 +1,6 @@
 import { cornerName, size, wallName, type Facts, type Rule } from './facts';
 import { finding } from './finding';
-import { degrees, listText } from './words';
+import { capital, degrees, listText } from './words';
 
 /** Largest standardised residual that is put down to chance: 0.1 % of good readings pass it. */
 const SUSPICION = 3.29;
@@ -22,8 +22,6 @@ export const readingSuspect: Rule = (facts) =>
       source: 'data snooping, two-sided 0.1 % (Baarda 1968, critical value 3.29)',
     });
   });
-
-const capital = (text: string): string => `${text[0]!.toUpperCase()}${text.slice(1)}`;
 
 function shouldRead(
   facts: Facts,

@@ -34,3 +34,6 @@ export function listText(words: readonly string[]): string {
 export const percent = (moisture: number): string => `${moisture.toFixed(1)} %`;
 export const pounds = (weightLb: number): string => `${Math.round(weightLb)} lb`;
 export const degrees = (angleDeg: number): string => `${angleDeg.toFixed(1)} degrees`;
+
+/** First letter large, for a sentence that starts with a name. */
+export const capital = (text: string): string => `${text.charAt(0).toUpperCase()}${text.slice(1)}`;

@@ -6,6 +6,13 @@ import { accessBelow, baseReach, carriesTop } from './under';
 
 export const LEVEL_LIMIT = constant('Cabinets out of level along a kitchen', 1 / 8, 'in', 'common practice', '');
 export const SPAN_LIMIT = constant('Opening that a top spans without a bracket', 24, 'in', 'common practice', '');
+export const LEDGER_MOST = constant(
+  'Bare wall at a corner that counts as a corner without a cabinet',
+  30,
+  'in',
+  'our choice',
+  'a longer one is taken as cabinets that nobody drew',
+);
 export const BACKSPLASH_HEIGHT = constant('Backsplash height when it is not drawn', 4, 'in', 'common practice', '');
 
 /** Shim under one base, inches. */
@@ -65,7 +72,8 @@ function ledgerOn(
   const nearStart = corner < wall.length / 2;
   const edge = nearStart ? Math.min(...reaches.map((r) => r[0])) : Math.max(...reaches.map((r) => r[1]));
   const [from, to] = nearStart ? [0, edge] : [edge, wall.length];
-  return to > from ? [{ kind: 'ledger', wall: wall.id, from, to, base: null }] : [];
+  const bare = to - from;
+  return bare > 0 && bare <= LEDGER_MOST.value ? [{ kind: 'ledger', wall: wall.id, from, to, base: null }] : [];
 }
 
 /** Height of the backsplash a layout draws, inches. */
