@@ -5,7 +5,7 @@ import { capitalHeight, tailHeight, textWidth } from './text-width';
 /** Part of a laid line: plain text of one style, or a length. x from the line's left end, px. */
 export type LinePart =
   | { readonly kind: 'text'; readonly x: number; readonly text: string; readonly style: TextStyle }
-  | { readonly kind: 'length'; readonly x: number; readonly length: LengthLayout };
+  | { readonly kind: 'length'; readonly x: number; readonly length: LengthLayout; readonly style: TextStyle };
 
 export interface TextLine {
   readonly parts: readonly LinePart[];
@@ -68,7 +68,7 @@ interface Word {
 
 type Atom =
   | { readonly kind: 'text'; readonly text: string; readonly style: TextStyle; readonly width: number }
-  | { readonly kind: 'length'; readonly length: LengthLayout; readonly width: number };
+  | { readonly kind: 'length'; readonly length: LengthLayout; readonly style: TextStyle; readonly width: number };
 
 function toWords(runs: readonly TextRun[], base: TextStyle, smallest: number): Word[] {
   const words: Word[] = [];
@@ -82,7 +82,7 @@ function toWords(runs: readonly TextRun[], base: TextStyle, smallest: number): W
     const style = run.style ?? base;
     if ('inches' in run) {
       const length = layoutLength(run.inches, run.step, style, run.unit ?? false, smallest);
-      push({ kind: 'length', length, width: length.width });
+      push({ kind: 'length', length, style, width: length.width });
       continue;
     }
     for (const part of run.text.split(/( +)/)) {
@@ -133,7 +133,7 @@ function layLine(words: readonly Word[], baseline: number): TextLine {
         addText(atom.text, atom.style, atom.width);
         continue;
       }
-      parts.push({ kind: 'length', x, length: atom.length });
+      parts.push({ kind: 'length', x, length: atom.length, style: atom.style });
       x += atom.width;
     }
   });

@@ -25,9 +25,8 @@ function arc(cx: number, cy: number, r: number, fromDeg: number, toDeg: number):
 
 export const ICONS: Readonly<Record<IconName, readonly IconStroke[]>> = {
   turnOver: [
-    { paths: [arc(12, 10, 7, 200, 330), [[19, 2.5], [18.2, 6.7], [14, 6]]], width: 2 }, // prettier-ignore
-    { paths: [[[1, 12], [23, 12]]], width: 2, dash: [3, 2.4] }, // prettier-ignore
-    { paths: [[[5, 16], [5, 21], [19, 21], [19, 16]]], width: 2 }, // prettier-ignore
+    { paths: [[[2, 13], [22, 13]]], width: 2, dash: [3, 2.6] }, // prettier-ignore
+    { paths: [arc(12, 9.6, 7, 190, 325), [[18.8, 2.8], [18.8, 7.8], [13.8, 7.8]], [[5, 17], [5, 21], [19, 21], [19, 17]]], width: 2 }, // prettier-ignore
   ],
   noAccess: [
     { paths: [[[3, 22], [3, 2], [22, 2]]], width: 2 }, // prettier-ignore
@@ -39,8 +38,8 @@ export const ICONS: Readonly<Record<IconName, readonly IconStroke[]>> = {
   ],
   exclamation: [{ paths: [[[12, 10], [12, 16]], [[12, 18], [12, 20.4]]], width: 2.4 }], // prettier-ignore
   logo: [
-    { paths: [[[3, 5.4], [21.4, 2.1], [19.5, 21.8], [3, 21.8]]], width: 2.6, closed: true }, // prettier-ignore
-    { paths: [[[4, 15.8], [8.6, 15.8], [8.6, 20.8]]], width: 2, accent: 'chalk' }, // prettier-ignore
-    { paths: [arc(20.9, 2.6, 7.6, 168, 95)], width: 2, accent: 'red' },
+    { paths: [[[2, 5.75], [21.6, 1.8], [19, 22.25], [2, 22.25]]], width: 2.5, closed: true }, // prettier-ignore
+    { paths: [[[3.25, 15.75], [8, 15.75], [8, 21]]], width: 2, accent: 'chalk' }, // prettier-ignore
+    { paths: [[[14.4, 4.4], [15.1, 6.1], [16.2, 7.6], [17.7, 8.6], [19.5, 9.1]]], width: 2, accent: 'red' }, // prettier-ignore
   ],
 };

@@ -63,6 +63,14 @@ export interface ClipPrimitive {
 export interface SpanPrimitive {
   readonly kind: 'span';
   readonly text: string;
+  /** Where its baseline begins, how long it is, and the text it stands among. */
+  readonly x: number;
+  readonly y: number;
+  readonly width: number;
+  readonly turn: number;
+  readonly face: Face;
+  readonly weight: Weight;
+  readonly size: number;
   readonly children: readonly Primitive[];
 }
 

@@ -55,7 +55,7 @@ function linePrimitives(
   }
   return line.parts.flatMap((part) => {
     const x = left + part.x;
-    if (part.kind === 'length') return [lengthPrimitive(part.length, x, line.baseline, to, options)];
+    if (part.kind === 'length') return lengthPrimitives(part.length, part.style, [x, line.baseline], to, options);
     const width = textWidth(part.text, part.style);
     return [plainText(part.text, part.style, to(x, line.baseline), width, { ...options, anchor: 'start' })];
   });
@@ -79,13 +79,13 @@ function plainText(text: string, style: TextStyle, [x, y]: Point, width: number,
   };
 }
 
-function lengthPrimitive(
+function lengthPrimitives(
   length: LengthLayout,
-  x: number,
-  y: number,
+  style: TextStyle,
+  [x, y]: Point,
   to: (x: number, y: number) => Point,
   options: LineOptions,
-): Primitive {
+): Primitive[] {
   const start = { ...options, anchor: 'start' as const };
   const children = length.pieces.map((piece) =>
     plainText(piece.text, piece.style, to(x + piece.x, y + piece.y), textWidth(piece.text, piece.style), start),
@@ -104,7 +104,12 @@ function lengthPrimitive(
       fill: ink,
     });
   }
-  return { kind: 'span', text: length.text, children };
+  if (!length.bar) return children;
+  const [left, top] = to(x, y);
+  const { pixel } = options.view;
+  const { face, weight, size } = style;
+  const place = { x: left, y: top, width: length.width * pixel, turn: options.turn, face, weight, size: size * pixel };
+  return [{ kind: 'span', text: length.text, ...place, children }];
 }
 
 function groundPrimitives(

@@ -1,0 +1,117 @@
+import { boundingBox } from '../../core/polygon';
+import type { NestCrosscut, NestRip } from '../../nest/types';
+import type { PlacedPiece, PlacedSlab } from './placed-slab';
+
+/** What a mark on an edge of the slab is for its piece. */
+export type MarkWord = 'long point' | 'short point' | 'end' | 'trim' | 'cut';
+
+/** A place on the slab's top (back) or bottom (front) edge, inches from the left end. */
+export interface CutMark {
+  readonly cut: number;
+  readonly edge: 'top' | 'bottom';
+  readonly at: number;
+  /** Side of the kerf on which the piece lies. */
+  readonly side: 'left' | 'right';
+  /** Null for a cut that makes no piece's end. */
+  readonly letter: string | null;
+  readonly word: MarkWord;
+}
+
+/** Two ends of a cut within this of each other make a square cut, inches: less than any tape shows. */
+const SQUARE = 1 / 128;
+/** A cut this near to a piece's end makes it, inches: less than any tape shows, more than the search's slack. */
+const SAME = 1 / 256;
+/** y this near to an edge of the slab lies on it, inches. */
+const ON_EDGE = 1e-3;
+
+export const isSquare = (cut: NestCrosscut): boolean => Math.abs(cut.back - cut.front) < SQUARE;
+
+/** How far the saw is turned from a square cut, degrees. */
+export const offSquareDeg = (cut: NestCrosscut): number => Math.abs(90 - cut.angle);
+
+/**
+ * Every mark that is set on the slab's own edges before it is cut; both sides of the kerf where both sides are pieces.
+ * A cut that makes no end has no mark of its own where a piece's mark stands on the same place.
+ */
+export function cutMarks(slab: PlacedSlab): CutMark[] {
+  const marks = slab.cuts.flatMap((cut) => (cut.kind === 'crosscut' ? crosscutMarks(slab, cut) : []));
+  const named = marks.filter((mark) => mark.letter !== null);
+  return marks.filter((mark) => mark.letter !== null || !named.some((other) => samePlace(mark, other)));
+}
+
+const samePlace = (a: CutMark, b: CutMark): boolean => a.edge === b.edge && Math.abs(a.at - b.at) < SAME;
+
+function crosscutMarks(slab: PlacedSlab, cut: NestCrosscut): CutMark[] {
+  const edges = [
+    ...(Math.abs(cut.yBack - slab.depth) < ON_EDGE ? (['top'] as const) : []),
+    ...(Math.abs(cut.yFront) < ON_EDGE ? (['bottom'] as const) : []),
+  ];
+  const sides = markedSides(cut);
+  return edges.flatMap((edge) =>
+    sides.map((side) => {
+      const piece = madeEnd(slab, cut, side);
+      const at = lineOf(cut, side)[edge];
+      return { cut: cut.n, edge, at, side, letter: piece?.letter ?? null, word: markWord(cut, side, edge, piece) };
+    }),
+  );
+}
+
+/** The sides of the kerf that somebody has to keep to. */
+export function markedSides(cut: NestCrosscut): ('left' | 'right')[] {
+  const sides: ('left' | 'right')[] = [];
+  if (cut.left !== null) sides.push('left');
+  if (cut.right !== null) sides.push('right');
+  if (sides.length === 0) sides.push(cut.kerfSide === 'right' ? 'left' : 'right');
+  return sides;
+}
+
+/** Marks of one side of the kerf on the top and the bottom edge. */
+export function lineOf(cut: NestCrosscut, side: 'left' | 'right'): { readonly top: number; readonly bottom: number } {
+  return side === 'left' ? { top: cut.back, bottom: cut.front } : { top: cut.backFar, bottom: cut.frontFar };
+}
+
+/** The piece whose end this side of the cut is; null where the cut only parts a piece from waste before its end is cut. */
+export function madeEnd(slab: PlacedSlab, cut: NestCrosscut, side: 'left' | 'right'): PlacedPiece | null {
+  const piece = pieceAt(slab, side === 'left' ? cut.left : cut.right);
+  if (!piece) return null;
+  const line = lineOf(cut, side);
+  const low = reach(piece, side, cut.yFront);
+  const high = reach(piece, side, cut.yBack);
+  return Math.abs(low - line.bottom) < SAME && Math.abs(high - line.top) < SAME ? piece : null;
+}
+
+/** Where the piece ends on its side of a cut, at the lower or the upper edge of its lane. */
+function reach(piece: PlacedPiece, side: 'left' | 'right', y: number): number {
+  const xs = piece.outline.filter((p) => Math.abs(p[1] - y) < SAME).map((p) => p[0]);
+  return side === 'left' ? Math.max(...xs) : Math.min(...xs);
+}
+
+export function pieceAt(slab: PlacedSlab, index: number | null): PlacedPiece | null {
+  return index === null ? null : (slab.pieces[index] ?? null);
+}
+
+function markWord(
+  cut: NestCrosscut,
+  side: 'left' | 'right',
+  edge: 'top' | 'bottom',
+  piece: PlacedPiece | null,
+): MarkWord {
+  if (isSquare(cut) && cut.n === 1 && side === 'right') return 'trim';
+  if (!piece) return 'cut';
+  if (isSquare(cut)) return 'end';
+  const leansRight = cut.back > cut.front;
+  const reachesOut = (edge === 'top') === (side === 'left' ? leansRight : !leansRight);
+  return reachesOut ? 'long point' : 'short point';
+}
+
+/** Pieces that get a long edge from a rip: those under its kerf and those over it. */
+export function piecesAtRip(slab: PlacedSlab, cut: NestRip): { below: PlacedPiece[]; above: PlacedPiece[] } {
+  const along = slab.pieces.filter((piece) => {
+    const box = boundingBox(piece.outline);
+    return box.minX < cut.to - SAME && box.maxX > cut.from + SAME;
+  });
+  return {
+    below: along.filter((piece) => Math.abs(boundingBox(piece.outline).maxY - cut.across) < SAME),
+    above: along.filter((piece) => Math.abs(boundingBox(piece.outline).minY - cut.acrossFar) < SAME),
+  };
+}
