@@ -2,7 +2,7 @@ import type { NestCrosscut, NestRip } from '../../nest/types';
 import type { DisplayStep } from '../../tape/format-length';
 import type { TextRun } from '../display-list';
 import { styles } from '../paper/page-builder';
-import { isSquare, lineOf, madeEnd, markedSides, offSquareDeg, pieceAt, piecesAtRip } from '../slab/cut-marks';
+import { isSquare, isTrim, lineOf, madeEnd, markedSides, offSquareDeg, pieceAt, piecesAtRip } from '../slab/cut-marks';
 import type { PlacedPiece, PlacedSlab } from '../slab/placed-slab';
 
 /** One row of the table: what to do, and how to set the saw, each `set` on a line of its own. */
@@ -12,9 +12,6 @@ export interface CutStep {
   readonly doThis: readonly TextRun[];
   readonly set: readonly (readonly TextRun[])[];
 }
-
-/** A first cut at the left end that takes less than this only squares or trims it, inches. */
-const TRIM = 6;
 
 /**
  * The rows of a slab's table: every cut in sawing order, then the letters, then each offcut to keep.
@@ -71,7 +68,7 @@ class CutWords {
         { text: '. One pass makes both ends.' },
       ];
     }
-    if (cut.n === 1 && !left && side === 'right' && lineOf(cut, 'right').top < TRIM) {
+    if (isTrim(cut)) {
       return [{ text: 'Trim the left end square. Takes ' }, this.length(lineOf(cut, 'right').top, true), { text: '.' }];
     }
     const piece = left ?? right;

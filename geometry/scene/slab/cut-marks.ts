@@ -17,6 +17,8 @@ export interface CutMark {
   readonly word: MarkWord;
 }
 
+/** A first cut that takes less than this off the left end trims it, inches. */
+const TRIM = 6;
 /** Two ends of a cut within this of each other make a square cut, inches: less than any tape shows. */
 const SQUARE = 1 / 128;
 /** A cut this near to a piece's end makes it, inches: less than any tape shows, more than the search's slack. */
@@ -25,6 +27,10 @@ const SAME = 1 / 256;
 const ON_EDGE = 1e-3;
 
 export const isSquare = (cut: NestCrosscut): boolean => Math.abs(cut.back - cut.front) < SQUARE;
+
+/** The first cut, square, that only takes a little off the left end. */
+export const isTrim = (cut: NestCrosscut): boolean =>
+  cut.n === 1 && isSquare(cut) && markedSides(cut).join() === 'right' && cut.backFar < TRIM;
 
 /** How far the saw is turned from a square cut, degrees. */
 export const offSquareDeg = (cut: NestCrosscut): number => Math.abs(90 - cut.angle);
@@ -96,7 +102,7 @@ function markWord(
   edge: 'top' | 'bottom',
   piece: PlacedPiece | null,
 ): MarkWord {
-  if (isSquare(cut) && cut.n === 1 && side === 'right') return 'trim';
+  if (isTrim(cut)) return 'trim';
   if (!piece) return 'cut';
   if (isSquare(cut)) return 'end';
   const leansRight = cut.back > cut.front;
