@@ -1,6 +1,7 @@
 import path from 'node:path';
 
 import type { Knex } from 'knex';
+import { pino } from 'pino';
 
 import { createApp } from './app';
 import { type Config, ConfigError, readConfig } from './config';
@@ -9,6 +10,7 @@ import { migrate, seedWhenEmpty } from './db/migrate';
 import { DatabaseUnreachableError, reach } from './db/reach';
 import { type DemoSignIn, presentDemoSignIns } from './demo-sign-ins';
 import { close, listen, ListenError } from './listen';
+import { startWork } from './work/start-work';
 
 const WEB_ROOT = path.resolve(__dirname, '../dist');
 
@@ -32,11 +34,13 @@ async function check(config: Config): Promise<void> {
 
 async function serve(config: Config, db: Knex): Promise<void> {
   await prepare(config, db);
-  const server = await listen(createApp({ config, db, webRoot: WEB_ROOT }), config.port, config.host);
+  const log = pino({ level: config.logLevel });
+  const server = await listen(createApp({ config, db, log, webRoot: WEB_ROOT }), config.port, config.host);
+  const work = startWork({ config, db, log });
   const stopped = stopSignal();
   console.log(greeting(config, await presentDemoSignIns(db)));
   console.log(`\n${await stopped}: closing.`);
-  await close(server);
+  await Promise.all([close(server), work.stop()]);
 }
 
 async function prepare(config: Config, db: Knex): Promise<void> {
