@@ -125,10 +125,13 @@ export function wheelFactor(deltaY: number, deltaMode: number): number {
   return Math.exp(-Math.max(-400, Math.min(400, px)) * 0.0018);
 }
 
-/** The SVG transform that makes a drawing painted for `painted` look as `now` says. */
-export function transformBetween(painted: Viewport, now: Viewport): string {
-  const k = now.scale / painted.scale;
-  return `matrix(${k} 0 0 ${k} ${now.x - painted.x * k} ${now.y - painted.y * k})`;
+/**
+ * The SVG transform of a group painted about (0, 0), y up turned to y down, at `paintedScale` px per inch, so that it lies as
+ * `now` says. A pan changes only this; a zoom stretches what is painted until it is painted anew.
+ */
+export function groupTransform(paintedScale: number, now: Viewport): string {
+  const k = now.scale / paintedScale;
+  return `matrix(${k} 0 0 ${k} ${now.x} ${now.y})`;
 }
 
 export const distance = (a: ScreenPoint, b: ScreenPoint): number => Math.hypot(a[0] - b[0], a[1] - b[1]);

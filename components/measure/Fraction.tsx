@@ -128,7 +128,7 @@ function Stack({ over, under, kind, size, tone }: Look & { readonly over: string
 const styles = StyleSheet.create({
   inline: { flexDirection: 'row', alignItems: 'center', position: 'relative' },
   // A fraction without a whole number has no base line of its own in running text.
-  alone: webStyle({ verticalAlign: 'middle' }),
+  alone: webStyle({ verticalAlign: 'middle', marginLeft: '0.08em' }),
   stack: { alignItems: 'center' },
   bar: { alignSelf: 'stretch', marginVertical: 1, minWidth: 10 },
 });

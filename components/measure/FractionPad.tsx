@@ -100,6 +100,7 @@ export function FractionPad(props: FractionPadProps) {
       role="group"
       aria-label={`Length of ${title}`}
       tabIndex={-1}
+      dataSet={{ ring: 'none' }}
       onKeyDown={onKeyDown}
       style={styles.pad}
     >
@@ -125,15 +126,17 @@ export function FractionPad(props: FractionPadProps) {
             <View style={styles.caret} />
           </View>
         </TapeBlade>
+        <View aria-live="assertive">
+          {refusal !== null && (
+            <View style={styles.refusal}>
+              <Text kind="second" tone="red">
+                {refusal}
+              </Text>
+            </View>
+          )}
+        </View>
       </View>
       <HiddenText live="polite">{spokenPad(state, value)}</HiddenText>
-      <View aria-live="assertive">
-        {refusal !== null && (
-          <Text kind="second" tone="red">
-            {refusal}
-          </Text>
-        )}
-      </View>
       {state.unit === 'in' && (
         <InchRuler lit={litMark(state.inches)} onMark={(sixteenths) => press({ kind: 'mark', sixteenths })} />
       )}
@@ -198,7 +201,8 @@ const styles = StyleSheet.create({
   hint: { flexShrink: 0 },
   aside: { flexShrink: 0 },
   converted: { flexDirection: 'row', alignItems: 'center', gap: 8 },
-  blade: { paddingVertical: 3, paddingRight: 3 },
+  blade: { paddingTop: 3, paddingRight: 3, paddingBottom: 1 },
+  refusal: { paddingTop: 8 },
   live: { flexDirection: 'row', alignItems: 'center', gap: 6 },
   caret: { width: 3, height: 30, backgroundColor: '#1A5AA8' },
 });

@@ -33,15 +33,17 @@ export function FieldShell(props: FieldShellProps & { readonly children: (ids: F
   return (
     <View style={styles.shell}>
       {!props.labelHidden && (
-        <Text kind="label" id={`${id}-label`}>
-          {props.label}
-        </Text>
+        <View style={styles.label}>
+          <Text kind="label" id={`${id}-label`}>
+            {props.label}
+          </Text>
+        </View>
       )}
       {props.children({ control: id, label: `${id}-label`, describedBy })}
       {/* Kept in the page while empty, so that a screen reader hears the sentence when it comes. */}
       <View aria-live="polite" id={errorId}>
         {props.error && (
-          <View style={styles.error}>
+          <View style={[styles.under, styles.error]}>
             <Icon name="warn" tone="red" size={18} />
             <View style={styles.grow}>
               <Text kind="second" tone="red">
@@ -52,9 +54,11 @@ export function FieldShell(props: FieldShellProps & { readonly children: (ids: F
         )}
       </View>
       {props.hint && (
-        <Text kind="second" id={hintId}>
-          {props.hint}
-        </Text>
+        <View style={styles.under}>
+          <Text kind="second" id={hintId}>
+            {props.hint}
+          </Text>
+        </View>
       )}
     </View>
   );
@@ -145,7 +149,9 @@ const inputKinds: Readonly<Record<NonNullable<FieldProps['kind']>, TextInputProp
 };
 
 const styles = StyleSheet.create({
-  shell: { gap: 6 },
+  shell: {},
+  label: { marginBottom: 6 },
+  under: { marginTop: 6 },
   grow: { flex: 1 },
   error: { flexDirection: 'row', gap: space.s, alignItems: 'flex-start' },
   box: {

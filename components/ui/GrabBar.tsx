@@ -103,13 +103,15 @@ export function GrabBar({ label, position, heights, sheet, onPosition, onClose }
 }
 
 const styles = StyleSheet.create({
+  // Reaches over the sheet's edge and into its title, so that a finger finds it.
   hit: {
     alignSelf: 'center',
     width: 160,
-    height: 26,
-    marginBottom: -2,
+    height: 44,
+    marginTop: -16,
+    marginBottom: -8,
+    paddingTop: 24,
     alignItems: 'center',
-    paddingTop: 10,
     zIndex: 1,
   },
   still: webStyle({ touchAction: 'none', cursor: 'grab' }),

@@ -25,7 +25,7 @@ export function Logo({ size = 40, oneColour, frame = 'ink', onDark = false }: Lo
   const markInk = onDark ? '#86BDF7' : color[oneColour ?? 'chalk'];
   const arcInk = onDark ? '#FF8F78' : color[oneColour ?? 'red'];
   return (
-    <Svg width={side} height={side} viewBox="0 0 48 48" aria-hidden>
+    <Svg width={side} height={side} viewBox="1 0 46.5 47.5" aria-hidden>
       <Path d="M4 11.5L43.2 3.6 38 44.5H4z" fill="none" stroke={frameInk} strokeWidth={5} strokeLinejoin="miter" />
       <Path d="M6.5 31.5H16v10.5" fill="none" stroke={markInk} strokeWidth={4} />
       <Path d="M28.8 8.8C30.4 14.2 34.5 17.6 39 18.2" fill="none" stroke={arcInk} strokeWidth={4} />

@@ -107,9 +107,9 @@ function PlainHeader(props: PageFrameProps & { readonly wide: boolean }) {
         <Text kind={!wide && (steps || back) ? 'rowTitle' : 'screenTitle'} level={1}>
           {props.title}
         </Text>
-        {props.subtitle && <Text kind="second">{props.subtitle}</Text>}
+        {props.subtitle && <Text kind={!wide && (steps || back) ? 'small' : 'second'}>{props.subtitle}</Text>}
       </View>
-      {props.actions && <View style={styles.actions}>{props.actions}</View>}
+      {props.actions && <View style={[styles.actions, !wide && styles.close]}>{props.actions}</View>}
     </View>
   );
 }
@@ -143,7 +143,7 @@ const styles = StyleSheet.create({
     flexDirection: 'row',
     flexWrap: 'wrap',
     alignItems: 'center',
-    columnGap: space.s,
+    columnGap: space.xs,
     rowGap: space.s,
     paddingVertical: 10,
     minHeight: 64,
@@ -151,4 +151,5 @@ const styles = StyleSheet.create({
   },
   names: { flexGrow: 1, flexShrink: 1, flexBasis: 120, minWidth: 0 },
   actions: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space.s, flexShrink: 1 },
+  close: { gap: 2 },
 });
