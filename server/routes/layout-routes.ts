@@ -1,6 +1,6 @@
 import { Router } from 'express';
 
-import { getLayout, listEdits, postEdits } from '@/shared/contracts/layouts';
+import { getLayout, listEdits, postEdits, takeStock } from '@/shared/contracts/layouts';
 import { route } from '../http/route';
 import type { LayoutService } from '../services/layout-service';
 
@@ -13,6 +13,9 @@ export function layoutRoutes(layouts: LayoutService): Router {
   route(router, listEdits, 200, ({ actor, params, query }) => layouts.listEdits(actor, params.layoutId, query.since));
   route(router, postEdits, 200, ({ actor, params, body }) =>
     layouts.postEdits(actor, params.layoutId, body.base, body.edits),
+  );
+  route(router, takeStock, 200, ({ actor, params, body }) =>
+    layouts.takeStock(actor, params.layoutId, body.base, body.editId),
   );
   return router;
 }

@@ -57,7 +57,9 @@ export class JobFileService {
       }
       const { name, layout } = parsed;
       const bare = layout.stock.slabs.length === 0 && layout.stock.rack.length === 0;
-      const doc = bare ? { ...layout, stock: { ...layout.stock, ...(await stockOfShop(trx)) } } : layout;
+      const doc = bare
+        ? { ...layout, stock: { ...layout.stock, ...(await stockOfShop(trx, layout.material)) } }
+        : layout;
       const number = await takeJobNumber(trx, shop.id);
       const fields = {
         name: name.trim() || 'Job without a name',

@@ -1,10 +1,13 @@
+import { isDeepStrictEqual } from 'node:util';
+
 import type { Knex } from 'knex';
 import type { Logger } from 'pino';
 
 import type { Layout } from '@/geometry/core/layout';
-import type { EditsOutcome, LoggedEdit } from '@/shared/contracts/layouts';
+import type { EditsOutcome, EditsSince, LoggedEdit } from '@/shared/contracts/layouts';
 import { applyEdit, type ApplyResult, type Edit } from '@/shared/layout/apply-edit';
 import { layoutSchema } from '@/shared/layout/layout-schema';
+import { may } from '@/shared/roles/roles';
 import { ProblemError } from '../http/problem-error';
 import { updateJob } from '../repositories/job-repository';
 import {
@@ -21,6 +24,7 @@ import type { Actor } from './actor';
 import { announce } from './event-hub';
 import { inShop } from './in-shop';
 import { readShop } from './read-shop';
+import { stockOfShop } from './stock-for-layout';
 import { drawThumbnail } from './thumbnail';
 
 /** Layouts and the edits that are the only way they change. */
@@ -36,7 +40,7 @@ export class LayoutService {
   }
 
   /** @throws ProblemError not_found */
-  listEdits(actor: Actor, layoutId: string, since: number): Promise<{ seq: number; edits: LoggedEdit[] }> {
+  listEdits(actor: Actor, layoutId: string, since: number): Promise<EditsSince> {
     return inShop(this.db, actor, 'job.see', async (trx) => {
       const { seq } = found(await findLayout(trx, layoutId));
       const edits = await listEditsSince(trx, layoutId, since);
@@ -53,16 +57,43 @@ export class LayoutService {
    *   when not one of them applies
    */
   async postEdits(actor: Actor, layoutId: string, base: number, edits: readonly Edit[]): Promise<EditsOutcome> {
-    const outcome = await inShop(this.db, actor, 'layout.edit', async (trx) => {
+    const outcome = await this.merge(actor, layoutId, base, () => Promise.resolve(edits));
+    if (outcome.refused.length > 0 && outcome.applied.length === 0) throw allRefused(outcome);
+    return outcome;
+  }
+
+  /**
+   * Puts the shop's stock of the layout's wood into it, as an edit of the caller's; no edit when it is the same stock.
+   *
+   * @returns every edit after `base`, this one too
+   * @throws ProblemError not_found; validation_failed for a base that lies ahead
+   */
+  async takeStock(actor: Actor, layoutId: string, base: number, editId: string): Promise<EditsSince> {
+    await this.merge(actor, layoutId, base, async (trx, { doc }) => {
+      const stock = await stockOfShop(trx, doc.material);
+      const same = isDeepStrictEqual(stock, { slabs: doc.stock.slabs, rack: doc.stock.rack });
+      return same ? [] : [{ id: editId, kind: 'setStock', value: stock }];
+    });
+    return this.listEdits(actor, layoutId, base);
+  }
+
+  private merge(
+    actor: Actor,
+    layoutId: string,
+    base: number,
+    editsFor: (trx: Knex.Transaction, held: StoredLayout) => Promise<readonly Edit[]>,
+  ): Promise<EditsOutcome> {
+    return inShop(this.db, actor, 'layout.edit', async (trx) => {
       const held = found(await lockLayout(trx, layoutId));
       if (base > held.seq) throw baseAhead(base, held.seq);
+      const edits = await editsFor(trx, held);
       const known = await findKnownEdits(
         trx,
         layoutId,
         edits.map((edit) => edit.id),
       );
       const others = (await listEditsSince(trx, layoutId, base)).filter(({ edit }) => !known.has(edit.id));
-      const { doc, fresh, refused } = applyAll(held, edits, known);
+      const { doc, fresh, refused } = applyAll(actor, held, edits, known);
       const seq = held.seq + fresh.length;
       if (fresh.length > 0) await this.store(trx, actor, held, { doc, seq, edits: fresh });
       const applied = edits.flatMap(({ id }) => {
@@ -71,8 +102,6 @@ export class LayoutService {
       });
       return { seq, applied, refused, others: others.map(toLogged) };
     });
-    if (outcome.refused.length > 0 && outcome.applied.length === 0) throw allRefused(outcome);
-    return outcome;
   }
 
   private async store(
@@ -100,14 +129,19 @@ interface Applied {
   readonly refused: { edit: Edit; reason: string }[];
 }
 
-function applyAll(held: StoredLayout, edits: readonly Edit[], known: ReadonlyMap<string, number>): Applied {
+function applyAll(
+  actor: Actor,
+  held: StoredLayout,
+  edits: readonly Edit[],
+  known: ReadonlyMap<string, number>,
+): Applied {
   const fresh: NewEdit[] = [];
   const refused: { edit: Edit; reason: string }[] = [];
   const seen = new Set(known.keys());
   let { doc } = held;
   for (const edit of edits) {
     if (seen.has(edit.id)) continue;
-    const result = applyChecked(doc, edit);
+    const result = applyChecked(actor, doc, edit);
     if (result.ok) {
       doc = result.layout;
       fresh.push({ seq: held.seq + fresh.length + 1, edit });
@@ -120,9 +154,12 @@ function applyAll(held: StoredLayout, edits: readonly Edit[], known: ReadonlyMap
 }
 
 /** A layout that breaks its own schema could never be opened again, so the edit that would break it is refused. */
-function applyChecked(doc: Layout, edit: Edit): ApplyResult {
+function applyChecked(actor: Actor, doc: Layout, edit: Edit): ApplyResult {
   const result = applyEdit(doc, edit);
   if (!result.ok) return result;
+  if (!may(actor.role, 'revision.sign') && !isDeepStrictEqual(result.layout.accepted, doc.accepted)) {
+    return { ok: false, reason: 'Only a designer or the owner accepts what was found.' };
+  }
   const checked = layoutSchema.safeParse(result.layout);
   if (checked.success) return result;
   const place = checked.error.issues[0]?.path.join('.') ?? 'layout';

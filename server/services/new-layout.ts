@@ -11,6 +11,6 @@ export async function newLayout(trx: Knex.Transaction, shop: Shop): Promise<Layo
   return {
     ...empty,
     room: { ...empty.room, tapeSd: shop.settings.tapeSd },
-    stock: { ...empty.stock, ...(await stockOfShop(trx)) },
+    stock: { ...empty.stock, ...(await stockOfShop(trx, empty.material)) },
   };
 }

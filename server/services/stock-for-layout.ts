@@ -1,17 +1,28 @@
 import type { Knex } from 'knex';
 
-import type { RackPiece, StockSlab } from '@/geometry/core/layout';
+import type { Material, RackPiece, StockSlab } from '@/geometry/core/layout';
 import { listRack, type RackRecord } from '../repositories/rack-repository';
 import { listStock, type StockRecord } from '../repositories/stock-repository';
 
-/** What the shop can cut from, in the layout's words: slabs in stock and pieces of the rack that no job holds. */
-export async function stockOfShop(trx: Knex.Transaction): Promise<{ slabs: StockSlab[]; rack: RackPiece[] }> {
+/** Slabs within this of the wanted thickness are the same slab, inches: what planing leaves uncertain. */
+const SAME_THICKNESS = 1 / 32;
+
+/**
+ * What the shop can cut from, in the layout's words: slabs in stock and pieces of the rack that no job holds, of the
+ * species and thickness asked for.
+ */
+export async function stockOfShop(
+  trx: Knex.Transaction,
+  material: Pick<Material, 'species' | 'thickness'>,
+): Promise<{ slabs: StockSlab[]; rack: RackPiece[] }> {
+  const fits = ({ species, thickness }: StockRecord | RackRecord) =>
+    species === material.species && Math.abs(thickness - material.thickness) <= SAME_THICKNESS;
   const slabs = await listStock(trx);
   const rack = await listRack(trx);
   return {
-    slabs: slabs.filter((slab) => slab.count !== 0).map(toStockSlab),
+    slabs: slabs.filter((slab) => fits(slab) && slab.count !== 0).map(toStockSlab),
     rack: rack
-      .filter((piece) => piece.reservedForJobId === null)
+      .filter((piece) => fits(piece) && piece.reservedForJobId === null)
       .map(toRackPiece)
       .filter((piece) => piece.length > 0),
   };

@@ -10,12 +10,6 @@ import { deliverMail } from './deliver-mail';
 const MAIL_EVERY_MS = 3_000;
 const SWEEP_EVERY_MS = 3_600_000;
 
-/** Where mail goes out; without a server it stays in the outbox. */
-export interface MailSettings {
-  readonly smtpUrl?: string | null;
-  readonly mailFrom?: string | null;
-}
-
 export interface Work {
   /** Starts nothing new and waits for what is under way. */
   stop(): Promise<void>;

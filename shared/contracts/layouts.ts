@@ -35,6 +35,10 @@ export const getLayout = contract({
   problems: ['not_found'],
 });
 
+export const editsSinceSchema = z.strictObject({ seq: z.number().int().min(0), edits: z.array(loggedEditSchema) });
+
+export type EditsSince = z.infer<typeof editsSinceSchema>;
+
 export const listEdits = contract({
   method: 'get',
   path: '/layouts/:layoutId/edits',
@@ -42,7 +46,7 @@ export const listEdits = contract({
   may: 'job.see',
   params: layoutParams,
   query: z.strictObject({ since: z.coerce.number().int().min(0) }),
-  response: z.strictObject({ seq: z.number().int().min(0), edits: z.array(loggedEditSchema) }),
+  response: editsSinceSchema,
   problems: ['not_found'],
 });
 
@@ -71,4 +75,19 @@ export const postEdits = contract({
   }),
   response: editsOutcomeSchema,
   problems: ['not_found', 'edits_refused'],
+});
+
+export const takeStock = contract({
+  method: 'post',
+  path: '/layouts/:layoutId/stock',
+  summary: "Put what the shop has of the layout's wood and thickness into it, as one edit by the caller.",
+  may: 'layout.edit',
+  params: layoutParams,
+  body: z.strictObject({
+    /** Id of the edit, made by the client, so that a resend does no harm. */
+    editId: uuid,
+    base: z.number().int().min(0),
+  }),
+  response: editsSinceSchema,
+  problems: ['not_found'],
 });

@@ -22,6 +22,8 @@ export const TEST_CONFIG: Config = {
   tokenSecret: 'a secret of thirty-two characters, for tests',
   logLevel: 'silent',
   seedDemo: false,
+  smtpUrl: null,
+  mailFrom: null,
 };
 
 export const TEST_PASSWORD = 'quayside lantern 7';
