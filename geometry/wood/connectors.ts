@@ -93,13 +93,14 @@ export function connectorsAlong(
     const side = settings.fromHardware + settings.width / 2;
     return [at - side, at + side];
   });
+  const apart = settings.width + settings.cover;
   const centres = free.flatMap((stretch) => {
     const places = subtractStretches(stretch, clear);
-    return setOut(stretch, settings.spacing).flatMap((at) => nearestIn(places, at, settings.spacing / 2));
+    return setOut(stretch, settings.spacing, apart).flatMap((at) => nearestIn(places, at, settings.spacing / 2));
   });
   return dropCrowded(
     centres.sort((a, b) => a - b),
-    settings.width + settings.cover,
+    apart,
   );
 }
 
@@ -125,17 +126,19 @@ function subtractStretches([from, to]: Stretch, blocked: readonly Stretch[]): re
   return free;
 }
 
-/** Places in a stretch at `spacing` from both ends in, never further apart than the spacing. */
-function setOut([from, to]: Stretch, spacing: number): readonly number[] {
+/**
+ * Places in a stretch at `spacing` from both ends in. Where the inmost two stand further apart than the spacing, one more
+ * goes between them; where they would run into each other, one in the middle takes their place.
+ */
+function setOut([from, to]: Stretch, spacing: number, apart: number): readonly number[] {
   const room = to - from;
   if (room <= 0) return [from];
   const pairs = Math.floor(room / (2 * spacing));
-  const steps = Array.from({ length: pairs + 1 }, (_, i) => i * spacing);
   const middle = room - 2 * pairs * spacing;
-  const between = middle > spacing ? [from + room / 2] : [];
-  const places = [...steps.map((s) => from + s), ...between, ...steps.map((s) => to - s).reverse()];
-  // An even number of spacings lets the two inmost marks fall on one place.
-  return places.filter((place, i) => i === 0 || place - places[i - 1]! > spacing * 1e-6);
+  const centre = from + room / 2;
+  const outer = Array.from({ length: middle < apart ? pairs : pairs + 1 }, (_, i) => i * spacing);
+  const between = middle < apart || middle > spacing ? [centre] : [];
+  return [...outer.map((s) => from + s), ...between, ...outer.map((s) => to - s).reverse()];
 }
 
 function nearestIn(places: readonly Stretch[], at: number, limit: number): readonly number[] {

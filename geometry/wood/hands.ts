@@ -92,21 +92,36 @@ const GRIP: Readonly<Record<Grip, readonly [low: number, high: number]>> = {
   poor: [0.9, 0.9],
 };
 
+/** The six multipliers of a lift, each 0 to 1. */
+export interface LiftMultipliers {
+  readonly horizontal: number;
+  readonly vertical: number;
+  readonly distance: number;
+  readonly asymmetry: number;
+  readonly frequency: number;
+  readonly grip: number;
+}
+
 /**
- * Recommended weight limit of one lift, pounds: 51 lb x six multipliers.
- *
- * Under 10 in, H and D count as 10. Over H 25, V 70, D 70 or 135 degrees nothing is recommended and the answer is 0.
+ * Multipliers of the lifting equation. Under 10 in, H and D count as 10; past H 25, V 70, D 70 in or 135 degrees the
+ * multiplier is 0.
  *
  * @see NIOSH 94-110, p. 7 and Tables 1 to 7
  */
+export function liftMultipliers(lift: Lift): LiftMultipliers {
+  return {
+    horizontal: lift.horizontal > 25 ? 0 : 10 / Math.max(lift.horizontal, 10),
+    vertical: lift.vertical > 70 ? 0 : 1 - 0.0075 * Math.abs(lift.vertical - 30),
+    distance: lift.distance > 70 ? 0 : 0.82 + 1.8 / Math.max(lift.distance, 10),
+    asymmetry: lift.asymmetryDeg > 135 ? 0 : 1 - 0.0032 * lift.asymmetryDeg,
+    frequency: frequencyMultiplier(lift),
+    grip: GRIP[lift.grip][lift.vertical < 30 ? 0 : 1],
+  };
+}
+
+/** Recommended weight limit of one lift, pounds: 51 lb x six multipliers; 0 where nothing is recommended. */
 export function recommendedLb(lift: Lift): number {
-  if (lift.horizontal > 25 || lift.vertical > 70 || lift.distance > 70 || lift.asymmetryDeg > 135) return 0;
-  const horizontal = 10 / Math.max(lift.horizontal, 10);
-  const vertical = 1 - 0.0075 * Math.abs(lift.vertical - 30);
-  const distance = 0.82 + 1.8 / Math.max(lift.distance, 10);
-  const asymmetry = 1 - 0.0032 * lift.asymmetryDeg;
-  const grip = GRIP[lift.grip][lift.vertical < 30 ? 0 : 1];
-  return LOAD_CONSTANT.value * horizontal * vertical * distance * asymmetry * frequencyMultiplier(lift) * grip;
+  return Object.values(liftMultipliers(lift)).reduce((weight, multiplier) => weight * multiplier, LOAD_CONSTANT.value);
 }
 
 /** Picking a top up from the cabinets' height: hands 15 in out, 30 in up, moved 25 in, fair grip, now and then. */
