@@ -16,7 +16,7 @@ export interface Work {
 }
 
 /** Does what no request waits for: sends mail, sweeps up what has run out. */
-export function startWork({ config, db, log }: { config: Config & MailSettings; db: Knex; log: Logger }): Work {
+export function startWork({ config, db, log }: { config: Config; db: Knex; log: Logger }): Work {
   const transport = config.smtpUrl
     ? smtpTransport(config.smtpUrl, config.mailFrom ?? senderAt(config.publicUrl))
     : outboxOnlyTransport();
