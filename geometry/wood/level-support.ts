@@ -1,8 +1,9 @@
 import type { Base, Layout, Wall } from '../core/layout';
+import type { Point } from '../core/point';
 import type { TopJoint, Tops } from '../top/types';
 import { footOn, type WallFrame } from '../top/wall-frame';
 import { constant } from './sourced';
-import { accessBelow, baseReach, carriesTop } from './under';
+import { baseReach, carriesTop, liesOver } from './under';
 
 export const LEVEL_LIMIT = constant('Cabinets out of level along a kitchen', 1 / 8, 'in', 'common practice', '');
 export const SPAN_LIMIT = constant('Opening that a top spans without a bracket', 24, 'in', 'common practice', '');
@@ -66,7 +67,7 @@ function ledgerOn(
 ): readonly SupportNeed[] {
   const wall = walls.find((w) => w.id === tops.runs.find((r) => r.id === runId)?.wall);
   const onWall = bases.filter((base) => base.wall === wall?.id && carriesTop(base));
-  if (!wall || onWall.length === 0 || accessBelow(walls, bases, joint.from, joint.to) !== 'not drawn') return [];
+  if (!wall || onWall.length === 0 || isCarried(walls, bases, joint)) return [];
   const corner = Math.min(Math.max(footOn(wall, joint.from), 0), wall.length);
   const reaches = onWall.map((base) => baseReach(wall, base));
   const nearStart = corner < wall.length / 2;
@@ -74,6 +75,15 @@ function ledgerOn(
   const [from, to] = nearStart ? [0, edge] : [edge, wall.length];
   const bare = to - from;
   return bare > 0 && bare <= LEDGER_MOST.value ? [{ kind: 'ledger', wall: wall.id, from, to, base: null }] : [];
+}
+
+/** Whether a cabinet stands under the middle of a joint. */
+function isCarried(walls: readonly WallFrame[], bases: readonly Base[], { from, to }: TopJoint): boolean {
+  const middle: Point = [(from[0] + to[0]) / 2, (from[1] + to[1]) / 2];
+  return bases.some((base) => {
+    const wall = walls.find((w) => w.id === base.wall);
+    return wall !== undefined && carriesTop(base) && liesOver(wall, base, middle);
+  });
 }
 
 /** Height of the backsplash a layout draws, inches. */

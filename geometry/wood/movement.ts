@@ -14,7 +14,8 @@ const SIXTEENTH = 1 / 16;
 const UP_SLACK = 1e-9;
 
 /** Next whole sixteenth of an inch at or above a size. */
-export const upToSixteenth = (inches: number): number => Math.max(0, Math.ceil(inches / SIXTEENTH - UP_SLACK)) * SIXTEENTH;
+export const upToSixteenth = (inches: number): number =>
+  Math.max(0, Math.ceil(inches / SIXTEENTH - UP_SLACK)) * SIXTEENTH;
 
 /** Change of width per 1 % of moisture: tangential for flat-sawn, radial for edge grain, their mean for mixed staves. */
 export function changeCoefficient(species: Pick<Species, 'radial' | 'tangential'>, grain: GrainCut): number {
