@@ -1,7 +1,7 @@
 import { toDegrees } from '../core/angle';
 import { angleQuantity, wallEnd, wallQuantity } from './room-frame';
 import type { RoomObservation } from './room-observations';
-import type { SolvedRoom } from './solve-room';
+import type { SolvedRoom } from './solved-room';
 import type { CornerFit, ReadingFit, RoomInput, TieFit, WallFit } from './types';
 
 type Row = ReadingFit & { readonly kind: RoomObservation['kind']; readonly subject: number; readonly ignored: boolean };

@@ -4,7 +4,7 @@ import type { NetworkQuantity } from './network';
 import { angleQuantity, cornerInput, networkMark, triangleQuantity, wallQuantity } from './room-frame';
 import type { RoomFrame } from './room-frame';
 import { tapeSdOf } from './room-observations';
-import type { SolvedRoom } from './solve-room';
+import type { SolvedRoom } from './solved-room';
 import type { NextMeasurement, RoomInput, WallMark } from './types';
 
 /** Marks of a suggested triangle, inches from the corner on its left-hand and right-hand wall: 3-4-5 in feet. */

@@ -2,26 +2,18 @@ import type { Point } from '../core/point';
 import { cross, subtract } from '../core/vector';
 import { adjustNetwork } from './adjust-network';
 import type { Adjustment, NetworkResult } from './adjust-network';
-import { listNames } from './check-paths';
+import { checkSolved, contradiction } from './check-solved';
 import { chiSquareQuantile } from './chi-square';
 import type { NetworkObservation, NetworkPoint } from './network';
 import { assumedReading, roomObservations } from './room-observations';
 import type { RoomObservation } from './room-observations';
 import { wallEnd } from './room-frame';
 import type { FrameCorner, RoomFrame } from './room-frame';
+import type { SolvedRoom } from './solved-room';
 import type { ExpectedAngle } from './expected-angles';
 import { startShapes } from './start-shapes';
 import { undeterminedError } from './undetermined';
 import type { RoomError, RoomInput } from './types';
-
-/** A room that has been fitted, before it is put into words. */
-export interface SolvedRoom {
-  readonly frame: RoomFrame;
-  /** In the fit, in the order of the adjustment's residuals. */
-  readonly active: readonly RoomObservation[];
-  readonly ignored: readonly RoomObservation[];
-  readonly adjustment: Adjustment;
-}
 
 export type SolveResult =
   { readonly ok: true; readonly solved: SolvedRoom } | { readonly ok: false; readonly error: RoomError };
@@ -34,7 +26,6 @@ const EXACT = 1e-6;
 const NEARLY_STRAIGHT = (25 * Math.PI) / 180;
 /** A later start replaces an earlier one only if it is better by more than rounding. */
 const BETTER = 1e-6;
-const SUSPICIOUS = 3.29;
 
 /** Fits the room from the start that serves it best. */
 export function solveRoom(input: RoomInput, frame: RoomFrame, expected: readonly ExpectedAngle[]): SolveResult {
@@ -42,11 +33,11 @@ export function solveRoom(input: RoomInput, frame: RoomFrame, expected: readonly
   const ignored = all.filter((o) => o.ignored);
   const active = all.filter((o) => !o.ignored);
   const first = fitBest(input, frame, expected, active);
-  if (first.kind !== 'open') return toResult(first, frame, active, ignored);
+  if (first.kind !== 'open') return toResult(input, first, { frame, active, ignored });
   const reduced = withForgottenCorners(input, frame, active);
   if (reduced.length > active.length) {
     const second = fitBest(input, frame, expected, reduced);
-    if (second.kind !== 'open') return toResult(second, frame, reduced, ignored);
+    if (second.kind !== 'open') return toResult(input, second, { frame, active: reduced, ignored });
   }
   return { ok: false, error: undeterminedError(input, frame, first.points, first.directions) };
 }
@@ -132,27 +123,12 @@ function isGood({ chi2, dof }: Adjustment): boolean {
 }
 
 function toResult(
+  input: RoomInput,
   result: Exclude<NetworkResult, { kind: 'open' }>,
-  frame: RoomFrame,
-  active: readonly RoomObservation[],
-  ignored: readonly RoomObservation[],
+  solved: Omit<SolvedRoom, 'adjustment'>,
 ): SolveResult {
-  if (result.kind === 'adjusted')
-    return { ok: true, solved: { frame, active, ignored, adjustment: result.adjustment } };
-  return { ok: false, error: contradiction(active, result.standardised) };
-}
-
-function contradiction(active: readonly RoomObservation[], standardised: readonly number[]): RoomError {
-  const worst = active
-    .map((o, i) => ({ o, size: Math.abs(standardised[i]!) }))
-    .filter(({ size }) => !(size <= SUSPICIOUS))
-    .sort((a, b) => b.size - a.size)
-    .slice(0, 4)
-    .map(({ o }) => o);
-  const names = [...new Set((worst.length > 0 ? worst : active).map((o) => o.name))];
-  return {
-    code: 'contradictory',
-    message: `No room fits these readings together: ${listNames(names)}. Take them again.`,
-    path: (worst[0] ?? active[0]!).path,
-  };
+  if (result.kind === 'diverged') return { ok: false, error: contradiction(solved.active, result.standardised) };
+  const room = { ...solved, adjustment: result.adjustment };
+  const error = checkSolved(input, room);
+  return error ? { ok: false, error } : { ok: true, solved: room };
 }

@@ -4,7 +4,7 @@ import type { Adjustment } from './adjust-network';
 import { cornerName } from './room-frame';
 import type { RoomObservation } from './room-observations';
 import { freePoints } from './solve-room';
-import type { SolvedRoom } from './solve-room';
+import type { SolvedRoom } from './solved-room';
 import type { Suspect } from './types';
 
 /** Two-sided normal critical value at 0.001, which Baarda's data snooping commonly uses. */

@@ -23,18 +23,20 @@ export function undeterminedError(
   const stretch = frame.wallIds.map((_, i) => largest(directions, (shift) => stretchOf(frame, points, shift, i)));
   const loose = indicesOver(stretch);
   const unread = loose.filter((i) => isUnread(input, i));
-  if (unread.length > 0) return wallError(input, frame, unread);
+  if (unread.length > 0) return looseWalls(input, frame, unread);
   const swing = frame.corners.map((_, i) => largest(directions, (shift) => swingOf(frame, points, shift, i)));
   const corners = indicesOver(swing);
-  return corners.length > 0 ? cornerError(frame, corners) : wallError(input, frame, loose.length > 0 ? loose : [0]);
+  return corners.length > 0 ? cornerError(frame, corners) : looseWalls(input, frame, loose.length > 0 ? loose : [0]);
 }
 
-function isUnread(input: RoomInput, wall: number): boolean {
+/** Whether a wall has no reading that counts. */
+export function isUnread(input: RoomInput, wall: number): boolean {
   const { id, lengths } = input.walls[wall]!;
   return lengths.length === 0 || input.ignore.includes(wallName(id));
 }
 
-function wallError(input: RoomInput, frame: RoomFrame, walls: readonly number[]): RoomError {
+/** The error for walls whose length nothing fixes. */
+export function looseWalls(input: RoomInput, frame: RoomFrame, walls: readonly number[]): RoomError {
   const names = listNames(walls.map((i) => wallName(frame.wallIds[i]!)));
   const ignored = walls.some((i) => input.walls[i]!.lengths.length > 0);
   const what = ignored ? 'Its only reading is ignored. ' : '';
