@@ -7,6 +7,7 @@ import { layRoom } from '@/geometry/plan/lay-room';
 import { finishPlan } from '@/geometry/plan/make-plan';
 import { nestInstanceOf } from '@/geometry/plan/nest-instance';
 import type { Plan } from '@/geometry/plan/types';
+import { turnPlan, viewTurn } from '@/geometry/scene/turn-plan';
 import type { EditorStore } from './editor-store';
 import { useNest, type NestSearch } from './use-nest';
 
@@ -14,6 +15,10 @@ export interface LivePlan {
   /** What is drawn: the layout with a drag in progress on it. */
   readonly layout: Layout;
   readonly plan: Plan;
+  /** The same plan turned to lie as the room was traced, for drawing and for touching. */
+  readonly drawn: Plan;
+  /** Radians by which `drawn` is turned. */
+  readonly turn: number;
   readonly nest: NestSearch;
 }
 
@@ -29,5 +34,7 @@ export function useLivePlan(store: EditorStore, settings: ShopSettings): LivePla
     () => finishPlan(laid, layout, settings, { nest: nest.plan, nestProblem: nest.error }),
     [laid, layout, settings, nest.plan, nest.error],
   );
-  return { layout, plan, nest };
+  const turn = viewTurn(layout.room);
+  const drawn = useMemo(() => turnPlan(plan, turn), [plan, turn]);
+  return { layout, plan, drawn, turn, nest };
 }
