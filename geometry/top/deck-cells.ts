@@ -37,9 +37,10 @@ export function deckCells(deck: Deck, cut: DeckCut): readonly Cell[] {
       backSeen: row === cut.rows.length && deck.backSeen,
     };
     const xs = cut.cross[row] ?? [];
+    const plain = deck.shape === 'strip' && betweenEnds(deck, xs, row, bottom, top);
     for (let column = 0; column <= xs.length; column++) {
       const [from, to] = [xs[column - 1] ?? null, xs[column] ?? null];
-      const outlines = deck.shape === 'strip' ? null : clipped(deck, from, to, bottom, top);
+      const outlines = plain ? null : clipped(deck, from, to, bottom, top);
       if (outlines) for (const outline of outlines) cells.push({ row, ...seen, ...freeCell(outline, deck, from, to) });
       else cells.push({ row, ...seen, ...stripCell(deck, row, from, to, bottom, top) });
     }
@@ -71,6 +72,16 @@ function stripCell(
   };
 }
 
+/** Whether no seam cuts across an end that leans. */
+function betweenEnds(deck: Deck, xs: readonly number[], row: number, bottom: number, top: number): boolean {
+  if (xs.length === 0) return true;
+  const left = rowEnd(deck.left, null, deck.depth, row, bottom, top);
+  const right = rowEnd(deck.right, null, deck.depth, row, bottom, top);
+  const from = Math.max(left.back, left.front, left.wing?.[0] ?? -Infinity);
+  const to = Math.min(right.back, right.front, right.wing?.[0] ?? Infinity);
+  return xs[0]! >= from && xs[xs.length - 1]! <= to;
+}
+
 /** The part of an end, or of a seam, that bounds one row. */
 function rowEnd(end: DeckEnd, seam: number | null, depth: number, row: number, bottom: number, top: number): DeckEnd {
   if (seam !== null) return { kind: 'edge', back: seam, front: seam, wing: null, finished: false, radius: 0 };
@@ -90,7 +101,8 @@ function pieceEnd(end: DeckEnd, angle: number): PieceEnd {
 
 function clipped(deck: Deck, from: number | null, to: number | null, bottom: number, top: number): readonly Polygon[] {
   if (from === null && to === null && bottom === 0 && top === deck.depth) return [deck.outline];
-  if (deck.shape === 'convex') {
+  const winged = deck.left.wing !== null || deck.right.wing !== null;
+  if (deck.shape === 'convex' || (deck.shape === 'strip' && !winged)) {
     let rest: Polygon = deck.outline;
     if (from !== null) rest = clipHalfPlane(rest, [from, 1], [from, 0]);
     if (to !== null) rest = clipHalfPlane(rest, [to, 0], [to, 1]);
@@ -115,11 +127,12 @@ const ON_SIDE = 1e-6;
 
 function freeCell(outline: Polygon, deck: Deck, from: number | null, to: number | null): CellShape {
   const box = boundingBox(outline);
-  const open = (end: DeckEnd): PieceEnd => pieceEnd(end, 90);
+  const open = (end: DeckEnd, side: 'left' | 'right'): PieceEnd =>
+    pieceEnd(end, deck.shape === 'strip' ? endAngleDeg(end, deck.depth, side) : 90);
   return {
     outline,
-    left: from !== null && box.minX - from < ON_SIDE ? SEAM_END : open(deck.left),
-    right: to !== null && to - box.maxX < ON_SIDE ? SEAM_END : open(deck.right),
+    left: from !== null && box.minX - from < ON_SIDE ? SEAM_END : open(deck.left, 'left'),
+    right: to !== null && to - box.maxX < ON_SIDE ? SEAM_END : open(deck.right, 'right'),
     front: lengthAt(outline, box.minY),
     back: lengthAt(outline, box.maxY),
   };

@@ -71,10 +71,10 @@ function shortFaces({ joints, runs, walls }: LaidRuns, step: Step): readonly Lay
     const run = joint.through === undefined ? undefined : byId.get(joint.through);
     const wall = run && walls.byId.get(run.wall);
     if (!run || !wall) return [];
-    const far = footOn(wall, joint.to);
+    const face = [footOn(wall, joint.from), footOn(wall, joint.to)] as const;
     const inside = joint.corner < Math.PI;
     const [from, to] = inside ? [run.frontFrom, run.frontTo] : [run.backFrom, run.backTo];
-    const missing = Math.max(from - far, far - to);
+    const missing = Math.max(from - Math.min(...face), Math.max(...face) - to);
     if (missing <= TOUCH) return [];
     const [a, b] = joint.between;
     const other = joint.through === a ? b : a;
