@@ -1,7 +1,8 @@
+import type { FindingCode } from './codes';
 import type { Finding, FindingPlace } from './types';
 
 /** A finding with its key: the code and the place, so that the same fact keeps its key across edits. */
-export function finding(fact: Omit<Finding, 'key'>): Finding {
+export function finding(fact: Omit<Finding, 'key' | 'code'> & { readonly code: FindingCode }): Finding {
   return { key: `${fact.code}:${placeKey(fact.at)}`, ...fact };
 }
 

@@ -1,6 +1,7 @@
 import type { LaidRun, TopSeam } from '../top/types';
 import { type Facts, type Rule } from './facts';
 import { finding } from './finding';
+import { nearestPlace } from './nearest-place';
 import { PRACTICE } from './sources';
 import type { Finding } from './types';
 import { sizePair } from './words';
@@ -32,7 +33,7 @@ function atEnd(
       code: end.kind === 'joint' ? 'seam-near-joint' : 'seam-near-open-end',
       severity: 'warn',
       text: `Seam ${seam.letters[0]} to ${seam.letters[1]} is ${is} from the ${what} on the ${side}; it needs ${limit}.`,
-      action: `Move the seam away from the ${what}.`,
+      action: `Move the seam away from the ${what}.${nearestPlace(facts, seam)}`,
       at: { seam: { on: seam.on, at: seam.at }, detail: side },
       source: PRACTICE,
     }),

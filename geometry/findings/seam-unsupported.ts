@@ -1,6 +1,7 @@
 import { baseReach } from '../wood/under';
 import { basesUnder, size, type Rule } from './facts';
 import { finding } from './finding';
+import { nearestPlace } from './nearest-place';
 import { PRACTICE } from './sources';
 
 /** A seam over a dishwasher, a range or an opening, with nothing near that carries it. */
@@ -20,7 +21,7 @@ export const seamUnsupported: Rule = (facts) =>
           code: 'seam-unsupported',
           severity: 'stop',
           text: `Seam ${seam.letters[0]} to ${seam.letters[1]} lies over the ${base.label ?? base.kind}, ${size(facts, away)} from the nearest support; ${size(facts, support)} is the limit.`,
-          action: 'Move the seam over a cabinet or put a support under it.',
+          action: `Move the seam over a cabinet or put a support under it.${nearestPlace(facts, seam)}`,
           at: { seam: { on: seam.on, at: seam.at }, base: base.id },
           source: PRACTICE,
         }),
