@@ -22,9 +22,6 @@ export interface CanvasView {
 
 export const NO_INSETS: Insets = { top: 0, right: 0, bottom: 0, left: 0 };
 
-/** px between a place and the edge for it to count as in sight. */
-const EDGE = 24;
-
 /**
  * The view of one canvas: fitted until the person moves it.
  *
@@ -74,6 +71,6 @@ export function useViewport(bounds: Bounds, insets: Insets = NO_INSETS): CanvasV
 
 function inSight(view: Viewport, at: Point, size: Size, insets: Insets): boolean {
   const [x, y] = toScreen(view, at);
-  const across = x >= insets.left + EDGE && x <= size.width - insets.right - EDGE;
-  return across && y >= insets.top + EDGE && y <= size.height - insets.bottom - EDGE;
+  const across = x >= insets.left && x <= size.width - insets.right;
+  return across && y >= insets.top && y <= size.height - insets.bottom;
 }

@@ -44,8 +44,8 @@ export interface FractionPadProps {
   readonly check?: (inches: number) => string | null;
   /** Replaces the converted length at the right of the title, for instance the angle a reading would give. */
   readonly aside?: (inches: number | null) => ReactNode;
-  /** Starts from a length already taped. */
-  readonly start?: number;
+  /** Starts from a length already taped, in the text and the unit it was typed in. */
+  readonly start?: string;
   /** A key that was typed to open the pad; it counts as the first. */
   readonly firstKey?: string;
   /** Takes the keyboard when it opens; on when left out. */
@@ -153,8 +153,8 @@ export function FractionPad(props: FractionPadProps) {
 }
 
 function startingState({ start, firstKey }: FractionPadProps, unit: 'in' | 'mm'): PadState {
-  const state = start === undefined ? emptyPad(unit) : padWith(start, unit);
-  const key = firstKey === undefined ? null : padKeyOf(firstKey, unit);
+  const state = start === undefined ? emptyPad(unit) : padWith(start);
+  const key = firstKey === undefined ? null : padKeyOf(firstKey, state.unit);
   return key === null || key === 'next' || key === 'cancel' ? state : pressPad(state, key);
 }
 

@@ -118,7 +118,7 @@ const styles = StyleSheet.create({
     borderWidth: 1.5,
     borderLeftWidth: 0,
     borderColor: color.tapeInk,
-    ...webStyle({ backgroundRepeat: 'repeat-x', backgroundPosition: '0 0' }),
+    ...webStyle({ backgroundRepeat: 'repeat-x' }),
   },
   value: { paddingTop: 3, flexDirection: 'row', alignItems: 'center' },
   tick: { position: 'absolute', right: 6, bottom: 4 },

@@ -56,15 +56,25 @@ const MOST = { feet: 3, whole: 4, decimals: 4, fraction: 2, mm: 5, mmDecimals: 2
 /** A pad with nothing on it. */
 export const emptyPad = (unit: PadUnit): PadState => ({ unit, inches: EMPTY, mm: '' });
 
-/** A pad that shows a length already taped, to correct it. `inches` to the nearest 1/64 or 0.1 mm. */
-export function padWith(inches: number, unit: PadUnit, feet = false): PadState {
-  if (unit === 'mm') return { ...emptyPad('mm'), mm: String(Math.round(inches * 254) / 10) };
-  const split = splitLength(inches, '1/64', { feet });
+/**
+ * A pad that shows a length already taped, to correct it, in the unit it was typed in.
+ *
+ * @param text - as stored: `8' 4 3/16"`, `100.1875`, `2545 mm`; what is no length leaves the pad empty
+ */
+export function padWith(text: string): PadState {
+  const mm = /^\s*(\d+(?:\.\d+)?)\s*mm\s*$/.exec(text)?.[1];
+  if (mm !== undefined) return { ...emptyPad('mm'), mm };
+  const parsed = parseLength(text);
+  if (!parsed.ok) return emptyPad('in');
+  const split = splitLength(parsed.value, '1/64', { feet: /['f]/.test(text) });
+  // What lies between two 64ths was typed as a decimal.
+  if ((parsed.value * 64) % 1 !== 0) return { ...emptyPad('in'), inches: { ...EMPTY, whole: String(parsed.value) } };
   const fraction = split.numerator
     ? { numerator: String(split.numerator), denominator: String(split.denominator), slot: 'ruler' as const }
     : {};
-  const entry = { ...EMPTY, feet: split.feet === undefined ? null : String(split.feet), whole: String(split.whole) };
-  return { ...emptyPad('in'), inches: { ...entry, ...fraction } };
+  const whole = split.whole === 0 && (split.numerator || split.feet) ? '' : String(split.whole);
+  const feet = split.feet === undefined ? null : String(split.feet);
+  return { ...emptyPad('in'), inches: { ...EMPTY, feet, whole, ...fraction } };
 }
 
 /** The pad after one key. A key that makes no sense where it is changes nothing. */

@@ -51,7 +51,7 @@ function subscribe(listener: () => void): () => void {
 
 function read(key: string): string | null {
   try {
-    return window.localStorage.getItem(key) ?? memory.get(key) ?? null;
+    return memory.get(key) ?? window.localStorage.getItem(key);
   } catch {
     // Storage is blocked in this browser: the page's own memory stands in.
     return memory.get(key) ?? null;
@@ -59,11 +59,12 @@ function read(key: string): string | null {
 }
 
 function write(key: string, value: string): void {
-  memory.set(key, value);
   try {
     window.localStorage.setItem(key, value);
+    memory.delete(key);
   } catch {
     // Full or blocked: the setting still holds while the page is open.
+    memory.set(key, value);
   }
   for (const listener of listeners) listener();
 }
