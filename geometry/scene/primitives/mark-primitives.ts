@@ -49,6 +49,7 @@ export function markPrimitives(mark: Mark, view: View): Primitive[] {
       return pen.arrow();
     case 'handle':
       return [
+        ...pen.stem(),
         { kind: 'path', path: pen.circle(0.5), fill: mark.ink, line: pen.line(0.08, 'card') },
         ...pen.icon('slide', 'onchalk', 0.6),
       ];
@@ -112,6 +113,13 @@ class MarkPen {
     return textPrimitives(place, [{ text: mark.text }], style, view);
   }
 
+  /** From the handle along its turn, back to what it moves. */
+  stem(): Primitive[] {
+    if (this.mark.turn === undefined) return [];
+    const path = this.through([[0, 0], [1.13, 0]], false); // prettier-ignore
+    return [{ kind: 'path', path, line: { paint: this.mark.ink, width: 3.6 * this.view.pixel } }];
+  }
+
   arrow(): Primitive[] {
     const head = Math.min(8 / this.mark.size, 0.25);
     const path = [
@@ -119,7 +127,11 @@ class MarkPen {
       ...this.through([[-0.5 + head * 1.4, -head], [-0.5, 0], [-0.5 + head * 1.4, head]], false), // prettier-ignore
       ...this.through([[0.5 - head * 1.4, -head], [0.5, 0], [0.5 - head * 1.4, head]], false), // prettier-ignore
     ];
-    return [{ kind: 'path', path, line: { paint: this.mark.ink, width: 1.8 * this.view.pixel } }];
+    // Wood may be as dark as ink, so the arrow has a casing.
+    return [
+      { kind: 'path', path, line: { paint: 'card', width: 4.6 * this.view.pixel } },
+      { kind: 'path', path, line: { paint: this.mark.ink, width: 1.8 * this.view.pixel } },
+    ];
   }
 
   /** An icon of the 24 grid, as large as `share` of the mark. */

@@ -9,6 +9,8 @@ export interface WoodLook {
   readonly density: number;
   readonly figureWidth: number;
   readonly roundFigure: boolean;
+  /** Black lines on it need a casing. */
+  readonly dark: boolean;
   /** Strokes of one mark; `roll` in 0..1 varies it. */
   readonly figure: (roll: number) => readonly (readonly Point[])[];
 }
@@ -70,9 +72,16 @@ function toLook(recipe: Recipe): WoodLook {
     density: recipe.density,
     figureWidth: recipe.width,
     roundFigure: recipe.round ?? false,
+    dark: brightness(base) < DARK,
     figure: recipe.figure,
   };
 }
+
+/** Mean of the channels, 0 to 255; black walnut has 86. */
+const DARK = 110;
+
+const brightness = (hex: string): number =>
+  [1, 3, 5].reduce((sum, i) => sum + parseInt(hex.slice(i, i + 2), 16), 0) / 3;
 
 /** A colour `share` of the way from one to another. */
 function mix(from: string, to: string, share: number): string {

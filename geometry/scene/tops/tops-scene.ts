@@ -1,0 +1,94 @@
+import type { Layout } from '../../core/layout';
+import { boundingBox } from '../../core/polygon';
+import { along } from '../../core/vector';
+import type { Plan } from '../../plan/types';
+import { solvedRoom } from '../../top/solved-room';
+import { wallFrames } from '../../top/wall-frame';
+import type { DrawItem, Scene } from '../display-list';
+import { drawBase } from '../room/draw-bases';
+import { text } from '../room/scene-styles';
+import { outward, wallBodies, WALL_THICKNESS } from '../room/wall-bodies';
+import { drawConnectors, drawJoint, drawJointSize, drawSeam, drawSeamHandle, seamName } from './draw-joints';
+import { drawCutout, drawLetter, drawOutline, drawSizes, drawWood } from './draw-pieces';
+
+/** What is shown besides the tops themselves; all of it when left out but sizes and hardware. */
+export interface TopsLayers {
+  readonly grain: boolean;
+  readonly sizes: boolean;
+  readonly hardware: boolean;
+  readonly walls: boolean;
+}
+
+export interface TopsSceneOptions {
+  readonly layers?: Partial<TopsLayers>;
+  /** `piece Q`, `seam R-S`, `cutout c1`. */
+  readonly selected?: string | null;
+  /** Seams can be slid: each has its handle and a blade with what stays visible. */
+  readonly handles?: boolean;
+}
+
+const LAYERS: TopsLayers = { grain: true, sizes: false, hardware: false, walls: true };
+/** Appliances that stand between tops; all others are under them. */
+const SEEN = new Set(['range', 'opening']);
+
+/** The tops in the room: wood with its grain, joints, seams, cutouts, letters. Room axes, inches. */
+export function topsScene(plan: Plan, layout: Layout, options: TopsSceneOptions = {}): Scene {
+  const layers = { ...LAYERS, ...options.layers };
+  const chosen = (name: string) => options.selected === name;
+  const { pieces, cutouts, joints, seams } = plan;
+  const items: DrawItem[] = [
+    ...(layers.walls ? surroundings(plan, layout) : []),
+    ...pieces.map((piece) => drawWood(piece, layout, layers.grain)),
+    ...cutouts.flatMap((cutout) => drawCutout(cutout, layout, chosen(`cutout ${cutout.id}`))),
+    ...pieces.map((piece) => drawOutline(piece, layout, chosen(`piece ${piece.letter}`))),
+    ...joints.map((joint) => drawJoint(joint, layout)),
+    ...seams.flatMap((seam) => drawSeam(seam, cutouts)),
+    ...(layers.hardware ? joints.flatMap(drawConnectors) : []),
+    ...pieces.flatMap((piece) => drawLetter(piece, layers.grain && !layers.sizes)),
+    ...(layers.sizes ? pieces.flatMap((piece) => drawSizes(piece, layout)) : []),
+    ...(layers.sizes ? joints.flatMap((joint) => drawJointSize(joint, layout)) : []),
+    ...seams.flatMap((seam) =>
+      options.handles || chosen(`seam ${seamName(seam)}`) ? drawSeamHandle(seam, layout) : [],
+    ),
+  ];
+  const letters = pieces.map((piece) => piece.letter).join(', ');
+  return {
+    bounds: boundsOf(plan, layout, layers),
+    items,
+    title: 'Tops',
+    alt: pieces.length > 0 ? `Tops from above: pieces ${letters}.` : 'No tops yet.',
+  };
+}
+
+function boundsOf(plan: Plan, layout: Layout, layers: TopsLayers): Scene['bounds'] {
+  const points = plan.pieces.flatMap((piece) => [...piece.outline]);
+  if (layers.walls && plan.room) {
+    const walls = wallFrames(solvedRoom(plan.room, layout.room));
+    points.push(...wallBodies(walls).flatMap(({ outline }) => [...outline]));
+  }
+  return points.length > 0 ? boundingBox(points) : { minX: 0, minY: 0, maxX: 1, maxY: 1 };
+}
+
+/** Walls as bodies with their letters, and what stands between the tops. */
+function surroundings(plan: Plan, layout: Layout): DrawItem[] {
+  if (!plan.room) return [];
+  const walls = wallFrames(solvedRoom(plan.room, layout.room));
+  const bodies = wallBodies(walls).flatMap(({ wall, outline }): DrawItem[] => [
+    { layer: 'walls', id: wall.id, kind: 'polygon', outline, fill: 'wall' },
+    {
+      layer: 'walls',
+      id: wall.id,
+      kind: 'text',
+      at: along(along(wall.start, wall.along, wall.length / 2), outward(wall), WALL_THICKNESS / 2),
+      text: wall.label,
+      style: { ...text.caption, size: 19 },
+      anchor: 'middle',
+      middle: true,
+    },
+  ]);
+  const standing = layout.bases.flatMap((base) => {
+    const wall = walls.byId.get(base.wall);
+    return wall && SEEN.has(base.kind) ? drawBase(base, wall) : [];
+  });
+  return [...bodies, ...standing];
+}
