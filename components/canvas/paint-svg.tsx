@@ -12,7 +12,7 @@ import type {
 } from '@/geometry/scene/primitives/primitive';
 import { toPrimitives } from '@/geometry/scene/primitives/to-primitives';
 import { fontOf, type FontName } from '@/geometry/scene/text-width';
-import { color, font, fontStack } from '@/components/ui/tokens';
+import { color, font, fontStack, palettes } from '@/components/ui/tokens';
 
 import { pathData } from './path-data';
 
@@ -36,7 +36,7 @@ export interface PaintSvgProps {
   readonly scene: Scene;
   /** Screen px for an inch of the drawing. */
   readonly pxPerInch: number;
-  /** What each ink looks like; the theme's colours when left out. */
+  /** What each ink looks like; the theme's colours when left out, black on white for a page of paper. */
   readonly colors?: InkColors;
 }
 
@@ -47,13 +47,14 @@ export interface PaintSvgProps {
  *
  * An item is painted again only when it is another object or the zoom changes: see `useStableScene`.
  */
-export const PaintSvg = memo(function PaintSvg({ scene, pxPerInch, colors = color }: PaintSvgProps) {
+export const PaintSvg = memo(function PaintSvg({ scene, pxPerInch, colors }: PaintSvgProps) {
   const paper = scene.paper?.height;
+  const inks = colors ?? (paper === undefined ? color : palettes.print);
   const view = useMemo(() => viewOf(pxPerInch, paper), [pxPerInch, paper]);
   return (
     <G>
       {keyed(scene.items).map(([key, item]) => (
-        <DrawnItem key={key} item={item} view={view} colors={colors} />
+        <DrawnItem key={key} item={item} view={view} colors={inks} />
       ))}
     </G>
   );
