@@ -35,6 +35,23 @@ export async function findMember(trx: Knex.Transaction, personId: string): Promi
   return row ? toMember(row) : null;
 }
 
+/** Locks the crew until the transaction ends, so that two changes cannot leave the shop without an owner. */
+export async function lockCrew(trx: Knex.Transaction): Promise<void> {
+  await trx('memberships').forUpdate().select('person_id');
+}
+
+export async function setRole(trx: Knex.Transaction, personId: string, role: Role): Promise<void> {
+  await trx('memberships').where({ person_id: personId }).update({ role });
+}
+
+/** Takes a person out of the crew and ends their sign-ins in this shop. */
+export async function removeFromCrew(trx: Knex.Transaction, personId: string): Promise<void> {
+  await trx('memberships')
+    .where({ person_id: personId })
+    .update({ left_at: trx.fn.now(3) });
+  await trx.raw('select close_sessions_of(?)', [personId]);
+}
+
 export async function renamePerson(trx: Knex.Transaction, personId: string, name: string): Promise<void> {
   await trx('people').where({ id: personId }).update({ name });
 }

@@ -26,6 +26,29 @@ export const listCrew = contract({
   problems: [],
 });
 
+const memberParams = z.strictObject({ personId: uuid });
+
+export const changeRole = contract({
+  method: 'patch',
+  path: '/crew/:personId',
+  summary: 'Give somebody of the crew another role.',
+  may: 'crew.edit',
+  params: memberParams,
+  body: z.strictObject({ role: z.enum(ROLES) }),
+  response: crewMemberSchema,
+  problems: ['not_found', 'last_owner'],
+});
+
+export const removeMember = contract({
+  method: 'delete',
+  path: '/crew/:personId',
+  summary: 'Take somebody out of the crew and end their sign-ins here; what they did stays theirs.',
+  may: 'crew.edit',
+  params: memberParams,
+  response: null,
+  problems: ['not_found', 'last_owner'],
+});
+
 export const invitationSchema = z.strictObject({
   id: uuid,
   email: z.string(),

@@ -16,6 +16,7 @@ export const PROBLEMS = {
   already_decided: { status: 409, title: 'The revision is already decided on' },
   code_taken: { status: 409, title: 'The name is taken' },
   already_in_crew: { status: 409, title: 'Already in the crew' },
+  last_owner: { status: 409, title: 'The shop needs an owner' },
   link_ended: { status: 410, title: 'The link has ended' },
   body_too_large: { status: 413, title: 'Too large' },
   media_type_refused: { status: 415, title: 'Only JSON is taken' },

@@ -67,11 +67,11 @@ describe('migrations', () => {
 
   it('run down and up one at a time', async () => {
     const before = await describeSchema(db);
-    const names = await db('knex_migrations').pluck<string[]>('name');
+    const { length } = await db('knex_migrations').pluck<string[]>('name');
 
-    for (const _name of names) await db.migrate.down(MIGRATIONS);
+    for (let n = 0; n < length; n++) await db.migrate.down(MIGRATIONS);
     expect(await db('knex_migrations').count('* as n').first()).toEqual({ n: 0 });
-    for (const _name of names) await db.migrate.up(MIGRATIONS);
+    for (let n = 0; n < length; n++) await db.migrate.up(MIGRATIONS);
 
     expect(await describeSchema(db)).toEqual(before);
   });
@@ -113,9 +113,8 @@ describe('migrations', () => {
 describe('migrations run by an owner who is no superuser', () => {
   it('give the same rows to a request, and the seed and the sign-in functions work', async () => {
     const name = `owner_${randomUUID().replaceAll('-', '')}`;
-    await db.raw('create role ?? login createrole password ?', [name, 'owner of one database']).catch(async () => {
-      await db.raw(`create role "${name}" login createrole password 'owner of one database'`);
-    });
+    // A role's password cannot be a bound value.
+    await db.raw(`create role ?? login createrole password 'owner of one database'`, [name]);
     const other = await freshDatabase();
     const ownerUrl = new URL(other.url);
     ownerUrl.username = name;
