@@ -18,6 +18,9 @@ export function convexHull(points: readonly Point[]): Polygon {
 
 const turn = (a: Point, b: Point, c: Point): number => (b[0] - a[0]) * (c[1] - a[1]) - (b[1] - a[1]) * (c[0] - a[0]);
 
+/** Inches; an edge this short has no direction to speak of. */
+const SAME_POINT = 1e-9;
+
 /** The narrowest gap a shape passes flat, and how long it is square to that. Inches. */
 export interface LeastWidth {
   readonly width: number;
@@ -38,12 +41,13 @@ export function leastWidth(points: readonly Point[]): LeastWidth {
     const a = hull[i]!;
     const b = hull[(i + 1) % n]!;
     const size = Math.hypot(b[0] - a[0], b[1] - a[1]);
+    if (size < SAME_POINT) continue;
     const away = (k: number) => Math.abs(turn(a, b, hull[k % n]!)) / size;
     while (away(far + 1) > away(far)) far++;
     const width = away(far);
     if (width < best.width) best = { width, length: extentAlong(hull, a, b) };
   }
-  return best;
+  return best.width === Infinity ? { width: 0, length: 0 } : best;
 }
 
 function extentAlong(points: readonly Point[], [ax, ay]: Point, [bx, by]: Point): number {

@@ -59,7 +59,7 @@ const topName = (deck: Deck): string => `${deck.kind === 'island' ? 'Island' : '
 function overlapProblem(a: Deck, b: Deck, deep: number, step: Step): LayProblem {
   return {
     code: 'tops-overlap',
-    message: `${topName(a)} and ${topName(b).toLowerCase()} lie on each other by ${inches(Math.max(deep, 1 / 16), step)}.`,
+    message: `${topName(a)} and ${b.kind} ${b.id} lie on each other by ${inches(Math.max(deep, 1 / 16), step)}.`,
     at: { run: a.id, joint: `${a.id}-${b.id}` },
   };
 }

@@ -18,6 +18,9 @@ export interface LaidRuns {
   readonly walls: RoomWalls;
 }
 
+/** A back edge that stands this far past the last wall is seen, inches: more than an overhang. */
+const PAST_WALL = 3;
+
 /** Slack of the tape before a run counts as longer than its wall, inches. */
 const WALL_SLACK = 1 / 16;
 
@@ -167,8 +170,7 @@ function runDeck(run: Run, own: RunLines, left: JointEnd, right: JointEnd, joint
   const [a, b] = [deckEnd(run.left, left, 'left'), deckEnd(run.right, right, 'right')];
   const [first, last] = sign === 1 ? [a, b] : [b, a];
   const pastChainEnd =
-    (wall.next === null && right.back > wall.length + WALL_SLACK) ||
-    (wall.previous === null && left.back < -WALL_SLACK);
+    (wall.next === null && right.back > wall.length + PAST_WALL) || (wall.previous === null && left.back < -PAST_WALL);
   return {
     id: run.id,
     kind: 'run',
