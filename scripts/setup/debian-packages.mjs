@@ -45,7 +45,7 @@ export async function ensureDebianPackages(packages, machine = THIS_MACHINE) {
   const still = missing.filter((candidate) => !candidate.present());
   if (still.length > 0) {
     throw new SetupProblem(
-      `${list(still)} is still not found after installing it: check that this is Debian or a relative of it.`,
+      `Installing ${list(still)} did not bring what is needed: check that this is Debian or a relative of it.`,
     );
   }
 }
@@ -109,7 +109,7 @@ function mayNotInstall(missing) {
   const names = missing.map(({ name }) => name).join(' ');
   const otherWay = missing.map(({ insteadOf }) => insteadOf).find(Boolean);
   return (
-    `${list(missing)} is not installed and this user may not install it: ` +
+    `This needs ${list(missing)} from Debian's packages, and this user may not install: ` +
     `run "sudo apt-get install -y --no-install-recommends ${names}"${otherWay ? `, or ${otherWay}` : ''}.`
   );
 }

@@ -79,7 +79,7 @@ describe('ensureDebianPackages', () => {
       machine(1000, programs, answers),
     );
     await expect(wish).rejects.toThrow(
-      'postgresql is not installed and this user may not install it: run "sudo apt-get install -y ' +
+      'This needs postgresql from Debian\'s packages, and this user may not install: run "sudo apt-get install -y ' +
         '--no-install-recommends postgresql", or set DATABASE_URL to a PostgreSQL server you have.',
     );
   });
