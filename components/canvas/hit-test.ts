@@ -12,6 +12,8 @@ export type HitShape =
   | {
       readonly kind: 'box';
       readonly at: Point;
+      /** px to the right and up from `at`. */
+      readonly shift?: readonly [number, number];
       readonly width: number;
       readonly height: number;
       readonly turn?: number;
@@ -109,7 +111,9 @@ function areaDistance(outline: readonly ScreenPoint[], at: ScreenPoint): number 
 }
 
 function boxDistance(box: HitShape & { readonly kind: 'box' }, view: Viewport, at: ScreenPoint): number {
-  const [x, y] = toScreen(view, box.at);
+  const [placeX, placeY] = toScreen(view, box.at);
+  const x = placeX + (box.shift?.[0] ?? 0);
+  const y = placeY - (box.shift?.[1] ?? 0);
   const turn = box.turn ?? 0;
   // The screen's y points down, so a counter-clockwise turn of the box is undone by turning the touch the same way.
   const dx = (at[0] - x) * Math.cos(turn) - (at[1] - y) * Math.sin(turn);

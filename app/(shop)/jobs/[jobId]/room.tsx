@@ -1,0 +1,5 @@
+import { RoomScreen } from '@/components/room/RoomScreen';
+
+export default function Room() {
+  return <RoomScreen />;
+}
