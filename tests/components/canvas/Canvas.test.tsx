@@ -1,5 +1,6 @@
 import { act, fireEvent, render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
+import { useEffect } from 'react';
 import { Circle } from 'react-native-svg';
 
 import { Canvas, type CanvasProps, type CanvasTarget } from '@/components/canvas/Canvas';
@@ -16,9 +17,12 @@ const TARGETS: readonly CanvasTarget[] = [
 let canvas: CanvasView;
 
 function Drawing(props: Omit<CanvasProps, 'canvas' | 'children' | 'label' | 'targets'>) {
-  canvas = useViewport(BOUNDS);
+  const view = useViewport(BOUNDS);
+  useEffect(() => {
+    canvas = view;
+  });
   return (
-    <Canvas label="Room" canvas={canvas} targets={TARGETS} {...props}>
+    <Canvas label="Room" canvas={view} targets={TARGETS} {...props}>
       {(pxPerInch) => <Circle testID="painted" r={pxPerInch} />}
     </Canvas>
   );
