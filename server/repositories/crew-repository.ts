@@ -37,7 +37,7 @@ export async function findMember(trx: Knex.Transaction, personId: string): Promi
 
 /** Locks the crew until the transaction ends, so that two changes cannot leave the shop without an owner. */
 export async function lockCrew(trx: Knex.Transaction): Promise<void> {
-  await trx('memberships').forUpdate().select('person_id');
+  await trx('memberships').forNoKeyUpdate().select('person_id');
 }
 
 export async function setRole(trx: Knex.Transaction, personId: string, role: Role): Promise<void> {

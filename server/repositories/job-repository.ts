@@ -84,7 +84,7 @@ export async function findJob(trx: Knex.Transaction, jobId: string): Promise<Job
 /** Locks the job until the transaction ends; null when the shop has none of this id. */
 export async function lockJob(trx: Knex.Transaction, jobId: string): Promise<{ id: string; stage: Stage } | null> {
   return (
-    (await trx('jobs').where({ id: jobId }).forUpdate().first<{ id: string; stage: Stage }>('id', 'stage')) ?? null
+    (await trx('jobs').where({ id: jobId }).forNoKeyUpdate().first<{ id: string; stage: Stage }>('id', 'stage')) ?? null
   );
 }
 

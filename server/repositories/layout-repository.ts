@@ -45,9 +45,12 @@ export async function findLayoutOfJob(trx: Knex.Transaction, jobId: string): Pro
   return (await trx('layouts').where({ job_id: jobId }).first<StoredLayout>(COLUMNS)) ?? null;
 }
 
-/** Locks the layout, so that writers queue and each one sees what the one before left. */
+/**
+ * Locks the layout, so that writers queue and each one sees what the one before left. 'No key': rows that refer to it may
+ * still be written, or two writers who refer to it already would wait for each other.
+ */
 export async function lockLayout(trx: Knex.Transaction, layoutId: string): Promise<StoredLayout | null> {
-  return (await trx('layouts').where({ id: layoutId }).forUpdate().first<StoredLayout>(COLUMNS)) ?? null;
+  return (await trx('layouts').where({ id: layoutId }).forNoKeyUpdate().first<StoredLayout>(COLUMNS)) ?? null;
 }
 
 /** Sequence numbers of those of these edits that are in the log already, by edit id. */

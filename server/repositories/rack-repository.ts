@@ -65,12 +65,11 @@ export async function insertRackPiece(
 
 /** Locks the shop's rack codes until the transaction ends and gives the first one that was never used. */
 export async function takeRackCode(trx: Knex.Transaction, shopId: string): Promise<string> {
-  await trx('shops').where({ id: shopId }).forUpdate().first('id');
+  await trx('shops').where({ id: shopId }).forNoKeyUpdate().first('id');
   const row = await trx('rack_pieces')
     .whereRaw("code ~ '^R[0-9]{1,9}$'")
-    .max<{ highest: number | null }>(trx.raw('substr(code, 2)::int as highest'))
-    .first();
-  return `R${((row as { highest: number | null } | undefined)?.highest ?? 0) + 1}`;
+    .first<{ highest: number | null }>(trx.raw('max(substr(code, 2)::int) as highest'));
+  return `R${(row?.highest ?? 0) + 1}`;
 }
 
 function pieces(trx: Knex.Transaction) {

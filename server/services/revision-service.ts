@@ -68,10 +68,10 @@ export class RevisionService {
    */
   freeze(actor: Actor, jobId: string, seq: number, nest: NestPlan | null, note: string): Promise<RevisionSummary> {
     return inShopOnce(this.db, actor, 'revision.freeze', async (trx) => {
-      if (!(await lockJob(trx, jobId))) throw noSuchJob();
+      // Layout before job, as whoever edits does: the other way round two requests could wait for each other for ever.
       const found = await findLayoutOfJob(trx, jobId);
       const layout = found && (await lockLayout(trx, found.id));
-      if (!layout) throw noSuchJob();
+      if (!layout || !(await lockJob(trx, jobId))) throw noSuchJob();
       if (layout.seq !== seq) {
         throw new ProblemError('layout_moved_on', `The layout has ${layout.seq} edits by now, and you saw ${seq}.`);
       }
