@@ -3,7 +3,7 @@ import { cutoutName, type Rule } from './facts';
 import { finding } from './finding';
 import { MAKER } from './sources';
 import { stripWidths } from './strip-widths';
-import { sizePair } from './words';
+import { capital, sizePair } from './words';
 
 export const COOKTOP_CLEAR = constant(
   'Wood between a cooktop cutout and an edge',
@@ -25,7 +25,7 @@ export const cooktopNearEdge: Rule = (facts) =>
       finding({
         code: 'cooktop-near-edge',
         severity: 'warn',
-        text: `${cutoutName(cutout)} is ${is} from the ${side} of the top; keep ${limit} unless its maker allows less.`,
+        text: `${capital(cutoutName(facts, cutout))} is ${is} from the ${side} of the top; keep ${limit} unless its maker allows less.`,
         action: "Check the maker's clearances before cutting, and move it if they ask for more.",
         at: { cutout: cutout.id, pieces: cutout.letters },
         source: `${sourceText(COOKTOP_CLEAR)}; ${MAKER}`,

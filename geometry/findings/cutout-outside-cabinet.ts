@@ -1,7 +1,8 @@
 import { baseOfCutout } from './cutout-base';
-import { size, type Rule } from './facts';
+import { cutoutName, size, type Rule } from './facts';
 import { finding } from './finding';
 import { PRACTICE } from './sources';
+import { capital } from './words';
 
 /** A sink or cooktop that reaches past the cabinet under it. */
 export const cutoutOutsideCabinet: Rule = (facts) =>
@@ -13,7 +14,7 @@ export const cutoutOutsideCabinet: Rule = (facts) =>
       finding({
         code: 'cutout-outside-cabinet',
         severity: 'warn',
-        text: `The ${cutout.label ?? cutout.kind} cutout reaches ${size(facts, over.past)} past the ${over.base.label ?? over.base.kind} under it; nothing of it may stand past its sides.`,
+        text: `${capital(cutoutName(facts, cutout))} reaches ${size(facts, over.past)} past the ${over.base.label ?? over.base.kind} under it; nothing of it may stand past its sides.`,
         action: 'Centre it on the cabinet, or check that the cabinet sides can be cut.',
         at: { cutout: cutout.id, base: over.base.id },
         source: PRACTICE,

@@ -1,4 +1,4 @@
-import { type Rule } from './facts';
+import { cutoutName, type Rule } from './facts';
 import { finding } from './finding';
 import { PRACTICE } from './sources';
 import { weakens } from './strip-widths';
@@ -20,7 +20,7 @@ export const cutoutsTooClose: Rule = (facts) => {
         finding({
           code: 'cutouts-too-close',
           severity: 'warn',
-          text: `Between the ${a.label ?? a.kind} and the ${b.label ?? b.kind} only ${is} of wood is left; ${limit} is the least.`,
+          text: `Between ${cutoutName(facts, a)} and ${cutoutName(facts, b)} only ${is} of wood is left; ${limit} is the least.`,
           action: 'Move one of them, or make it one cutout.',
           at: { cutout: a.id, detail: b.id },
           source: PRACTICE,

@@ -1,7 +1,7 @@
-import type { Base, Run } from '../core/layout';
+import type { Base, CutoutKind, Run } from '../core/layout';
 import { wallLabel } from '../core/layout';
 import { solvedRoom } from '../top/solved-room';
-import type { LaidRun, PlacedCutout, TopJoint } from '../top/types';
+import type { LaidRun, TopJoint } from '../top/types';
 import type { WallFrame } from '../top/wall-frame';
 import { wallFrames } from '../top/wall-frame';
 import type { Section } from '../wood/sections';
@@ -71,9 +71,22 @@ export function runName(facts: Facts, id: string): string {
 export const jointName = (joint: Pick<TopJoint, 'letters'>): string =>
   `Joint ${joint.letters[0]} to ${joint.letters[1]}`;
 
-/** "The sink", or its label. */
-export const cutoutName = (cutout: Pick<PlacedCutout, 'kind' | 'label'>): string =>
-  cutout.label || `The ${cutout.kind === 'free' ? 'cutout' : cutout.kind === 'tap' ? 'tap hole' : cutout.kind}`;
+const CUTOUT_WORDS: Readonly<Record<CutoutKind, string>> = {
+  sink: 'sink',
+  cooktop: 'cooktop',
+  tap: 'tap hole',
+  notch: 'notch',
+  free: 'cutout',
+};
+
+/** What was typed for a cutout, or its kind: "the sink". */
+export function cutoutName(
+  facts: Pick<Facts, 'layout'>,
+  cutout: { readonly id: string; readonly kind: CutoutKind },
+): string {
+  const typed = facts.layout.cutouts.find((c) => c.id === cutout.id)?.label;
+  return typed || `the ${CUTOUT_WORDS[cutout.kind]}`;
+}
 
 /** Bases along a run's wall; none for an island. */
 export const basesUnder = (facts: Facts, run: LaidRun): readonly Base[] => facts.basesByWall.get(run.wall) ?? [];

@@ -3,7 +3,7 @@ import { finding } from './finding';
 import { PRACTICE } from './sources';
 import { stripWidths, weakens } from './strip-widths';
 import type { Finding } from './types';
-import { sizePair } from './words';
+import { capital, sizePair } from './words';
 
 /** A strip of wood beside a cutout that is too narrow, or a cutout that reaches past the top. */
 export const narrowStrip: Rule = (facts) =>
@@ -33,7 +33,7 @@ function strip(
       ? finding({
           code: 'cutout-off-top',
           severity: 'stop',
-          text: `${cutoutName(cutout)} reaches the ${side} of the top: no wood is left there, and ${limit} is the least.`,
+          text: `${capital(cutoutName(facts, cutout))} reaches the ${side} of the top: no wood is left there, and ${limit} is the least.`,
           action: 'Move it, or take a smaller one.',
           at,
           source: PRACTICE,
@@ -41,7 +41,7 @@ function strip(
       : finding({
           code: 'narrow-strip',
           severity: 'warn',
-          text: `${cutoutName(cutout)} leaves a strip of ${is} at the ${side}; ${limit} is the least.`,
+          text: `${capital(cutoutName(facts, cutout))} leaves a strip of ${is} at the ${side}; ${limit} is the least.`,
           action: 'Move it, make the top deeper, or stiffen the strip from below.',
           at,
           source: PRACTICE,

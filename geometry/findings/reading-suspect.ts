@@ -31,11 +31,15 @@ function shouldRead(
   return corner?.kind === 'angle' ? degrees(value) : size(facts, value);
 }
 
-/** "wall A", "corner A-B", "tie t1" with the walls' labels instead of their ids. */
+/** "wall A", "corner A-B", "the cross from wall A to wall C": labels that a person in the room knows, instead of ids. */
 export function readingName(facts: Facts, observation: string): string {
   if (observation.startsWith('wall ')) return `wall ${wallName(facts, observation.slice(5))}`;
   const corner = facts.fit?.corners.find((c) => `corner ${c.between.join('-')}` === observation);
-  return corner ? `corner ${cornerName(facts, corner.between)}` : observation;
+  if (corner) return `corner ${cornerName(facts, corner.between)}`;
+  const tie = facts.layout.room.ties.find((t) => `tie ${t.id}` === observation);
+  return tie
+    ? `the cross from wall ${wallName(facts, tie.from.wall)} to wall ${wallName(facts, tie.to.wall)}`
+    : observation;
 }
 
 const placeOf = (observation: string) => (observation.startsWith('wall ') ? { wall: observation.slice(5) } : {});

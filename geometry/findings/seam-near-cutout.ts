@@ -1,6 +1,6 @@
 import type { Cutout } from '../core/layout';
 import type { TopSeam } from '../top/types';
-import { type Facts, type Rule } from './facts';
+import { cutoutName, type Facts, type Rule } from './facts';
 import { finding } from './finding';
 import { nearestPlace } from './nearest-place';
 import { PRACTICE } from './sources';
@@ -31,7 +31,7 @@ function nearCutout(
   return finding({
     code: 'seam-near-cutout',
     severity: 'warn',
-    text: `Seam ${seam.letters[0]} to ${seam.letters[1]} is ${is} ${inside ? 'inside' : 'beside'} the ${cutout.label ?? cutout.kind}'s corner; it needs ${limit}.`,
+    text: `Seam ${seam.letters[0]} to ${seam.letters[1]} is ${is} ${inside ? 'inside' : 'beside'} the corner of ${cutoutName(facts, cutout)}; it needs ${limit}.`,
     action: `${inside ? 'Move the seam to the middle of the cutout.' : 'Move the seam into the cutout or further away from it.'}${nearestPlace(facts, seam)}`,
     at: { seam: { on: seam.on, at: seam.at }, cutout: cutout.id },
     source: PRACTICE,

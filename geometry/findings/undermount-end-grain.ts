@@ -1,5 +1,6 @@
 import { cutoutName, type Rule } from './facts';
 import { finding } from './finding';
+import { capital } from './words';
 import { PRACTICE } from './sources';
 
 /** End grain in the water: the two short sides of an undermount or apron sink's cutout. */
@@ -11,7 +12,7 @@ export const undermountEndGrain: Rule = (facts) =>
       finding({
         code: 'undermount-end-grain',
         severity: 'note',
-        text: `${cutoutName(cutout)} leaves 2 end-grain edges in splash water.`,
+        text: `${capital(cutoutName(facts, cutout))} leaves 2 end-grain edges in splash water.`,
         action: 'Round and sand them fine, and seal them until they drink no more.',
         at: { cutout: cutout.id, pieces: cutout.letters },
         source: PRACTICE,

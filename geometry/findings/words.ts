@@ -1,9 +1,6 @@
 import type { Step } from '../core/layout';
 import { formatLength } from '../tape/format-length';
 
-/** Thousandths of an inch, for two sizes that no fraction of the tape tells apart. */
-const decimal = (inches: number): string => `${inches.toFixed(3)} in`;
-
 const withUnit = (text: string): string => (text.endsWith('mm') ? text : `${text} in`);
 
 /** A length in the layout's step; under an inch to the 1/32 (0.5 mm), because what the seasons do is that small. */
@@ -13,17 +10,28 @@ export function sizeText(inches: number, step: Step): string {
   return withUnit(formatLength(inches, Math.abs(inches) < 1 ? fine : step));
 }
 
-/** A size and its limit, written finely enough that the two read differently. */
+/**
+ * A size and its limit, written finely enough that the two read differently: by the layout's step, by the finest of the
+ * tape, and when no fraction tells them apart as a decimal against the limit's own fraction.
+ */
 export function sizePair(inches: number, limit: number, step: Step): readonly [string, string] {
   const metric = step.endsWith('mm');
   const ways: readonly ((x: number) => string)[] = [
     (x) => sizeText(x, step),
     ...(metric ? [] : [(x: number) => withUnit(formatLength(x, '1/64'))]),
-    decimal,
   ];
-  const way = ways.find((write) => write(inches) !== write(limit)) ?? decimal;
-  return [way(inches), way(limit)];
+  const way = ways.find((write) => write(inches) !== write(limit));
+  if (way) return [way(inches), way(limit)];
+  const digits = [3, 4, 5, 6].find((d) => decimal(inches, d, metric) !== decimal(limit, d, metric)) ?? 6;
+  const fraction = !metric && Number.isInteger(limit * 64);
+  return [
+    decimal(inches, digits, metric),
+    fraction ? withUnit(formatLength(limit, '1/64')) : decimal(limit, digits, metric),
+  ];
 }
+
+const decimal = (inches: number, digits: number, metric: boolean): string =>
+  metric ? `${(inches * 25.4).toFixed(digits - 1)} mm` : `${inches.toFixed(digits)} in`;
 
 /** "P", "P and Q", "P, Q and R". */
 export function listText(words: readonly string[]): string {
