@@ -21,9 +21,17 @@ export interface Adjustment extends NetworkStatistics {
 export type NetworkResult =
   | { readonly kind: 'adjusted'; readonly adjustment: Adjustment }
   /** Nothing holds the points in these directions; each gives the shift of every point. */
-  | { readonly kind: 'open'; readonly points: readonly Point[]; readonly directions: readonly (readonly Point[])[] }
-  /** No standstill was found; residuals are those of the best points met. */
-  | { readonly kind: 'diverged'; readonly points: readonly Point[]; readonly standardised: readonly number[] };
+  | {
+      readonly kind: 'open';
+      readonly points: readonly Point[];
+      readonly directions: readonly (readonly Point[])[];
+      /** True when the observations would hold the points elsewhere, but stretch the figure flat here. */
+      readonly flat: boolean;
+      /** (value at these points - observed) / sd */
+      readonly misfits: readonly number[];
+    }
+  /** No standstill was found; misfits are those of the best points met. */
+  | { readonly kind: 'diverged'; readonly points: readonly Point[]; readonly misfits: readonly number[] };
 
 /** Enough for a start 20 degrees off and readings 6 in wrong, which take about 15. */
 const MAX_STEPS = 40;
@@ -102,24 +110,48 @@ function conclude(network: Network, coordinates: Float64Array, system: Linearise
   const points = toPoints(coordinates);
   const factors = factorNormals(system);
   if (!factors || (factors.pivot < DOUBTFUL_PIVOT && !hasFullRank(system))) return open(network, coordinates, system);
-  const statistics = summarise(system, network.observations, factors.covariance(), (quantity: NetworkQuantity) =>
+  const covariance = factors.covariance();
+  const loosest = looseColumn(network, covariance);
+  if (loosest) return open(network, coordinates, system, loosest);
+  const statistics = summarise(system, network.observations, covariance, (quantity: NetworkQuantity) =>
     gradientRow(network, quantityEquation(quantity), coordinates, 1),
   );
   const dof = network.observations.length - network.unknowns;
   return { kind: 'adjusted', adjustment: { ...statistics, points, dof, chi2: system.chi2 } };
 }
 
-function open(network: Network, coordinates: Float64Array, system: Linearised): NetworkResult {
-  const directions = openDirections(system).map((v) => {
+/**
+ * The way in which a coordinate moves that is less certain than the whole network is large. A figure stretched flat is
+ * held by nothing across, though rounding gives it full rank.
+ */
+function looseColumn({ unknowns, size }: Network, covariance: Float64Array): Float64Array | null {
+  let worst = 0;
+  for (let i = 1; i < unknowns; i++) {
+    if (covariance[i * unknowns + i]! > covariance[worst * unknowns + worst]!) worst = i;
+  }
+  if (covariance[worst * unknowns + worst]! <= size * size) return null;
+  const column = covariance.slice(worst * unknowns, (worst + 1) * unknowns);
+  const length = Math.hypot(...column);
+  return column.map((x) => x / length);
+}
+
+function open(network: Network, coordinates: Float64Array, system: Linearised, flat?: Float64Array): NetworkResult {
+  const directions = (flat ? [flat] : openDirections(system)).map((v) => {
     const shift = Float64Array.from(network.unknownOf, (unknown) => (unknown < 0 ? 0 : v[unknown]!));
     return toPoints(shift);
   });
-  return { kind: 'open', points: toPoints(coordinates), directions };
+  return {
+    kind: 'open',
+    points: toPoints(coordinates),
+    directions,
+    flat: flat !== undefined,
+    misfits: [...system.misfits],
+  };
 }
 
 /** No standstill: the points drift in a direction that is hardly held, or the observations cannot be met. */
 function standstillMissed(network: Network, coordinates: Float64Array, system: Linearised): NetworkResult {
   const agrees = system.misfits.every((misfit) => Math.abs(misfit) <= AGREEMENT);
   if (system.chi2 < Infinity && (agrees || !hasFullRank(system))) return open(network, coordinates, system);
-  return { kind: 'diverged', points: toPoints(coordinates), standardised: [...system.misfits] };
+  return { kind: 'diverged', points: toPoints(coordinates), misfits: [...system.misfits] };
 }

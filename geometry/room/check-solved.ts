@@ -7,7 +7,8 @@ import { isUnread, looseWalls } from './undetermined';
 
 /** Chi2 of a room without spare readings is rounding, or else there is no room that meets them. */
 const EXACT = 1e-4;
-const SUSPICIOUS = 3.29;
+/** Misfit from which a reading counts as contradicted, standard deviations. */
+export const SUSPICIOUS = 3.29;
 /** Most readings a contradiction names. */
 const MOST_NAMES = 4;
 

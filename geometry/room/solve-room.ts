@@ -2,7 +2,7 @@ import type { Point } from '../core/point';
 import { cross, subtract } from '../core/vector';
 import { adjustNetwork } from './adjust-network';
 import type { Adjustment, NetworkResult } from './adjust-network';
-import { checkSolved, contradiction } from './check-solved';
+import { checkSolved, contradiction, SUSPICIOUS } from './check-solved';
 import { chiSquareQuantile } from './chi-square';
 import type { NetworkObservation, NetworkPoint } from './network';
 import { assumedReading, roomObservations } from './room-observations';
@@ -26,6 +26,8 @@ const EXACT = 1e-6;
 const NEARLY_STRAIGHT = (25 * Math.PI) / 180;
 /** A later start replaces an earlier one only if it is better by more than rounding. */
 const BETTER = 1e-6;
+/** So many times smaller, chi2 overrules which way a rough sketch has a corner turn. */
+const MUCH_BETTER = 10;
 
 /** Fits the room from the start that serves it best. */
 export function solveRoom(input: RoomInput, frame: RoomFrame, expected: readonly ExpectedAngle[]): SolveResult {
@@ -39,7 +41,11 @@ export function solveRoom(input: RoomInput, frame: RoomFrame, expected: readonly
     const second = fitBest(input, frame, expected, reduced);
     if (second.kind !== 'open') return toResult(input, second, { frame, active: reduced, ignored });
   }
-  return { ok: false, error: undeterminedError(input, frame, first.points, first.directions) };
+  const unmet = first.flat && first.misfits.some((misfit) => Math.abs(misfit) > SUSPICIOUS);
+  const error = unmet
+    ? contradiction(active, first.misfits)
+    : undeterminedError(input, frame, first.points, first.directions);
+  return { ok: false, error };
 }
 
 /** Points to start from, in room axes: the first is the origin, the second lies on +x. */
@@ -114,6 +120,8 @@ function isTurned(points: readonly Point[], frame: RoomFrame, corner: FrameCorne
 function isBetter(score: Score, than: Score): boolean {
   if (score.wrong !== than.wrong) return score.wrong < than.wrong;
   if (score.good !== than.good) return score.good;
+  if (!score.good && score.chi2 * MUCH_BETTER < than.chi2) return true;
+  if (!score.good && than.chi2 * MUCH_BETTER < score.chi2) return false;
   if (score.doubtful !== than.doubtful) return score.doubtful < than.doubtful;
   return score.chi2 < than.chi2 - BETTER * (1 + than.chi2) || (than.chi2 === Infinity && score.chi2 < Infinity);
 }
@@ -127,7 +135,7 @@ function toResult(
   result: Exclude<NetworkResult, { kind: 'open' }>,
   solved: Omit<SolvedRoom, 'adjustment'>,
 ): SolveResult {
-  if (result.kind === 'diverged') return { ok: false, error: contradiction(solved.active, result.standardised) };
+  if (result.kind === 'diverged') return { ok: false, error: contradiction(solved.active, result.misfits) };
   const room = { ...solved, adjustment: result.adjustment };
   const error = checkSolved(input, room);
   return error ? { ok: false, error } : { ok: true, solved: room };

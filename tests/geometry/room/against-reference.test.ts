@@ -17,7 +17,7 @@ const SD_SHARE = 0.03;
 const MODES = ['exact', 'noisy', 'ties only', 'angles only', 'assumed corners', 'slipped'] as const;
 type Mode = (typeof MODES)[number];
 
-const ROOMS_PER_CASE = 6;
+const ROOMS_PER_CASE = 4;
 
 function diagonals(room: TrueRoom): (readonly [number, number])[] {
   const count = room.points.length;
