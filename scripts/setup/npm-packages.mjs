@@ -1,12 +1,14 @@
 // @ts-check
 import { createHash } from 'node:crypto';
-import { existsSync, readFileSync, writeFileSync } from 'node:fs';
+import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 
 import { run } from './children.mjs';
 import { diskFull, saysDiskFull, SetupProblem } from './problem.mjs';
 import { step } from './steps.mjs';
 
+/** npm's own list of what it has put into node_modules. */
+const RECORD = 'node_modules/.package-lock.json';
 const STAMP = 'node_modules/.offsquare-lock';
 
 /**
@@ -42,7 +44,7 @@ function lockHash(root) {
  * @param {string} root
  */
 export function installedByLock(root) {
-  const record = path.join(root, 'node_modules/.package-lock.json');
+  const record = path.join(root, RECORD);
   if (!existsSync(record)) return false;
   const wanted = packagesOf(path.join(root, 'package-lock.json'));
   const present = packagesOf(record);
@@ -65,8 +67,12 @@ async function install(root) {
   const script = process.env.npm_execpath;
   const [command, first] = script ? [process.execPath, [script]] : ['npm', []];
   const { code, output } = await run(command, [...first, 'ci', '--no-audit', '--no-fund'], { cwd: root });
-  if (code === 0) return;
-  if (saysDiskFull(output)) throw diskFull(root);
+  // npm only warns of files that it could not write for want of space, and calls that a success.
+  const full = saysDiskFull(output);
+  if (code === 0 && !full) return;
+  // What it says it has installed is not to be believed at the next start.
+  rmSync(path.join(root, RECORD), { force: true });
+  if (full) throw diskFull(root);
   if (/EACCES|EPERM/.test(output)) {
     throw new SetupProblem(
       `npm may not write to ${root}: give this user the right to write there, or use a checkout of your own.`,
