@@ -34,6 +34,10 @@ const TRIANGLE = 17;
 const DISC = 38;
 const SMALL_DISC = 25;
 
+/** Shares of a cut's line where its number may stand, the best first. */
+const CROSSCUT_SPOTS = [0.5, 0.15, 0.85, 0.3, 0.7, 0.4, 0.6, 0.08, 0.92];
+const RIP_SPOTS = Array.from({ length: 40 }, (_, i) => 0.06 + (i * 0.9) / 40);
+
 /** The slab on the page: pieces by face, cuts with their numbers, marks on both edges. */
 export class SheetSlab {
   private readonly taken = new Occupancy();
@@ -53,7 +57,10 @@ export class SheetSlab {
     for (const offcut of this.slab.offcuts) if (offcut.keep) this.keptOffcut(offcut);
     for (const cut of this.slab.cuts) this.cutLine(cut);
     this.outlineOf(this.rectangle(), OUTLINE);
-    for (const cut of this.slab.cuts) this.cutNumber(cut);
+    // A crosscut in a narrow lane has one place for its number, a rip has many: it goes last.
+    for (const kind of ['crosscut', 'rip']) {
+      for (const cut of this.slab.cuts) if (cut.kind === kind) this.cutNumber(cut);
+    }
     for (const piece of this.slab.pieces) signs.wallEdge(piece);
     this.labels(top, 'top');
     this.labels(bottom, 'bottom');
@@ -139,7 +146,7 @@ export class SheetSlab {
   private cutNumber(cut: NestCrosscut | NestRip): void {
     const [a, b] = this.cutEnds(cut).map((p) => this.px(p)) as [Point, Point];
     const lane = cut.kind === 'rip' ? 0 : Math.abs(b[1] - a[1]);
-    const spots = [0.5, 0.15, 0.85, 0.3, 0.7, 0.4, 0.6, 0.08, 0.92];
+    const spots = cut.kind === 'rip' ? RIP_SPOTS : CROSSCUT_SPOTS;
     const around = (size: number) =>
       spots.map((t): Room => {
         const [x, y] = [a[0] + (b[0] - a[0]) * t, a[1] + (b[1] - a[1]) * t];

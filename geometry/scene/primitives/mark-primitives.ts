@@ -19,6 +19,8 @@ type Mark = Extract<DrawItem, { kind: 'mark' }>;
 /** Share of a disc's width that its letter is high in type. */
 const LETTER = 0.72;
 const NUMBER = 0.66;
+/** px */
+const LEAST_LETTER = 14;
 
 /** A sign of fixed size: letter discs, cut numbers, triangles, arrows, tick boxes. */
 export function markPrimitives(mark: Mark, view: View): Primitive[] {
@@ -102,7 +104,7 @@ class MarkPen {
     const { mark, view } = this;
     if (!mark.text) return [];
     // Two figures or letters have to fit the same disc.
-    const size = mark.size * (mark.text.length > 1 ? share * 0.8 : share);
+    const size = Math.max(mark.size * (mark.text.length > 1 ? share * 0.8 : share), LEAST_LETTER);
     const style: TextStyle = { face: 'label', weight: 'extrabold', size, ink };
     const place = {
       at: mark.at,

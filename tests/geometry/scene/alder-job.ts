@@ -2,6 +2,7 @@ import { DEFAULT_SETTINGS } from '@/geometry/core/settings';
 import type { Layout } from '@/geometry/core/layout';
 import { nest } from '@/geometry/nest/nest';
 import { makePlan } from '@/geometry/plan/make-plan';
+import type { SheetHead } from '@/geometry/scene/paper/sheet-head';
 import type { Plan } from '@/geometry/plan/types';
 import { parseJobFile } from '@/shared/layout/parse-job-file';
 
@@ -95,3 +96,13 @@ export const stripsJob = (): Job =>
       { id: 's2', label: 'filler', length: 22, width: 3.25, thickness: 1.5, count: 15 },
     ],
   });
+
+export const HEAD: SheetHead = {
+  jobNumber: '0142',
+  jobName: 'Scullery at Alder Lane',
+  revision: 2,
+  revisionDate: '2031-05-12',
+  drawnBy: 'Renn',
+  signedBy: 'Sol',
+  draft: false,
+};
