@@ -19,7 +19,7 @@ function openEnds(facts: Facts): readonly Finding[] {
   return facts.tops.pieces.flatMap((piece) =>
     (['left', 'right'] as const).flatMap((side) => {
       const end = piece[side];
-      if (end.kind !== 'open' || end.radius >= CORNER_RADIUS.value) return [];
+      if (piece.kind === 'island' || end.kind !== 'open' || end.radius >= CORNER_RADIUS.value) return [];
       return [
         sharp(facts, `The ${side} end of piece ${piece.letter}`, end.radius, {
           run: piece.on,

@@ -4,6 +4,7 @@ import { speciesOf, SPECIES } from '../wood/species';
 import type { Rule } from './facts';
 import { finding } from './finding';
 import { MOVEMENT_SOURCE } from './sources';
+import { capital } from './words';
 
 /** A wood that is not in the table, or whose movement figures could not be read again. */
 export const speciesUnsure: Rule = ({ layout, movement, tops }) => {
@@ -18,7 +19,7 @@ export const speciesUnsure: Rule = ({ layout, movement, tops }) => {
       finding({
         code: 'species-unknown',
         severity: 'warn',
-        text: `${layout.material.species || 'No wood'} is not in the table; the liveliest wood of it is reckoned with, ${most.key}: ${perPercent}.`,
+        text: `${capital(layout.material.species || 'no wood')} is not in the table; the liveliest wood of it is reckoned with, ${most.key}: ${perPercent}.`,
         action: 'Choose a wood of the table, or the nearest one to it.',
         at: { detail: 'material' },
         source: MOVEMENT_SOURCE,
