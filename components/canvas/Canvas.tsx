@@ -122,6 +122,7 @@ function watchSize(
 }
 
 const styles = StyleSheet.create({
-  canvas: { flex: 1, minHeight: 0, overflow: 'hidden' },
-  still: webStyle({ touchAction: 'none', userSelect: 'none', cursor: 'default' }),
+  canvas: { flex: 1, minHeight: 0 },
+  // Clipped, not hidden: what is hidden still scrolls when the focus comes to it.
+  still: webStyle({ overflow: 'clip', touchAction: 'none', userSelect: 'none', cursor: 'default' }),
 });

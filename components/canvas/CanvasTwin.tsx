@@ -93,7 +93,7 @@ function handleKey(props: CanvasTwinProps, target: CanvasTarget, event: Keyboard
 }
 
 const styles = StyleSheet.create({
-  through: { pointerEvents: 'none', ...webStyle({ overflow: 'hidden' }) },
+  through: { pointerEvents: 'none', ...webStyle({ overflow: 'clip' }) },
   place: { position: 'absolute', width: SIDE, height: SIDE },
   button: { width: SIDE, height: SIDE, borderRadius: 4 },
 });

@@ -201,7 +201,7 @@ const styles = StyleSheet.create({
   hint: { flexShrink: 0 },
   aside: { flexShrink: 0 },
   converted: { flexDirection: 'row', alignItems: 'center', gap: 8 },
-  blade: { paddingTop: 3, paddingRight: 3, paddingBottom: 1 },
+  blade: { marginTop: -3, paddingTop: 3, paddingRight: 3, paddingBottom: 1 },
   refusal: { paddingTop: 8 },
   live: { flexDirection: 'row', alignItems: 'center', gap: 6 },
   caret: { width: 3, height: 30, backgroundColor: '#1A5AA8' },

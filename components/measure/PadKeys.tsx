@@ -61,6 +61,7 @@ export function PadKeys({ unit, nudge, onKey, onNext, next, leftHanded = false }
           <Key
             label="millimeters"
             fn
+            narrow
             pressed={unit === 'mm'}
             onPress={() => onKey({ kind: 'unit', to: unit === 'mm' ? 'in' : 'mm' })}
           >
@@ -132,12 +133,14 @@ const KeyWord = ({ word }: { readonly word: string }) => (
 interface KeyProps {
   readonly label: string;
   readonly fn?: boolean;
+  /** As wide as a digit, so that the columns stand under each other. */
+  readonly narrow?: boolean;
   readonly pressed?: boolean;
   readonly onPress: () => void;
   readonly children: ReactNode;
 }
 
-function Key({ label, fn = false, pressed, onPress, children }: KeyProps) {
+function Key({ label, fn = false, narrow = false, pressed, onPress, children }: KeyProps) {
   return (
     <Press
       onPress={onPress}
@@ -145,7 +148,7 @@ function Key({ label, fn = false, pressed, onPress, children }: KeyProps) {
       aria-label={label}
       aria-pressed={pressed}
       hoverGround={pressed ? undefined : color.chalkT}
-      style={[styles.key, fn ? styles.fn : styles.digit, pressed && styles.pressed]}
+      style={[styles.key, fn ? styles.fn : styles.digit, narrow && styles.narrow, pressed && styles.pressed]}
     >
       {children}
     </Press>
@@ -174,6 +177,7 @@ const styles = StyleSheet.create({
   },
   digit: { backgroundColor: color.paper, flexGrow: 82 },
   fn: { backgroundColor: color.line, flexGrow: 102 },
+  narrow: { flexGrow: 82 },
   pressed: { backgroundColor: color.chalk, borderColor: color.chalk },
   nudge: { flexDirection: 'row', alignItems: 'center', gap: 8 },
   next: { backgroundColor: color.chalk, borderColor: color.chalk, gap: 14, paddingHorizontal: 12 },

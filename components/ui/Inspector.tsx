@@ -9,16 +9,18 @@ export interface InspectorProps {
   /** Stays at the top: a title, tabs. */
   readonly head?: ReactNode;
   readonly children: ReactNode;
+  /** The content reaches from side to side and brings its own gutter: rows of findings. */
+  readonly flush?: boolean;
   /** Stays at the foot: the fit report, a held sign-off. */
   readonly foot?: ReactNode;
 }
 
 /** The right column of wide screens, 372 to 392 px. */
-export function Inspector({ label, head, children, foot }: InspectorProps) {
+export function Inspector({ label, head, children, foot, flush = false }: InspectorProps) {
   return (
     <View role="complementary" aria-label={label} style={styles.column}>
       {head}
-      <ScrollView style={styles.body} contentContainerStyle={styles.content}>
+      <ScrollView style={styles.body} contentContainerStyle={flush ? undefined : styles.content}>
         {children}
       </ScrollView>
       {foot && <View style={styles.foot}>{foot}</View>}

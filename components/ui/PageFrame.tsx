@@ -94,22 +94,20 @@ function JobHeader(props: PageFrameProps & { readonly steps: readonly NavItem[] 
 
 function PlainHeader(props: PageFrameProps & { readonly wide: boolean }) {
   const { back, wide, steps } = props;
+  const tight = !wide && (steps !== undefined || back !== undefined);
   return (
-    <View
-      role="banner"
-      style={[styles.header, wide ? styles.wideGutter : steps || back ? styles.tight : styles.phoneGutter]}
-    >
+    <View role="banner" style={[styles.header, wide ? styles.wideGutter : tight ? styles.tight : styles.phoneGutter]}>
       {back && !wide && (
         <IconButton icon="back" label={back.label} href={back.href} onPress={() => props.onNavigate(back.href)} />
       )}
       {!back && !wide && <Logo size={34} />}
       <View style={styles.names}>
-        <Text kind={!wide && (steps || back) ? 'rowTitle' : 'screenTitle'} level={1}>
+        <Text kind={tight ? 'rowTitle' : 'screenTitle'} level={1}>
           {props.title}
         </Text>
-        {props.subtitle && <Text kind={!wide && (steps || back) ? 'small' : 'second'}>{props.subtitle}</Text>}
+        {props.subtitle && <Text kind={tight ? 'small' : 'second'}>{props.subtitle}</Text>}
       </View>
-      {props.actions && <View style={[styles.actions, !wide && styles.close]}>{props.actions}</View>}
+      {props.actions && <View style={[styles.actions, tight && styles.close]}>{props.actions}</View>}
     </View>
   );
 }
@@ -123,7 +121,7 @@ const styles = StyleSheet.create({
   scrolled: { flexGrow: 1, paddingTop: space.s, paddingBottom: space.xxl },
   phoneGutter: { paddingHorizontal: gutter.phone },
   wideGutter: { paddingHorizontal: gutter.wide },
-  tight: { paddingHorizontal: 4 },
+  tight: { paddingHorizontal: 4, columnGap: space.xs },
   jobHeader: {
     flexDirection: 'row',
     alignItems: 'center',
@@ -143,7 +141,7 @@ const styles = StyleSheet.create({
     flexDirection: 'row',
     flexWrap: 'wrap',
     alignItems: 'center',
-    columnGap: space.xs,
+    columnGap: 10,
     rowGap: space.s,
     paddingVertical: 10,
     minHeight: 64,

@@ -18,7 +18,8 @@ const CLOSE_PULL = 48;
  * @param half - wanted height of half, where the content needs a certain one (the pad: 472)
  */
 export function sheetHeights(available: number, half?: number): SheetHeights {
-  const full = Math.max(available - 56, Math.min(available, 240));
+  // Where room is short the content comes before the strip of page above it.
+  const full = Math.max(available - 56, Math.min(available, half ?? 240));
   const peek = Math.min(84, full);
   return { peek, half: Math.min(full, Math.max(peek, half ?? Math.round(available * 0.56))), full };
 }
