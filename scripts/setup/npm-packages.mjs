@@ -1,6 +1,6 @@
 // @ts-check
 import { createHash } from 'node:crypto';
-import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { existsSync, readFileSync, rmSync, statfsSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 
 import { run } from './children.mjs';
@@ -9,6 +9,8 @@ import { step } from './steps.mjs';
 
 /** npm's own list of what it has put into node_modules. */
 const RECORD = 'node_modules/.package-lock.json';
+/** Room for all packages of the lock file with a little to spare. */
+const NEEDED_MB = 1_000;
 const STAMP = 'node_modules/.offsquare-lock';
 
 /**
@@ -63,6 +65,7 @@ function packagesOf(file) {
 
 /** @param {string} root */
 async function install(root) {
+  refuseWithoutSpace(root);
   // Under `npm start` npm says where it is itself, which is right even when PATH is not.
   const script = process.env.npm_execpath;
   const [command, first] = script ? [process.execPath, [script]] : ['npm', []];
@@ -84,6 +87,21 @@ async function install(root) {
     );
   }
   throw new SetupProblem(`npm could not install the packages: ${lastLines(output)}`);
+}
+
+/**
+ * On a full disk npm tries each of its thousand packages in vain for minutes before it ends.
+ *
+ * @param {string} root
+ */
+function refuseWithoutSpace(root) {
+  const { bavail, bsize, blocks } = statfsSync(root);
+  const freeMb = Math.floor((bavail * bsize) / 1e6);
+  // Some network disks do not say how large they are.
+  if (blocks === 0 || freeMb >= NEEDED_MB) return;
+  throw new SetupProblem(
+    `The npm packages need ${NEEDED_MB} MB and the disk that holds ${root} has ${freeMb} MB left: free some space there, then run the same command again.`,
+  );
 }
 
 /** @param {string} output */
