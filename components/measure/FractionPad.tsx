@@ -3,7 +3,7 @@ import { StyleSheet, View } from 'react-native';
 
 import { spokenLength } from '@/geometry/tape/format-length';
 import type { IconName } from '../ui/icon-shapes';
-import { useLocalSetting, useLocalSwitch } from '../ui/local-setting';
+import { useLeftHandPad, usePadUnit } from '../ui/preferences';
 import { HiddenText, Text } from '../ui/Text';
 
 import { Fraction, FractionParts } from './Fraction';
@@ -58,8 +58,8 @@ export interface FractionPadProps {
  */
 export function FractionPad(props: FractionPadProps) {
   const { title, hint, next, onNext, onCancel, check, aside, autoFocus = true } = props;
-  const [unit, rememberUnit] = useLocalSetting('pad-unit', ['in', 'mm'], 'in');
-  const [leftHanded] = useLocalSwitch('pad-left', false);
+  const [unit, rememberUnit] = usePadUnit();
+  const [leftHanded] = useLeftHandPad();
   const [state, setState] = useState<PadState>(() => startingState(props, unit));
   const [refusal, setRefusal] = useState<string | null>(null);
   const root = useRef<View>(null);

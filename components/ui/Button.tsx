@@ -1,4 +1,4 @@
-import { ActivityIndicator, StyleSheet, View } from 'react-native';
+import { StyleSheet, View } from 'react-native';
 
 import { Icon } from './Icon';
 import type { IconName } from './icon-shapes';
@@ -18,7 +18,7 @@ export interface ButtonProps {
   readonly look?: ButtonLook;
   readonly icon?: IconName;
   readonly iconAfter?: IconName;
-  /** Something is being done: it cannot be pressed again and says so. */
+  /** Something is being done: it cannot be pressed again, shows a clock and says so. Nothing turns round. */
   readonly busy?: boolean;
   /** Not possible yet: dashed outline. Give `describedBy` the id of the sentence that says why. */
   readonly disabled?: boolean;
@@ -65,7 +65,7 @@ export function Button(props: ButtonProps) {
         props.wide && styles.wide,
       ]}
     >
-      {busy ? <ActivityIndicator size="small" color={color[ink]} /> : icon && <Icon name={icon} tone={ink} size={22} />}
+      {(busy || icon) && <Icon name={busy || !icon ? 'clock' : icon} tone={ink} size={22} />}
       <View style={styles.words}>
         <Text kind="strong" tone={ink} size={height >= 56 ? 18 : 17} align="center">
           {label}

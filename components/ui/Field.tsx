@@ -171,6 +171,8 @@ const styles = StyleSheet.create({
   input: {
     flex: 1,
     minWidth: 0,
+    // As high as the box, so that a finger anywhere in it hits the field.
+    minHeight: 49,
     paddingVertical: space.s,
     fontFamily: fontStack(font.body400),
     fontSize: 17,

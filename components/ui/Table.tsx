@@ -1,16 +1,18 @@
 import { useEffect, useRef, useState, type KeyboardEvent, type ReactNode } from 'react';
 import { ScrollView, StyleSheet, View, type DimensionValue } from 'react-native';
 
-import { useLocalSwitch } from './local-setting';
+import { useSingleKeys } from './preferences';
 import { rowForKey } from './table-keys';
-import { Text } from './Text';
+import { HiddenText, Text } from './Text';
 import { color, radius, space } from './tokens';
+import { typingInto } from './typing-into';
 import { webStyle } from './web-style';
 
 export interface Column<Row> {
   readonly key: string;
-  /** Head; '' for a column of buttons. */
   readonly title: string;
+  /** The head is only read out: a column of buttons. */
+  readonly titleHidden?: boolean;
   /** px; takes a share of what is left when left out. */
   readonly width?: number;
   /** Share of what is left; 1 when left out. */
@@ -42,7 +44,7 @@ export interface TableProps<Row> {
 /** A table of rows that can be walked with J, K or arrows and opened with Enter. */
 export function Table<Row>(props: TableProps<Row>) {
   const { label, columns, rows, rowKey, selected = null, onSelect, main = false, minWidth = 0 } = props;
-  const [letters] = useLocalSwitch('single-keys', true);
+  const [letters] = useSingleKeys();
   const [focused, setFocused] = useState<string | null>(null);
   const body = useRef<View>(null);
   const at = rows.findIndex((row) => rowKey(row) === (focused ?? selected));
@@ -68,9 +70,13 @@ export function Table<Row>(props: TableProps<Row>) {
           <View role="row" style={styles.head}>
             {columns.map((column) => (
               <View key={column.key} role="columnheader" style={[styles.cell, cellStyle(column)]}>
-                <Text kind="labelSmall" tone="ink2">
-                  {column.title}
-                </Text>
+                {column.titleHidden ? (
+                  <HiddenText>{column.title}</HiddenText>
+                ) : (
+                  <Text kind="labelSmall" tone="ink2">
+                    {column.title}
+                  </Text>
+                )}
               </View>
             ))}
           </View>
@@ -120,7 +126,7 @@ function TableRow<Row>(props: TableRowProps<Row>) {
   const chosen = rowKey(row) === selected;
   const walks = onOpen !== undefined || onSelect !== undefined;
   const onKeyDown = (event: KeyboardEvent<HTMLElement>) => {
-    if (event.ctrlKey || event.metaKey || event.altKey || isTyping(event.target)) return;
+    if (event.ctrlKey || event.metaKey || event.altKey || typingInto(event.target)) return;
     if (event.target !== event.currentTarget && (event.key === 'Enter' || event.key === ' ')) return;
     if (event.key === 'Enter' && onOpen) onOpen(row);
     else if (event.key === ' ' && onSelect) onSelect(rowKey(row));
@@ -168,7 +174,7 @@ function usePageKeys(active: boolean, onKey: (key: string) => boolean): void {
   useEffect(() => {
     if (!active) return;
     const onKeyDown = (event: globalThis.KeyboardEvent) => {
-      if (event.defaultPrevented || event.ctrlKey || event.metaKey || event.altKey || isTyping(event.target)) return;
+      if (event.defaultPrevented || event.ctrlKey || event.metaKey || event.altKey || typingInto(event.target)) return;
       if ((event.key === 'j' || event.key === 'k') && latest.current(event.key)) event.preventDefault();
     };
     document.addEventListener('keydown', onKeyDown);
@@ -178,9 +184,6 @@ function usePageKeys(active: boolean, onKey: (key: string) => boolean): void {
 
 const rowElements = (body: View | null): readonly HTMLElement[] =>
   Array.from((body as unknown as HTMLElement | null)?.querySelectorAll<HTMLElement>('[data-row]') ?? []);
-
-const isTyping = (target: EventTarget | null): boolean =>
-  target instanceof HTMLElement && (target.isContentEditable || /^(INPUT|TEXTAREA|SELECT)$/.test(target.tagName));
 
 /** A press on a button, a link or a field inside a row belongs to that, not to the row. */
 function isControl(target: EventTarget, row: EventTarget): boolean {

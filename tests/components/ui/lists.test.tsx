@@ -30,7 +30,13 @@ function Jobs({ onOpen, onMore }: { readonly onOpen: (name: string) => void; rea
         onOpen={(job) => onOpen(job.name)}
         columns={[
           { key: 'name', title: 'Job', cell: (job) => <Text>{job.name}</Text> },
-          { key: 'more', title: '', width: 60, cell: () => <Button label="More" onPress={onMore} /> },
+          {
+            key: 'more',
+            title: 'Act',
+            titleHidden: true,
+            width: 60,
+            cell: () => <Button label="More" onPress={onMore} />,
+          },
         ]}
       />
     </>
