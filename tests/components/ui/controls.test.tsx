@@ -9,6 +9,7 @@ import { Icon } from '@/components/ui/Icon';
 import { IconButton } from '@/components/ui/IconButton';
 import { iconShapes, type IconName } from '@/components/ui/icon-shapes';
 import { MoreMenu } from '@/components/ui/Menu';
+import { placeMenu } from '@/components/ui/place-menu';
 import { RadioCards } from '@/components/ui/RadioCard';
 import { Chips, Segmented } from '@/components/ui/Segmented';
 import { DateField, Select } from '@/components/ui/Select';
@@ -187,6 +188,22 @@ describe('choosing one of a few', () => {
     await userEvent.tab();
     await userEvent.keyboard('{ArrowLeft}');
     expect(onChange).toHaveBeenCalledWith('pieces');
+  });
+});
+
+describe('placeMenu', () => {
+  const menu = { width: 200, height: 150 };
+  const window = { width: 390, height: 844 };
+  const button = (left: number, top: number) => ({ left, top, right: left + 48, bottom: top + 48 });
+
+  it('hangs under its button with the right sides in line', () => {
+    expect(placeMenu(button(330, 8), menu, window)).toEqual({ left: 178, top: 56 });
+  });
+
+  it('goes above where there is no room below, and stays 8 px inside the window', () => {
+    expect(placeMenu(button(330, 780), menu, window)).toEqual({ left: 178, top: 630 });
+    expect(placeMenu(button(0, 8), menu, window)).toEqual({ left: 8, top: 56 });
+    expect(placeMenu(button(330, 50), { width: 200, height: 900 }, window)).toEqual({ left: 178, top: 8 });
   });
 });
 
