@@ -6,9 +6,11 @@ import { firstTops } from '@/shared/layout/first-tops';
 import type { EditDraft } from '@/shared/layout/apply-edit';
 import { useOpenJob } from '../editor/JobProvider';
 import { JobFrame } from '../shell/JobFrame';
+import { useReachStage } from '../shell/use-reach-stage';
 import { Button } from '../ui/Button';
 import { Inspector } from '../ui/Inspector';
-import { Sheet, type SheetPosition } from '../ui/Sheet';
+import { Sheet } from '../ui/Sheet';
+import type { SheetPosition } from '../ui/sheet-drag';
 import { space } from '../ui/tokens';
 import { useWide } from '../ui/use-wide';
 import { FitHead, FitReport } from './FitReport';
@@ -119,6 +121,7 @@ function RoomSheet({
 function LayTops({ view, wide = false }: { readonly view: RoomView; readonly wide?: boolean }) {
   const router = useRouter();
   const { job, layout, plan, run, settings, mayEdit } = useOpenJob();
+  const reach = useReachStage();
   const laid = useRef(false);
   const ready = view.room.fit !== null && view.room.error === null && view.room.untaped.length === 0;
   const has = layout.runs.length > 0 || layout.islands.length > 0;
@@ -133,6 +136,7 @@ function LayTops({ view, wide = false }: { readonly view: RoomView; readonly wid
       ];
       for (const [edit, label] of edits) run(edit, label);
     }
+    reach('measured');
     router.navigate(`/jobs/${job.id}/tops` as never);
   };
   return (

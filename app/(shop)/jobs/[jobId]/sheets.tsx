@@ -1,0 +1,5 @@
+import { SheetsScreen } from '@/components/sheets/SheetsScreen';
+
+export default function Sheets() {
+  return <SheetsScreen />;
+}

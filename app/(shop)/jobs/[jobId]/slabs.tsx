@@ -1,0 +1,5 @@
+import { SlabsScreen } from '@/components/slabs/SlabsScreen';
+
+export default function Slabs() {
+  return <SlabsScreen />;
+}

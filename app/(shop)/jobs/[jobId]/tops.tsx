@@ -1,0 +1,5 @@
+import { TopsScreen } from '@/components/tops/TopsScreen';
+
+export default function Tops() {
+  return <TopsScreen />;
+}

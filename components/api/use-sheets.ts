@@ -1,0 +1,60 @@
+import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
+
+import type { NestPlan } from '@/geometry/nest/types';
+import { API_ROOT } from '@/shared/contracts/contract';
+import { freezeRevision, listRevisions, signOff } from '@/shared/contracts/revisions';
+import { CUT_SHEET_PATH } from '@/shared/contracts/sheets';
+import { call, fetchFile } from './client';
+import { jobKeys } from './use-jobs';
+
+const revisionsKey = (jobId: string) => ['revisions', jobId] as const;
+
+/** Revisions of a job, newest first. */
+export function useRevisions(jobId: string) {
+  return useQuery({
+    queryKey: revisionsKey(jobId),
+    queryFn: ({ signal }) => call(listRevisions, { params: { jobId }, signal }),
+  });
+}
+
+function useAfterRevision(jobId: string) {
+  const client = useQueryClient();
+  return () => {
+    void client.invalidateQueries({ queryKey: revisionsKey(jobId) });
+    void client.invalidateQueries({ queryKey: jobKeys.all });
+  };
+}
+
+/** Freezes the layout as the server has it at `seq`, with the slabs found for it. */
+export function useFreeze(jobId: string) {
+  const onSuccess = useAfterRevision(jobId);
+  return useMutation({
+    mutationFn: ({ key, ...body }: { seq: number; nest: NestPlan | null; note: string; key: string }) =>
+      call(freezeRevision, {
+        params: { jobId },
+        body: body as never,
+        idempotencyKey: key,
+      }),
+    onSuccess,
+  });
+}
+
+export function useSignOff(jobId: string) {
+  const onSuccess = useAfterRevision(jobId);
+  return useMutation({
+    mutationFn: (number: number) => call(signOff, { params: { jobId, number } }),
+    onSuccess,
+  });
+}
+
+export interface CutSheetChoice {
+  readonly jobId: string;
+  readonly revision: number | 'draft';
+  readonly paper: 'letter' | 'a4';
+}
+
+/** The cut sheets as a PDF. */
+export function fetchCutSheet({ jobId, revision, paper }: CutSheetChoice): Promise<Blob> {
+  const query = new URLSearchParams({ revision: String(revision), paper });
+  return fetchFile(`${API_ROOT}${CUT_SHEET_PATH.replace(':jobId', jobId)}?${query.toString()}`);
+}
