@@ -12,8 +12,6 @@ export function jointAtCorner(facts: Facts, between: readonly [string, string]):
 
 /** Whether a top ends against either wall of a corner there, so that the corner's angle is cut into it. */
 export function endsAtCorner(facts: Facts, between: readonly [string, string]): boolean {
-  return facts.tops.runs.some(
-    (run) =>
-      (run.wall === between[0] && run.right.kind === 'wall') || (run.wall === between[1] && run.left.kind === 'wall'),
-  );
+  const [left, right] = between.map((wall) => facts.runsByWall.get(wall) ?? []);
+  return Boolean(left?.some((run) => run.right.kind === 'wall') || right?.some((run) => run.left.kind === 'wall'));
 }

@@ -10,7 +10,7 @@ export const cornerNotMeasured: Rule = (facts) =>
     if (corner.measured) return [];
     const joint = jointAtCorner(facts, corner.between);
     if (!joint && !endsAtCorner(facts, corner.between)) return [];
-    const run = facts.tops.runs.find((r) => r.wall === corner.between[0] || r.wall === corner.between[1]);
+    const run = corner.between.flatMap((wall) => facts.runsByWall.get(wall) ?? [])[0];
     const length = joint?.length ?? run?.depth ?? 0;
     return [
       finding({

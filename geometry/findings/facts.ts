@@ -1,22 +1,28 @@
-import type { Base, CutoutKind, Run } from '../core/layout';
+import type { Base, Cutout, CutoutKind, Run } from '../core/layout';
 import { wallLabel } from '../core/layout';
 import { solvedRoom } from '../top/solved-room';
-import type { LaidRun, TopJoint } from '../top/types';
+import type { LaidRun, Piece, TopJoint, TopSeam } from '../top/types';
 import type { WallFrame } from '../top/wall-frame';
 import { wallFrames } from '../top/wall-frame';
 import type { Section } from '../wood/sections';
 import { assembledSections } from '../wood/sections';
+import type { Cabinets } from '../wood/under';
 import type { FindingContext } from './context';
 import type { Finding } from './types';
 import { sizeText } from './words';
 
 /** The context with what several rules ask for, worked out once. */
-export interface Facts extends FindingContext {
+export interface Facts extends FindingContext, Cabinets {
   readonly walls: readonly WallFrame[];
-  readonly wallById: ReadonlyMap<string, WallFrame>;
   readonly runById: ReadonlyMap<string, Run>;
   readonly laidById: ReadonlyMap<string, LaidRun>;
-  readonly basesByWall: ReadonlyMap<string, readonly Base[]>;
+  readonly runsByWall: ReadonlyMap<string, readonly LaidRun[]>;
+  /** Pieces, seams and drawn cutouts of a run or island. */
+  readonly piecesOn: ReadonlyMap<string, readonly Piece[]>;
+  readonly seamsOn: ReadonlyMap<string, readonly TopSeam[]>;
+  readonly cutoutsOn: ReadonlyMap<string, readonly Cutout[]>;
+  readonly cutoutById: ReadonlyMap<string, Cutout>;
+  readonly pieceByLetter: ReadonlyMap<string, FindingContext['pieces'][number]>;
   readonly sections: readonly Section[];
 }
 
@@ -26,21 +32,32 @@ export type Rule = (facts: Facts) => readonly Finding[];
 export function factsOf(context: FindingContext): Facts {
   const { layout, fit, tops } = context;
   const walls = fit ? wallFrames(solvedRoom(fit, layout.room)).byIndex.filter((wall) => wall !== undefined) : [];
-  const basesByWall = new Map<string, Base[]>();
-  for (const base of layout.bases) {
-    const onWall = basesByWall.get(base.wall);
-    if (onWall) onWall.push(base);
-    else basesByWall.set(base.wall, [base]);
-  }
   return {
     ...context,
     walls,
     wallById: new Map(walls.map((wall) => [wall.id, wall])),
     runById: new Map(layout.runs.map((run) => [run.id, run])),
     laidById: new Map(tops.runs.map((run) => [run.id, run])),
-    basesByWall,
+    basesByWall: groupBy(layout.bases, (base) => base.wall),
+    runsByWall: groupBy(tops.runs, (run) => run.wall),
+    piecesOn: groupBy(tops.pieces, (piece) => piece.on),
+    seamsOn: groupBy(tops.seams, (seam) => seam.on),
+    cutoutsOn: groupBy(layout.cutouts, (cutout) => cutout.on),
+    cutoutById: new Map(layout.cutouts.map((cutout) => [cutout.id, cutout])),
+    pieceByLetter: new Map(context.pieces.map((piece) => [piece.letter, piece])),
     sections: assembledSections(tops),
   };
+}
+
+function groupBy<T>(items: readonly T[], keyOf: (item: T) => string): ReadonlyMap<string, readonly T[]> {
+  const groups = new Map<string, T[]>();
+  for (const item of items) {
+    const key = keyOf(item);
+    const group = groups.get(key);
+    if (group) group.push(item);
+    else groups.set(key, [item]);
+  }
+  return groups;
 }
 
 /** A length as it is read off the tape, in the layout's step: "8 1/4 in". */
@@ -58,7 +75,7 @@ export const cornerName = (facts: Facts, between: readonly [string, string]): st
 
 /** Letters of the pieces of a run or island. */
 export const lettersOn = (facts: Facts, on: string): readonly string[] =>
-  facts.tops.pieces.filter((piece) => piece.on === on).map((piece) => piece.letter);
+  (facts.piecesOn.get(on) ?? []).map((piece) => piece.letter);
 
 /** "the top on wall A (P, Q)", "the island (U)". */
 export function runName(facts: Facts, id: string): string {
@@ -81,12 +98,16 @@ const CUTOUT_WORDS: Readonly<Record<CutoutKind, string>> = {
 
 /** What was typed for a cutout, or its kind: "the sink". */
 export function cutoutName(
-  facts: Pick<Facts, 'layout'>,
+  facts: Pick<Facts, 'cutoutById'>,
   cutout: { readonly id: string; readonly kind: CutoutKind },
 ): string {
-  const typed = facts.layout.cutouts.find((c) => c.id === cutout.id)?.label;
+  const typed = facts.cutoutById.get(cutout.id)?.label;
   return typed || `the ${CUTOUT_WORDS[cutout.kind]}`;
 }
 
 /** Bases along a run's wall; none for an island. */
 export const basesUnder = (facts: Facts, run: LaidRun): readonly Base[] => facts.basesByWall.get(run.wall) ?? [];
+
+/** Ids of the walls that a joint's two runs stand on. */
+export const wallsOf = (facts: Facts, joint: Pick<TopJoint, 'between'>): readonly string[] =>
+  joint.between.flatMap((id) => facts.laidById.get(id)?.wall ?? []);

@@ -1,14 +1,15 @@
 import { type Rule } from './facts';
 import { finding } from './finding';
-import { followsGrain } from './slab-neighbours';
+import { followingPairs, pairKey } from './slab-neighbours';
 import { PRACTICE } from './sources';
 
 /** A seam where the staves of one piece do not run on in the next. */
 export const grainBreaksAtSeam: Rule = (facts) => {
   const { nest } = facts;
-  if (!nest) return [];
+  if (!nest || facts.tops.seams.length === 0) return [];
+  const following = followingPairs(nest);
   return facts.tops.seams.flatMap((seam) => {
-    if (seam.visible <= 0 || followsGrain(nest, seam.letters)) return [];
+    if (seam.visible <= 0 || following.has(pairKey(...seam.letters))) return [];
     const [a, b] = seam.letters;
     return [
       finding({

@@ -9,7 +9,7 @@ import { listText, pounds } from './words';
 /** A section that needs more hands than the crew has, or more than three. */
 export const heavySection: Rule = (facts) =>
   facts.sections.flatMap((letters) => {
-    const pieces = facts.pieces.filter((piece) => letters.includes(piece.letter));
+    const pieces = letters.flatMap((letter) => facts.pieceByLetter.get(letter) ?? []);
     const weightLb = pieces.reduce((sum, piece) => sum + piece.weight, 0);
     const hands = handsFor(weightLb, spanOf(pieces));
     const { crew } = facts.layout.access;

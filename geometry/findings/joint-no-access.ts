@@ -1,5 +1,5 @@
 import { accessBelow } from '../wood/under';
-import { jointName, type Rule } from './facts';
+import { jointName, wallsOf, type Rule } from './facts';
 import { finding } from './finding';
 import { PRACTICE } from './sources';
 import { drawboltsAlong } from '../wood/drawbolts';
@@ -8,7 +8,7 @@ import { drawboltsAlong } from '../wood/drawbolts';
 export const jointNoAccess: Rule = (facts) =>
   facts.tops.joints.flatMap((joint) => {
     if (joint.assembled !== 'site') return [];
-    if (accessBelow(facts.walls, facts.layout.bases, joint.from, joint.to) !== 'none') return [];
+    if (accessBelow(facts, wallsOf(facts, joint), joint.from, joint.to) !== 'none') return [];
     return [
       finding({
         code: 'joint-no-access',

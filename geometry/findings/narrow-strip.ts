@@ -21,7 +21,7 @@ function strip(
 ): readonly Finding[] {
   const least = facts.settings.seams.strip;
   // The front of an apron sink is open by intent.
-  const apron = facts.layout.cutouts.find((c) => c.id === cutout.id)?.mount === 'apron' && side === 'front';
+  const apron = facts.cutoutById.get(cutout.id)?.mount === 'apron' && side === 'front';
   if (width >= least || apron) return [];
   const [is, limit] = sizePair(Math.max(width, 0), least, facts.layout.step);
   const past = width <= 0;

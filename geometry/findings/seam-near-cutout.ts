@@ -10,8 +10,8 @@ import { sizePair } from './words';
 /** A seam too near to the corner of a cutout, outside it or inside. */
 export const seamNearCutout: Rule = (facts) =>
   facts.tops.seams.flatMap((seam) =>
-    facts.layout.cutouts.flatMap((cutout) => {
-      if (cutout.on !== seam.on || cutout.kind === 'tap' || cutout.kind === 'notch') return [];
+    (facts.cutoutsOn.get(seam.on) ?? []).flatMap((cutout) => {
+      if (cutout.kind === 'tap' || cutout.kind === 'notch') return [];
       const past = Math.abs(seam.at - cutout.centre) - cutout.width / 2;
       const { insideCutout, fromCutoutCorner } = facts.settings.seams;
       const [clear, least] = past < 0 ? [-past, cutout.radius + insideCutout] : [past, fromCutoutCorner];

@@ -1,5 +1,5 @@
 import { constant, sourceText } from '../wood/sourced';
-import { size, type Facts, type Rule } from './facts';
+import { lettersOn, size, type Facts, type Rule } from './facts';
 import { finding } from './finding';
 import type { Finding } from './types';
 import { sizePair } from './words';
@@ -35,7 +35,7 @@ function islands(facts: Facts): readonly Finding[] {
   return facts.layout.islands.flatMap((island) => {
     const corner = island.corner ?? 0;
     if (island.shape === 'free' || corner >= CORNER_RADIUS.value) return [];
-    const letters = facts.tops.pieces.filter((piece) => piece.on === island.id).map((piece) => piece.letter);
+    const letters = lettersOn(facts, island.id);
     if (letters.length === 0) return [];
     return [sharp(facts, `Island ${letters.join(', ')}`, corner, { run: island.id, pieces: letters })];
   });

@@ -1,16 +1,16 @@
 import { type Rule } from './facts';
 import { finding } from './finding';
-import { meetingPairs } from './slab-neighbours';
+import { meetings } from './slab-neighbours';
 import { PRACTICE } from './sources';
 import { listText } from './words';
 
 /** A slab that gives several pieces, of which no two meet in the kitchen, so that its color turns up in scattered places. */
 export const slabNoNeighbours: Rule = (facts) => {
-  const pairs = meetingPairs(facts);
-  if (pairs.length === 0) return [];
+  const met = meetings(facts);
+  if (met.size === 0) return [];
   return (facts.nest?.slabs ?? []).flatMap((slab, i) => {
     const letters = [...new Set(slab.parts.map((part) => part.id))];
-    if (letters.length < 2 || pairs.some(([a, b]) => letters.includes(a) && letters.includes(b))) return [];
+    if (letters.length < 2 || letters.some((a) => letters.some((b) => met.get(a)?.has(b)))) return [];
     return [
       finding({
         code: 'slab-no-neighbours',

@@ -21,8 +21,9 @@ export function stripWidths(facts: Facts, cutout: PlacedCutout): StripWidths {
 /** Distance from the cutout to the lines of the top's ends; both outlines run counter-clockwise. */
 function toEnds(facts: Facts, cutout: PlacedCutout): number {
   const laid = facts.laidById.get(cutout.on);
-  const outlines = laid ? [laid.outline] : facts.tops.pieces.filter((p) => p.on === cutout.on).map((p) => p.outline);
-  const grain = facts.tops.pieces.find((p) => p.on === cutout.on)?.grain;
+  const on = facts.piecesOn.get(cutout.on) ?? [];
+  const outlines = laid ? [laid.outline] : on.map((p) => p.outline);
+  const grain = on[0]?.grain;
   if (!grain) return Infinity;
   let least = Infinity;
   for (const outline of outlines) {
@@ -43,8 +44,7 @@ function isSeam(
   corner: readonly [number, number],
   direction: readonly [number, number],
 ): boolean {
-  return facts.tops.seams.some((seam) => {
-    if (seam.on !== on) return false;
+  return (facts.seamsOn.get(on) ?? []).some((seam) => {
     const d = unit(seam.from, seam.to);
     if (!d) return false;
     const off = Math.abs(cross(d, subtract(corner, seam.from)));

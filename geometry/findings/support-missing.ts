@@ -1,15 +1,17 @@
 import { bracketNeeds, ledgerNeeds, SPAN_LIMIT, type SupportNeed } from '../wood/level-support';
 import { sourceText } from '../wood/sourced';
-import { size, wallName, type Facts, type Rule } from './facts';
+import { size, wallName, wallsOf, type Facts, type Rule } from './facts';
 import { finding } from './finding';
 import type { Finding } from './types';
 import { sizePair } from './words';
 
 /** Corners with no cabinet under the joint, and openings wider than a top spans. */
 export const supportMissing: Rule = (facts) => [
-  ...ledgerNeeds(facts.tops, facts.layout.bases, facts.walls).map((need) => ledger(facts, need)),
-  ...bracketNeeds(facts.layout.bases, facts.walls).flatMap((need) =>
-    facts.tops.runs.some((run) => run.wall === need.wall && run.backFrom < need.to && run.backTo > need.from)
+  ...facts.tops.joints
+    .flatMap((joint) => ledgerNeeds(joint, wallsOf(facts, joint), facts))
+    .map((need) => ledger(facts, need)),
+  ...bracketNeeds(facts).flatMap((need) =>
+    (facts.runsByWall.get(need.wall) ?? []).some((run) => run.backFrom < need.to && run.backTo > need.from)
       ? [bracket(facts, need)]
       : [],
   ),

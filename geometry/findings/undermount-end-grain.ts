@@ -6,7 +6,7 @@ import { PRACTICE } from './sources';
 /** End grain in the water: the two short sides of an undermount or apron sink's cutout. */
 export const undermountEndGrain: Rule = (facts) =>
   facts.tops.cutouts.flatMap((cutout) => {
-    const mount = facts.layout.cutouts.find((c) => c.id === cutout.id)?.mount;
+    const mount = facts.cutoutById.get(cutout.id)?.mount;
     if (cutout.kind !== 'sink' || (mount !== 'undermount' && mount !== 'apron')) return [];
     return [
       finding({

@@ -18,7 +18,7 @@ export const wallOutOfPlumb: Rule = (facts) => {
   const height = backsplashHeight(facts.layout);
   return facts.layout.room.walls.flatMap((wall) => {
     const gap = plumbGap(wall, height);
-    const used = facts.tops.runs.some((run) => run.wall === wall.id);
+    const used = facts.runsByWall.has(wall.id);
     if (!used || Math.abs(gap) <= PLUMB_LIMIT.value) return [];
     const [opens, limit] = sizePair(Math.abs(gap), PLUMB_LIMIT.value, facts.layout.step);
     const [name, tall] = [wallName(facts, wall.id), size(facts, height)];

@@ -1,9 +1,9 @@
 import type { Base, Layout, Wall } from '../core/layout';
 import type { Point } from '../core/point';
-import type { TopJoint, Tops } from '../top/types';
-import { footOn, type WallFrame } from '../top/wall-frame';
+import type { TopJoint } from '../top/types';
+import { footOn } from '../top/wall-frame';
 import { constant } from './sourced';
-import { baseReach, carriesTop, liesOver } from './under';
+import { baseReach, basesBelow, carriesTop, type Cabinets } from './under';
 
 export const LEVEL_LIMIT = constant('Cabinets out of level along a kitchen', 1 / 8, 'in', 'common practice', '');
 export const SPAN_LIMIT = constant('Opening that a top spans without a bracket', 24, 'in', 'common practice', '');
@@ -39,51 +39,43 @@ export interface SupportNeed {
   readonly base: string | null;
 }
 
-/** Openings wider than a top spans by itself: dishwashers and gaps that need a bracket, wider ones than the limit. */
-export function bracketNeeds(bases: readonly Base[], walls: readonly WallFrame[]): readonly SupportNeed[] {
-  return bases.flatMap((base): SupportNeed[] => {
-    const wall = walls.find((w) => w.id === base.wall);
-    if (!wall || (base.kind !== 'dishwasher' && base.kind !== 'opening')) return [];
-    const [from, to] = baseReach(wall, base);
-    return to - from > SPAN_LIMIT.value ? [{ kind: 'bracket', wall: wall.id, from, to, base: base.id }] : [];
-  });
+/** Openings that a top cannot span by itself: dishwashers and gaps wider than the limit. */
+export function bracketNeeds({ wallById, basesByWall }: Cabinets): readonly SupportNeed[] {
+  return [...wallById.values()].flatMap((wall) =>
+    (basesByWall.get(wall.id) ?? []).flatMap((base): SupportNeed[] => {
+      if (base.kind !== 'dishwasher' && base.kind !== 'opening') return [];
+      const [from, to] = baseReach(wall, base);
+      return to - from > SPAN_LIMIT.value ? [{ kind: 'bracket', wall: wall.id, from, to, base: base.id }] : [];
+    }),
+  );
 }
 
-/** Corners where bases are drawn on a wall but none stands under the joint: a ledger on the wall carries it. */
+/**
+ * Corners where bases are drawn on a wall but none stands under the middle of the joint: a ledger on the wall carries it.
+ *
+ * @param walls - ids of the walls of the joint's two runs
+ */
 export function ledgerNeeds(
-  tops: Pick<Tops, 'joints' | 'runs'>,
-  bases: readonly Base[],
-  walls: readonly WallFrame[],
+  joint: Pick<TopJoint, 'from' | 'to'>,
+  walls: readonly string[],
+  cabinets: Cabinets,
 ): readonly SupportNeed[] {
-  return tops.joints.flatMap((joint) => joint.between.flatMap((id) => ledgerOn(joint, id, tops, bases, walls)));
+  const { from, to } = joint;
+  const middle: Point = [(from[0] + to[0]) / 2, (from[1] + to[1]) / 2];
+  if (basesBelow(cabinets, walls, middle).some(carriesTop)) return [];
+  return walls.flatMap((id) => ledgerOn(id, from, cabinets));
 }
 
-function ledgerOn(
-  joint: TopJoint,
-  runId: string,
-  tops: Pick<Tops, 'runs'>,
-  bases: readonly Base[],
-  walls: readonly WallFrame[],
-): readonly SupportNeed[] {
-  const wall = walls.find((w) => w.id === tops.runs.find((r) => r.id === runId)?.wall);
-  const onWall = bases.filter((base) => base.wall === wall?.id && carriesTop(base));
-  if (!wall || onWall.length === 0 || isCarried(walls, bases, joint)) return [];
-  const corner = Math.min(Math.max(footOn(wall, joint.from), 0), wall.length);
+function ledgerOn(wallId: string, jointBack: Point, { wallById, basesByWall }: Cabinets): readonly SupportNeed[] {
+  const wall = wallById.get(wallId);
+  const onWall = (basesByWall.get(wallId) ?? []).filter(carriesTop);
+  if (!wall || onWall.length === 0) return [];
   const reaches = onWall.map((base) => baseReach(wall, base));
-  const nearStart = corner < wall.length / 2;
+  const nearStart = footOn(wall, jointBack) < wall.length / 2;
   const edge = nearStart ? Math.min(...reaches.map((r) => r[0])) : Math.max(...reaches.map((r) => r[1]));
   const [from, to] = nearStart ? [0, edge] : [edge, wall.length];
   const bare = to - from;
   return bare > 0 && bare <= LEDGER_MOST.value ? [{ kind: 'ledger', wall: wall.id, from, to, base: null }] : [];
-}
-
-/** Whether a cabinet stands under the middle of a joint. */
-function isCarried(walls: readonly WallFrame[], bases: readonly Base[], { from, to }: TopJoint): boolean {
-  const middle: Point = [(from[0] + to[0]) / 2, (from[1] + to[1]) / 2];
-  return bases.some((base) => {
-    const wall = walls.find((w) => w.id === base.wall);
-    return wall !== undefined && carriesTop(base) && liesOver(wall, base, middle);
-  });
 }
 
 /** Height of the backsplash a layout draws, inches. */

@@ -36,20 +36,38 @@ const PROBES = [0.15, 0.5, 0.85] as const;
 /** What a hand finds below a joint. */
 export type AccessBelow = 'open' | 'none' | 'not drawn';
 
+/** What stands along the walls, to be looked up by wall. */
+export interface Cabinets {
+  readonly wallById: ReadonlyMap<string, WallFrame>;
+  readonly basesByWall: ReadonlyMap<string, readonly Base[]>;
+}
+
+export function cabinetsOf(walls: readonly WallFrame[], bases: readonly Base[]): Cabinets {
+  const basesByWall = new Map<string, Base[]>(walls.map((wall) => [wall.id, []]));
+  for (const base of bases) basesByWall.get(base.wall)?.push(base);
+  return { wallById: new Map(walls.map((wall) => [wall.id, wall])), basesByWall };
+}
+
+/** Bases of some walls that a place in the room lies over. */
+export function basesBelow({ wallById, basesByWall }: Cabinets, walls: readonly string[], point: Point, slack = 0) {
+  return walls.flatMap((id) => {
+    const wall = wallById.get(id);
+    return wall ? (basesByWall.get(id) ?? []).filter((base) => liesOver(wall, base, point, slack)) : [];
+  });
+}
+
 /**
  * Whether a joint can be bolted from below: 'open' when every part of it that has a base below lies over one that a hand
  * gets into, 'none' when some part lies only over closed ones, 'not drawn' when nothing stands there in the layout.
  *
+ * @param walls - ids of the walls whose bases may lie under it
  * @param from - back point of the joint; `to` - front point, room axes
  */
-export function accessBelow(walls: readonly WallFrame[], bases: readonly Base[], from: Point, to: Point): AccessBelow {
+export function accessBelow(cabinets: Cabinets, walls: readonly string[], from: Point, to: Point): AccessBelow {
   let drawn = false;
   for (const t of PROBES) {
     const point: Point = [from[0] + (to[0] - from[0]) * t, from[1] + (to[1] - from[1]) * t];
-    const below = bases.filter((base) => {
-      const wall = walls.find((w) => w.id === base.wall);
-      return wall !== undefined && standsUnder(base) && liesOver(wall, base, point, REACH);
-    });
+    const below = basesBelow(cabinets, walls, point, REACH).filter(standsUnder);
     if (below.length === 0) continue;
     drawn = true;
     if (!below.some((base) => base.access === 'open')) return 'none';

@@ -3,6 +3,7 @@ import { DEFAULT_SETTINGS } from '@/geometry/core/settings';
 import { layTops } from '@/geometry/seams/lay-tops';
 import { wallFrames } from '@/geometry/top/wall-frame';
 import { backsplashHeight, bracketNeeds, ledgerNeeds, plumbGap, shimsOf } from '@/geometry/wood/level-support';
+import { cabinetsOf } from '@/geometry/wood/under';
 import { JOINT, layout, room, run } from '@/tests/helpers/tops-builder';
 
 const SHAPE = room([100, 80], [90]);
@@ -27,6 +28,8 @@ const CORNER = layTops(
   DEFAULT_SETTINGS,
 );
 
+const ledgers = (bases: readonly Base[]) => ledgerNeeds(CORNER.joints[0]!, ['A', 'B'], cabinetsOf(WALLS, bases));
+
 describe('shimsOf', () => {
   it('lists the bases that need one, thickest first', () => {
     const bases = [base({ id: 'a', shim: 0.125 }), base({ id: 'b' }), base({ id: 'c', shim: 0.25 })];
@@ -39,31 +42,27 @@ describe('shimsOf', () => {
 
 describe('bracketNeeds', () => {
   it('spans a 24 in dishwasher and asks for a bracket over 24 1/16', () => {
-    expect(bracketNeeds([base({ kind: 'dishwasher', from: 30, to: 54 })], WALLS)).toEqual([]);
-    expect(bracketNeeds([base({ kind: 'dishwasher', from: 30, to: 54.0625 })], WALLS)).toMatchObject([
+    expect(bracketNeeds(cabinetsOf(WALLS, [base({ kind: 'dishwasher', from: 30, to: 54 })]))).toEqual([]);
+    expect(bracketNeeds(cabinetsOf(WALLS, [base({ kind: 'dishwasher', from: 30, to: 54.0625 })]))).toMatchObject([
       { kind: 'bracket', wall: 'A', from: 30, to: 54.0625 },
     ]);
   });
 
   it('asks for none over a cabinet', () => {
-    expect(bracketNeeds([base({ to: 90 })], WALLS)).toEqual([]);
+    expect(bracketNeeds(cabinetsOf(WALLS, [base({ to: 90 })]))).toEqual([]);
   });
 });
 
 describe('ledgerNeeds', () => {
   it('asks for a ledger over the 24 in that a blind corner has no cabinet', () => {
-    expect(ledgerNeeds(CORNER, [base({})], WALLS)).toEqual([
-      { kind: 'ledger', wall: 'A', from: 76, to: 100, base: null },
-    ]);
+    expect(ledgers([base({})])).toEqual([{ kind: 'ledger', wall: 'A', from: 76, to: 100, base: null }]);
   });
 
   it('asks for none with a base in the corner, with nothing drawn, or past 30 in of bare wall', () => {
-    expect(ledgerNeeds(CORNER, [base({}), base({ id: 'c', from: 76, to: 'end', kind: 'corner base' })], WALLS)).toEqual(
-      [],
-    );
-    expect(ledgerNeeds(CORNER, [], WALLS)).toEqual([]);
-    expect(ledgerNeeds(CORNER, [base({ to: 70 })], WALLS)).toHaveLength(1);
-    expect(ledgerNeeds(CORNER, [base({ to: 69.9 })], WALLS)).toEqual([]);
+    expect(ledgers([base({}), base({ id: 'c', from: 76, to: 'end', kind: 'corner base' })])).toEqual([]);
+    expect(ledgers([])).toEqual([]);
+    expect(ledgers([base({ to: 70 })])).toHaveLength(1);
+    expect(ledgers([base({ to: 69.9 })])).toEqual([]);
   });
 });
 

@@ -1,6 +1,6 @@
 import type { Base } from '@/geometry/core/layout';
 import { wallFrames } from '@/geometry/top/wall-frame';
-import { accessBelow, baseReach, carriesTop, liesOver, standsUnder } from '@/geometry/wood/under';
+import { accessBelow, baseReach, cabinetsOf, carriesTop, liesOver, standsUnder } from '@/geometry/wood/under';
 import { room } from '@/tests/helpers/tops-builder';
 
 const WALLS = [...wallFrames(room([100, 80], [90])).byId.values()];
@@ -21,6 +21,8 @@ const JOINT = [
   [74.75, -25.25],
 ] as const;
 
+const access = (bases: readonly Base[]) => accessBelow(cabinetsOf(WALLS, bases), ['A', 'B'], ...JOINT);
+
 describe('baseReach', () => {
   it('runs to the wall\'s adjusted end for "end"', () => {
     expect(baseReach(WALLS[0]!, base({}))).toEqual([60, 100]);
@@ -40,24 +42,24 @@ describe('liesOver', () => {
 
 describe('accessBelow', () => {
   it('is open over a corner base that a hand gets into', () => {
-    expect(accessBelow(WALLS, [base({})], ...JOINT)).toBe('open');
+    expect(access([base({})])).toBe('open');
   });
 
   it('is none when the base under any part of the joint is closed', () => {
-    expect(accessBelow(WALLS, [base({ access: 'none' })], ...JOINT)).toBe('none');
+    expect(access([base({ access: 'none' })])).toBe('none');
   });
 
   it('is not drawn when nothing stands there', () => {
-    expect(accessBelow(WALLS, [], ...JOINT)).toBe('not drawn');
-    expect(accessBelow(WALLS, [base({ from: 0, to: 40 })], ...JOINT)).toBe('not drawn');
+    expect(access([])).toBe('not drawn');
+    expect(access([base({ from: 0, to: 40 })])).toBe('not drawn');
   });
 
   it('takes one open base where two overlap', () => {
-    expect(accessBelow(WALLS, [base({ access: 'none' }), base({ id: 'c' })], ...JOINT)).toBe('open');
+    expect(access([base({ access: 'none' }), base({ id: 'c' })])).toBe('open');
   });
 
   it('looks through windows and pipes', () => {
-    expect(accessBelow(WALLS, [base({ kind: 'window', access: 'none' })], ...JOINT)).toBe('not drawn');
+    expect(access([base({ kind: 'window', access: 'none' })])).toBe('not drawn');
   });
 });
 
