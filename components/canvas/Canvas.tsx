@@ -5,19 +5,15 @@ import { G, Svg } from 'react-native-svg';
 import type { Point } from '@/geometry/core/point';
 
 import { webStyle } from '../ui/web-style';
-import { CanvasTwin } from './CanvasTwin';
-import { hitTest, type HitTarget } from './hit-test';
+import { CanvasTwin, type TwinTarget } from './CanvasTwin';
+import { hitTest } from './hit-test';
 import { useCanvasGestures, type GestureAct } from './use-canvas-gestures';
 import type { CanvasView } from './use-viewport';
 import { toWorld, type ScreenPoint, type Viewport } from './viewport';
 
 /** Something on the drawing that can be touched, and that the list twin offers by name. */
-export interface CanvasTarget extends HitTarget {
-  /** What a screen reader hears: "Wall B, 118 and 5 eighths inches". */
-  readonly name: string;
+export interface CanvasTarget extends TwinTarget {
   readonly draggable?: boolean;
-  /** Left out of the list twin: a second hit area of something already in it. */
-  readonly unlisted?: boolean;
 }
 
 /** A drag from where it began: `by` is the whole way come, inches. */

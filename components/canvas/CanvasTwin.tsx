@@ -5,13 +5,20 @@ import type { Point } from '@/geometry/core/point';
 
 import { Press } from '../ui/Press';
 import { webStyle } from '../ui/web-style';
-import type { CanvasTarget } from './Canvas';
-import { middleOf } from './hit-test';
+import { middleOf, type HitTarget } from './hit-test';
 import { toScreen, type ScreenPoint, type Viewport } from './viewport';
+
+/** Something on a drawing that has a name. */
+export interface TwinTarget extends HitTarget {
+  /** What a screen reader hears: "Wall B, 118 and 5 eighths inches". */
+  readonly name: string;
+  /** Left out of the list: a second hit area of something already in it. */
+  readonly unlisted?: boolean;
+}
 
 export interface CanvasTwinProps {
   readonly label: string;
-  readonly targets: readonly CanvasTarget[];
+  readonly targets: readonly TwinTarget[];
   readonly view: Viewport;
   readonly onTap: (target: string | null, at: Point) => void;
   readonly onMenu: (target: string, at: Point, place: ScreenPoint) => void;
@@ -68,7 +75,7 @@ export function CanvasTwin(props: CanvasTwinProps) {
   );
 }
 
-function onKeyDown(props: CanvasTwinProps, target: CanvasTarget, event: KeyboardEvent<HTMLElement>): void {
+function onKeyDown(props: CanvasTwinProps, target: TwinTarget, event: KeyboardEvent<HTMLElement>): void {
   if (event.ctrlKey || event.metaKey || event.altKey) return;
   const used = handleKey(props, target, event);
   if (!used) return;
@@ -76,7 +83,7 @@ function onKeyDown(props: CanvasTwinProps, target: CanvasTarget, event: Keyboard
   event.stopPropagation();
 }
 
-function handleKey(props: CanvasTwinProps, target: CanvasTarget, event: KeyboardEvent<HTMLElement>): boolean {
+function handleKey(props: CanvasTwinProps, target: TwinTarget, event: KeyboardEvent<HTMLElement>): boolean {
   const arrow = ARROWS[event.key];
   if (arrow && props.onNudge) {
     const step = event.shiftKey ? BIG_STEP : STEP;

@@ -15,8 +15,8 @@ export interface Place {
 const MARGIN = 8;
 
 /**
- * Where an open menu lies: under its anchor with the right sides in line, above it where there is more room, and in any
- * case inside the window.
+ * Where an open menu lies: under its anchor with the sides in line (the right ones in the right half of the window), above it
+ * where there is more room, and in any case inside the window.
  *
  * @param anchor - the button, or the spot of a long press as a box without size
  * @param menu - its size, px
@@ -30,8 +30,10 @@ export function placeMenu(
   const roomAbove = anchor.top - MARGIN;
   const below = menu.height <= roomBelow || roomBelow >= roomAbove;
   const top = below ? anchor.bottom : anchor.top - menu.height;
+  const atLeft = (anchor.left + anchor.right) / 2 < window.width / 2;
+  const left = atLeft ? anchor.left : anchor.right - menu.width;
   return {
-    left: inside(anchor.right - menu.width, menu.width, window.width),
+    left: inside(left, menu.width, window.width),
     top: inside(top, menu.height, window.height),
   };
 }

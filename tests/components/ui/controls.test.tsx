@@ -200,6 +200,10 @@ describe('placeMenu', () => {
     expect(placeMenu(button(330, 8), menu, window)).toEqual({ left: 178, top: 56 });
   });
 
+  it('lines up the left sides in the left half', () => {
+    expect(placeMenu(button(60, 8), menu, window)).toEqual({ left: 60, top: 56 });
+  });
+
   it('goes above where there is no room below, and stays 8 px inside the window', () => {
     expect(placeMenu(button(330, 780), menu, window)).toEqual({ left: 178, top: 630 });
     expect(placeMenu(button(0, 8), menu, window)).toEqual({ left: 8, top: 56 });
