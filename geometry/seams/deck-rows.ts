@@ -19,7 +19,7 @@ export function ripPlaces(deck: Deck, deepest: number, holes: readonly Hole[], l
   const count = deck.depth <= deepest + SLACK ? 1 : Math.ceil((deck.depth - SLACK) / deepest);
   const zones = holes.flatMap(({ box, cutout }): Zone[] => {
     const inside = cutout.placed.radius + limits.insideCutout;
-    const why = 'along a cutout';
+    const why = () => 'along a cutout';
     return [
       { from: box.minY - limits.strip, to: box.minY + inside, why },
       { from: box.maxY - inside, to: box.maxY + limits.strip, why },

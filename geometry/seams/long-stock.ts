@@ -69,7 +69,11 @@ export class WholePieces {
   /** Whether a piece can be cut whole; a rack piece that it needs is then spoken for. */
   take(length: number, depth: number): boolean {
     const bought = this.stock.slabs.some((s) => s.depth >= depth - SLACK && s.length >= length - SLACK);
-    if (bought || longestPiece(this.stock, depth) === Infinity) return true;
+    return bought || longestPiece(this.stock, depth) === Infinity || this.takeFromRack(length, depth);
+  }
+
+  /** Speaks for the shortest rack piece that holds a piece whole; false when there is none. */
+  takeFromRack(length: number, depth: number): boolean {
     const index = this.rack.findIndex((r) => r.depth >= depth - SLACK && r.length >= length - SLACK);
     if (index < 0) return false;
     this.rack.splice(index, 1);

@@ -2,7 +2,7 @@ import { inches } from '../top/sentence';
 import type { LayProblem } from '../top/types';
 import { freeStretches, nearestFree, zoneAt } from './free-stretches';
 import type { SeamGround } from './place-seams';
-import type { Row, Zone } from './seam-zones';
+import { within, type Row, type Zone } from './seam-zones';
 
 /** Pins nearer than this are one pin, inches. */
 const SAME_PLACE = 1e-6;
@@ -27,7 +27,7 @@ export function readPins(
     const near = others.map((other): Zone => ({
       from: other - limits.shortestPiece,
       to: other + limits.shortestPiece,
-      why: `within ${inches(limits.shortestPiece, step)} of another seam`,
+      why: within(limits.shortestPiece, 'another seam'),
     }));
     const all = [...zones, ...near];
     const cuts = x > row.insideFrom + SAME_PLACE && x < row.insideTo - SAME_PLACE;
@@ -38,7 +38,7 @@ export function readPins(
     const where =
       nearest === null ? 'No place on this top is allowed.' : `The nearest allowed place is ${along(nearest)}.`;
     const why = cuts
-      ? `is ${zone!.why}`
+      ? `is ${zone!.why(step)}`
       : x <= row.from || x >= row.to
         ? 'misses the top'
         : 'would cut across the end of the top';

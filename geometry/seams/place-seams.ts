@@ -1,6 +1,6 @@
 import type { Step } from '../core/layout';
 import type { SeamLimits } from '../core/settings';
-import type { Deck } from '../top/deck';
+import { extent, type Deck } from '../top/deck';
 import type { DeckCut } from '../top/deck-cells';
 import type { LaidCutout } from '../top/lay-cutouts';
 import { inches } from '../top/sentence';
@@ -10,7 +10,7 @@ import { divide, fewest, seamPlace, seamPlaces, type SeamPlace, type Span } from
 import { zoneAt } from './free-stretches';
 import { deepest, longestPiece, type LongStock, type WholePieces } from './long-stock';
 import { readPins } from './pins';
-import { seamZones, visibleAt, type Hole, type Row, type Support, type Zone } from './seam-zones';
+import { seamZones, visibleAt, within, type Hole, type Row, type Support, type Zone } from './seam-zones';
 
 /** What decides about the seams of one deck. */
 export interface SeamGround {
@@ -60,7 +60,10 @@ export const STAGGER = 12;
  */
 export function placeSeams(ground: SeamGround): SeamPlan {
   const { deck, holes, limits } = ground;
-  const rips = ripPlaces(deck, deepest(ground.stock), holes, limits);
+  const [from, to] = extent(deck);
+  const tooDeep = deck.depth > deepest(ground.stock);
+  const fromRack = tooDeep && to - from <= ground.carried && ground.whole.takeFromRack(to - from, deck.depth);
+  const rips = fromRack || !tooDeep ? [] : ripPlaces(deck, deepest(ground.stock), holes, limits);
   const problems: LayProblem[] = [];
   const seams: PlannedSeam[] = rips.map((y, i) => ({
     kind: 'edge',
@@ -75,24 +78,38 @@ export function placeSeams(ground: SeamGround): SeamPlan {
   const longest: number[] = [];
   let before: readonly number[] = [];
   const cross = rowsOf(deck, rips).map((row, index) => {
-    const rowZones = seamZones(row, holes, ground.supports, limits, ground.step);
-    const zones = [...rowZones, ...before.map((x) => staggerZone(x, ground.step))];
-    const pins = index === 0 ? readPins(ground, row, zones, problems) : [];
-    longest.push(rowLimit(ground, row));
-    const placed = divideRow(ground, row, zones, pins, longest[index]!, problems);
-    for (const { x } of placed) {
+    longest.push(fromRack ? Infinity : rowLimit(ground, row));
+    const placed = placeInRow(ground, row, index, before, longest[index]!, problems);
+    const pins = new Set(placed.pins);
+    for (const x of placed.xs) {
       const { bottom, top } = row;
-      const pinned = pins.includes(x);
+      const pinned = pins.has(x);
       seams.push({ kind: 'cross', row: index, bottom, top, at: x, ...visibleAt(row, holes, x), pinned });
     }
-    before = placed.map(({ x }) => x);
+    before = placed.xs;
     return before;
   });
   return { cut: { rows: rips, cross }, seams, longest, problems };
 }
 
-function staggerZone(x: number, step: Step): Zone {
-  return { from: x - STAGGER, to: x + STAGGER, why: `within ${inches(STAGGER, step)} of a seam in the next row` };
+/** Seams of one row, own x. A row that can stay whole and has no pins is not looked at. */
+function placeInRow(
+  ground: SeamGround,
+  row: Row,
+  index: number,
+  before: readonly number[],
+  longest: number,
+  problems: LayProblem[],
+): { readonly xs: readonly number[]; readonly pins: readonly number[] } {
+  const pinned = index === 0 && ground.pins.length > 0;
+  if (!pinned && row.to - row.from <= longest) return { xs: [], pins: [] };
+  const zones = [...seamZones(row, ground.holes, ground.supports, ground.limits), ...before.map(staggerZone)];
+  const pins = pinned ? readPins(ground, row, zones, problems) : [];
+  return { xs: divideRow(ground, row, zones, pins, longest, problems).map(({ x }) => x), pins };
+}
+
+function staggerZone(x: number): Zone {
+  return { from: x - STAGGER, to: x + STAGGER, why: within(STAGGER, 'a seam in the next row') };
 }
 
 /** Longest piece a row may be cut into, or Infinity when it can stay whole. */
@@ -147,8 +164,8 @@ function forced(
   problems: LayProblem[],
 ): readonly SeamPlace[] {
   const ends: Zone[] = [
-    { from: -Infinity, to: row.insideFrom, why: '' },
-    { from: row.insideTo, to: Infinity, why: '' },
+    { from: -Infinity, to: row.insideFrom, why: () => '' },
+    { from: row.insideTo, to: Infinity, why: () => '' },
   ];
   const open = { ...span, shortest: 0 };
   const spread = Array.from({ length: least }, (_, i) => span.from + ((span.to - span.from) * (i + 1)) / (least + 1));
@@ -163,7 +180,7 @@ function forced(
       severity: 'warn',
       message:
         `Top ${ground.deck.id} has to be cut, but no allowed place is left: ` +
-        `the seam at ${inches(ground.deck.sign * x, ground.step)} is ${zone?.why ?? 'too near another seam'}.`,
+        `the seam at ${inches(ground.deck.sign * x, ground.step)} is ${zone?.why(ground.step) ?? 'too near another seam'}.`,
       at: { run: ground.deck.id },
     });
   }

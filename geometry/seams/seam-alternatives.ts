@@ -41,7 +41,7 @@ export function seamAlternatives(layout: Layout, room: SolvedRoom, settings: Sho
     const forced = plan.problems.some(({ code }) => code === 'seam-no-place');
     if (forced || plan.cut.rows.length > 0 || plan.seams.every((seam) => seam.pinned)) return [];
     const row = rowsOf(ground.deck, [])[0]!;
-    const zones = seamZones(row, ground.holes, ground.supports, ground.limits, ground.step);
+    const zones = seamZones(row, ground.holes, ground.supports, ground.limits);
     return setsOf(ground, row, zones, plan).map((set, i): SeamSet => {
       const xs = set.places.map((place) => place.x);
       const cutouts = onDeck.get(ground.deck.id)!;

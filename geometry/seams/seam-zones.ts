@@ -7,11 +7,14 @@ import { crossings } from '../top/deck-span';
 import { cutoutName, type LaidCutout } from '../top/lay-cutouts';
 import { inches } from '../top/sentence';
 
-/** A stretch of a deck where no seam may be (its two ends may carry one), own x, and why, after 'it would be'. */
+/** Why a place is not allowed, in words that follow 'the seam is'; put together only when somebody has to read it. */
+export type Why = (step: Step) => string;
+
+/** A stretch of a deck where no seam may be (its two ends may carry one), own x. */
 export interface Zone {
   readonly from: number;
   readonly to: number;
-  readonly why: string;
+  readonly why: Why;
 }
 
 /** A cutout on the deck that is searched, in the deck's axes. */
@@ -48,62 +51,67 @@ export function seamZones(
   holes: readonly Hole[],
   supports: readonly Support[],
   limits: SeamLimits,
-  step: Step,
 ): readonly Zone[] {
   const { deck } = row;
-  const zones: Zone[] = [
-    endZone(row, deck.left, 'left', limits, step),
-    endZone(row, deck.right, 'right', limits, step),
-  ];
+  const zones: Zone[] = [endZone(row, deck.left, 'left', limits), endZone(row, deck.right, 'right', limits)];
   for (const hole of holes)
-    if (hole.box.minY < row.top && hole.box.maxY > row.bottom) zones.push(...holeZones(hole, limits, step));
+    if (hole.box.minY < row.top && hole.box.maxY > row.bottom) zones.push(...holeZones(hole, limits));
   for (const support of supports) {
-    const zone = supportZone(deck, support, limits, step);
+    const zone = supportZone(deck, support, limits);
     if (zone) zones.push(zone);
   }
   return zones;
 }
 
-function endZone(row: Row, end: DeckEnd, side: 'left' | 'right', limits: SeamLimits, step: Step): Zone {
-  const rule = endRule(end, limits, step);
+function endZone(row: Row, end: DeckEnd, side: 'left' | 'right', limits: SeamLimits): Zone {
+  const rule = endRule(end, limits);
   const short = limits.shortestPiece;
   if (side === 'left') {
     const byRule = row.insideFrom + rule.distance;
     const to = Math.max(byRule, row.from + short);
-    return { from: -Infinity, to, why: byRule >= row.from + short ? rule.why : shortPiece(short, step) };
+    return { from: -Infinity, to, why: byRule >= row.from + short ? rule.why : shortPiece(short) };
   }
   const byRule = row.insideTo - rule.distance;
   const from = Math.min(byRule, row.to - short);
-  return { from, to: Infinity, why: byRule <= row.to - short ? rule.why : shortPiece(short, step) };
+  return { from, to: Infinity, why: byRule <= row.to - short ? rule.why : shortPiece(short) };
 }
 
-const shortPiece = (short: number, step: Step): string => `leaving a piece shorter than ${inches(short, step)}`;
+const shortPiece =
+  (short: number): Why =>
+  (step) =>
+    `leaving a piece shorter than ${inches(short, step)}`;
 
-function endRule(end: DeckEnd, limits: SeamLimits, step: Step): { distance: number; why: string } {
+/** 'within 6 in of a joint' */
+export const within =
+  (distance: number, what: string): Why =>
+  (step) =>
+    `within ${inches(distance, step)} of ${what}`;
+
+function endRule(end: DeckEnd, limits: SeamLimits): { distance: number; why: Why } {
   if (end.kind === 'joint') {
-    return { distance: limits.fromJoint, why: `within ${inches(limits.fromJoint, step)} of a joint` };
+    return { distance: limits.fromJoint, why: within(limits.fromJoint, 'a joint') };
   }
   if (end.kind === 'open' || end.kind === 'waterfall') {
-    return { distance: limits.fromOpenEnd, why: `within ${inches(limits.fromOpenEnd, step)} of an open end` };
+    return { distance: limits.fromOpenEnd, why: within(limits.fromOpenEnd, 'an open end') };
   }
-  return { distance: 0, why: 'across the end' };
+  return { distance: 0, why: () => 'across the end' };
 }
 
-function holeZones({ cutout, box }: Hole, limits: SeamLimits, step: Step): readonly Zone[] {
+function holeZones({ cutout, box }: Hole, limits: SeamLimits): readonly Zone[] {
   const name = cutoutName(cutout.cutout);
   const { kind, radius } = cutout.placed;
   if (kind === 'tap') {
     // A round hole has no corners to break out: it only has to keep wood round it.
     const keep = limits.insideCutout;
-    return [{ from: box.minX - keep, to: box.maxX + keep, why: `within ${inches(keep, step)} of ${name}` }];
+    return [{ from: box.minX - keep, to: box.maxX + keep, why: within(keep, name) }];
   }
   const outside = limits.fromCutoutCorner;
-  const why = `within ${inches(outside, step)} of a corner of ${name}`;
+  const why = within(outside, `a corner of ${name}`);
   const inside = radius + limits.insideCutout;
   if (kind === 'notch' || box.maxX - box.minX < 2 * inside) {
     return [{ from: box.minX - outside, to: box.maxX + outside, why }];
   }
-  const close = `within ${inches(inside, step)} of a side of ${name}`;
+  const close = within(inside, `a side of ${name}`);
   return [
     { from: box.minX - outside, to: box.minX + inside, why },
     { from: box.minX, to: box.minX + inside, why: close },
@@ -115,11 +123,11 @@ function holeZones({ cutout, box }: Hole, limits: SeamLimits, step: Step): reado
 /** Bases that carry nothing in their middle. */
 const HOLLOW: ReadonlySet<BaseKind> = new Set(['dishwasher', 'range', 'opening']);
 
-function supportZone(deck: Deck, { kind, name, ...at }: Support, limits: SeamLimits, step: Step): Zone | null {
+function supportZone(deck: Deck, { kind, name, ...at }: Support, limits: SeamLimits): Zone | null {
   if (!HOLLOW.has(kind)) return null;
   const [from, to] = [at.from + limits.support, at.to - limits.support];
   if (to <= from) return null;
-  const why = `over the ${name} with no support within ${inches(limits.support, step)}`;
+  const why = (step: Step) => `over the ${name} with no support within ${inches(limits.support, step)}`;
   return deck.sign === 1 ? { from, to, why } : { from: -to, to: -from, why };
 }
 
@@ -129,12 +137,12 @@ export function visibleAt(
   holes: readonly Hole[],
   x: number,
 ): { visible: number; inCutout: LaidCutout | null } {
-  let visible = within(row.deck.shape === 'strip' ? [row.bottom, row.top] : crossings(row.deck.outline, x), row);
+  let visible = lengthWithin(row.deck.shape === 'strip' ? [row.bottom, row.top] : crossings(row.deck.outline, x), row);
   let most = 0;
   let inCutout: LaidCutout | null = null;
   for (const { cutout, outline, box } of holes) {
     if (x <= box.minX || x >= box.maxX) continue;
-    const gone = within(crossings(outline, x), row);
+    const gone = lengthWithin(crossings(outline, x), row);
     visible -= gone;
     if (gone > most) [most, inCutout] = [gone, cutout];
   }
@@ -142,7 +150,7 @@ export function visibleAt(
 }
 
 /** Length of the stretches between pairs of marks that lies inside the row. */
-function within(marks: readonly number[], { bottom, top }: Row): number {
+function lengthWithin(marks: readonly number[], { bottom, top }: Row): number {
   let sum = 0;
   for (let i = 0; i + 1 < marks.length; i += 2) {
     sum += Math.max(0, Math.min(top, marks[i + 1]!) - Math.max(bottom, marks[i]!));

@@ -95,7 +95,7 @@ export function randomKitchen(
       from: whole ? 0 : random.uniform(CORNER, wall.length * 0.45),
       to: whole ? 'end' : random.uniform(wall.length * 0.55, wall.length - CORNER),
       depth: random.below(2) === 0 ? 25 : Math.round(random.uniform(14, 38) * 8) / 8,
-      backGap: [0.125, 0.25, 0.5][random.below(3)]!,
+      backGap: [0.25, 0.25, 0.25, 0.125, 0.5][random.below(5)]!,
       left: joinsLeft ? { kind: 'joint' } : (againstWall(before) ?? open(random)),
       right: joinsRight ? { kind: 'joint' } : (againstWall(after) ?? open(random)),
     };
