@@ -9,7 +9,7 @@ import { cutMarks } from '../slab/cut-marks';
 import { placeSlab, type PlacedSlab } from '../slab/placed-slab';
 import { cutCautions } from './cautions';
 import { cutSteps, listed, type CutStep } from './cut-steps';
-import { addTable, measureSteps, rowsThatFit, tableHeight } from './cut-table';
+import { addTable, measureSteps, rowsThatFit, tableHeight, type MeasuredStep } from './cut-table';
 import { mapLabels, MOST_ROWS, rowsOf, type MarkLabel } from './mark-labels';
 import { addSide, sideHeight, type SideColumn } from './side-column';
 import { BESIDE_SLAB, LABEL_ROW, SheetSlab } from './sheet-slab';
@@ -100,10 +100,13 @@ class CutSheet {
     const foot = footTop(page) - UNDER;
     const plans = SCALES.map((share) => this.drawing(share));
     const labelled = plans[0]!.labelled;
-    const rows = measureSteps(cutSteps(slab, this.step, this.offcutLabels(), !labelled), table);
+    const steps = cutSteps(slab, this.step, this.offcutLabels(), !labelled);
     const sideNeeds = sideHeight(side, cautions, slab);
-    const fits = (needs: number) => plans.find((plan) => plan.bottom + UNDER + needs <= foot);
-    const plan = fits(Math.max(tableHeight(rows), sideNeeds)) ?? fits(sideNeeds) ?? plans.at(-1)!;
+    const fitting = (needs: number) => plans.find((plan) => plan.bottom + UNDER + needs <= foot);
+    const both = (rows: readonly MeasuredStep[]) => fitting(Math.max(tableHeight(rows), sideNeeds));
+    const [roomy, tight] = [measureSteps(steps, table, 'roomy'), measureSteps(steps, table, 'tight')];
+    const rows = both(roomy) ? roomy : tight;
+    const plan = both(rows) ?? fitting(sideNeeds) ?? plans.at(-1)!;
     const top = plan.bottom + UNDER;
 
     addHeading(page, this.title, this.about(), this.head);
@@ -154,7 +157,7 @@ class CutSheet {
     const title = `${this.title}, continued`;
     addHeading(page, title, [{ text: 'Do these after the cuts of the page before. Never turn the slab.' }], this.head);
     const columns = { left: MARGIN, width: page.width - 2 * MARGIN };
-    const rows = measureSteps(steps, columns);
+    const rows = measureSteps(steps, columns, 'roomy');
     const room = footTop(page) - UNDER - HEAD_BOTTOM - 16;
     const count = Math.max(1, rowsThatFit(rows, room));
     addTable(page, rows.slice(0, count), columns, HEAD_BOTTOM + 16);

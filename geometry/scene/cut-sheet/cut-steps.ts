@@ -2,7 +2,7 @@ import type { NestCrosscut, NestRip } from '../../nest/types';
 import type { DisplayStep } from '../../tape/format-length';
 import type { TextRun } from '../display-list';
 import { styles } from '../paper/page-builder';
-import { isSquare, isTrim, lineOf, madeEnd, markedSides, offSquareDeg, pieceAt, piecesAtRip } from '../slab/cut-marks';
+import { isSquare, isTrim, keptSides, lineOf, madeEnd, offSquareDeg, pieceAt, piecesAtRip } from '../slab/cut-marks';
 import type { PlacedPiece, PlacedSlab } from '../slab/placed-slab';
 
 /** One row of the table: what to do, and how to set the saw, each `set` on a line of its own. */
@@ -53,48 +53,59 @@ class CutWords {
   }
 
   private square(cut: NestCrosscut): TextRun[] {
-    const [left, right] = [pieceAt(this.slab, cut.left), pieceAt(this.slab, cut.right)];
-    const side = markedSides(cut)[0]!;
-    const at = this.length(lineOf(cut, side).top);
+    const { left, right } = this.ends(cut);
+    const at = this.length(lineOf(cut, keptSides(this.slab, cut)[0]).top);
     if (left && right) {
       const far = this.length(lineOf(cut, 'right').top);
+      const other = left.letter === right.letter ? `the next ${right.letter}` : right.letter;
       return [
-        {
-          text: `Crosscut between ${left.letter} and ${left.letter === right.letter ? 'the next ' : ''}${right.letter}, `,
-        },
+        { text: `Crosscut between ${left.letter} and ${other}, ` },
         at,
         { text: ' and ' },
         far,
         { text: '. One pass makes both ends.' },
       ];
     }
-    if (isTrim(cut)) {
+    if (isTrim(this.slab, cut)) {
       return [{ text: 'Trim the left end square. Takes ' }, this.length(lineOf(cut, 'right').top, true), { text: '.' }];
     }
     const piece = left ?? right;
-    if (!piece) return [{ text: 'Crosscut at ' }, at, { text: ` to free a section. ${this.kerfWords(cut)}` }];
-    if (!madeEnd(this.slab, cut, side)) return [{ text: 'Crosscut at ' }, at, { text: `, clear of ${piece.letter}. ${this.kerfWords(cut)}` }]; // prettier-ignore
+    if (!piece) return [{ text: 'Crosscut at ' }, at, { text: this.roughWords(cut) }];
     return [{ text: `Crosscut ${piece.letter} at ` }, at, { text: `. ${this.kerfWords(cut)}` }];
   }
 
   private angled(cut: NestCrosscut): TextRun[] {
-    const [left, right] = [pieceAt(this.slab, cut.left), pieceAt(this.slab, cut.right)];
-    const side = left && right ? (cut.kerfSide === 'right' ? 'left' : 'right') : markedSides(cut)[0]!;
+    const { left, right } = this.ends(cut);
+    const [side] = left && right && cut.kerfSide === 'left' ? (['right'] as const) : keptSides(this.slab, cut);
     const line = lineOf(cut, side);
     const word = isMiter(left, 'right') || isMiter(right, 'left') ? 'Miter' : 'Angled cut';
     const name = left && right ? word : `${word} ${(left ?? right)?.letter ?? ''}`.trimEnd();
-    const tail =
-      left && right
-        ? `. Kerf falls on the ${cut.kerfSide === 'right' ? right.letter : left.letter} side. One pass makes both ends.`
-        : `. ${this.kerfWords(cut)}`;
     return [
       { text: `${name}, top ` },
       this.length(line.top),
       { text: ' to bottom ' },
       this.length(line.bottom),
-      { text: tail },
+      { text: this.angledTail(cut, left, right) },
       ...(left && right && this.bothSides ? this.otherSide(cut, side) : []),
     ];
+  }
+
+  private angledTail(cut: NestCrosscut, left: PlacedPiece | null, right: PlacedPiece | null): string {
+    if (left && right) {
+      const away = cut.kerfSide === 'right' ? right : left;
+      return `. Kerf falls on the ${away.letter} side. One pass makes both ends.`;
+    }
+    return left || right ? `. ${this.kerfWords(cut)}` : this.roughWords(cut);
+  }
+
+  private ends(cut: NestCrosscut): { readonly left: PlacedPiece | null; readonly right: PlacedPiece | null } {
+    return { left: madeEnd(this.slab, cut, 'left'), right: madeEnd(this.slab, cut, 'right') };
+  }
+
+  /** A cut that is no piece's end: it only parts the slab, beside a piece or between sections. */
+  private roughWords(cut: NestCrosscut): string {
+    const beside = pieceAt(this.slab, cut.left) ?? pieceAt(this.slab, cut.right);
+    return `${beside ? `, clear of ${beside.letter}` : ' to free a section'}. ${this.kerfWords(cut)}`;
   }
 
   private otherSide(cut: NestCrosscut, side: 'left' | 'right'): TextRun[] {
@@ -109,7 +120,7 @@ class CutWords {
   }
 
   private kerfWords(cut: NestCrosscut): string {
-    return `Kerf to the ${markedSides(cut)[0] === 'left' ? 'right' : 'left'}.`;
+    return `Kerf to the ${keptSides(this.slab, cut)[0] === 'left' ? 'right' : 'left'}.`;
   }
 
   /** The angle, and the same as two marks for those who set the saw by a square. */

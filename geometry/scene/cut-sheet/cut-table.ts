@@ -13,8 +13,10 @@ const DO_AT = 98;
 /** Share of what is left of the tick box that tells how to set the saw. */
 const SET_SHARE = 0.37;
 const HEAD_HEIGHT = 30;
-const PAD = 8;
-const LEAST_ROW = 39;
+/** Room above and below the text of a row, and the least height of one: roomy, and where that saves a page, tight. */
+const ROW = { roomy: { pad: 8, least: 39 }, tight: { pad: 4.5, least: 33 } } as const;
+
+export type RowRoom = keyof typeof ROW;
 const TICK = 27;
 
 export interface MeasuredStep {
@@ -23,14 +25,15 @@ export interface MeasuredStep {
 }
 
 /** Heights of the rows in a table of this width, px. */
-export function measureSteps(steps: readonly CutStep[], columns: TableColumns): MeasuredStep[] {
+export function measureSteps(steps: readonly CutStep[], columns: TableColumns, room: RowRoom): MeasuredStep[] {
+  const { pad, least } = ROW[room];
   const { doWidth, setWidth } = widths(columns);
   return steps.map((step) => {
     const left = layoutRuns(step.doThis, styles.body, doWidth, SMALLEST);
     const right = step.set.map((runs) => layoutRuns(runs, styles.body, setWidth, SMALLEST));
     const leftHeight = left.ascent + left.drop + left.descent;
     const rightHeight = right.reduce((sum, block) => sum + block.ascent + block.drop + block.descent + 4, -4);
-    return { step, height: Math.max(LEAST_ROW, Math.max(leftHeight, rightHeight) + 2 * PAD) };
+    return { step, height: Math.max(least, Math.max(leftHeight, rightHeight) + 2 * pad) };
   });
 }
 

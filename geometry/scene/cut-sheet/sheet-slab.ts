@@ -4,7 +4,7 @@ import type { DisplayStep } from '../../tape/format-length';
 import type { DrawItem } from '../display-list';
 import { layoutLength } from '../length-layout';
 import { SMALLEST, styles, type PageBuilder } from '../paper/page-builder';
-import { isSquare, lineOf, markedSides, piecesAtRip } from '../slab/cut-marks';
+import { isSquare, lineOf, keptSides, piecesAtRip } from '../slab/cut-marks';
 import type { PlacedSlab } from '../slab/placed-slab';
 import { Occupancy, type Room } from './occupancy';
 import type { MarkLabel } from './mark-labels';
@@ -139,7 +139,7 @@ export class SheetSlab {
       const y = piecesAtRip(this.slab, cut).below.length > 0 ? cut.across : cut.acrossFar;
       return [[cut.from, y], [cut.to, y]]; // prettier-ignore
     }
-    const line = lineOf(cut, markedSides(cut)[0]!);
+    const line = lineOf(cut, keptSides(this.slab, cut)[0]);
     return [[line.bottom, cut.yFront], [line.top, cut.yBack]]; // prettier-ignore
   }
 

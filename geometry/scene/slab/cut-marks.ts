@@ -29,8 +29,8 @@ const ON_EDGE = 1e-3;
 export const isSquare = (cut: NestCrosscut): boolean => Math.abs(cut.back - cut.front) < SQUARE;
 
 /** The first cut, square, that only takes a little off the left end. */
-export const isTrim = (cut: NestCrosscut): boolean =>
-  cut.n === 1 && isSquare(cut) && markedSides(cut).join() === 'right' && cut.backFar < TRIM;
+export const isTrim = (slab: PlacedSlab, cut: NestCrosscut): boolean =>
+  cut.n === 1 && isSquare(cut) && keptSides(slab, cut).join() === 'right' && cut.backFar < TRIM;
 
 /** How far the saw is turned from a square cut, degrees. */
 export const offSquareDeg = (cut: NestCrosscut): number => Math.abs(90 - cut.angle);
@@ -52,24 +52,33 @@ function crosscutMarks(slab: PlacedSlab, cut: NestCrosscut): CutMark[] {
     ...(Math.abs(cut.yBack - slab.depth) < ON_EDGE ? (['top'] as const) : []),
     ...(Math.abs(cut.yFront) < ON_EDGE ? (['bottom'] as const) : []),
   ];
-  const sides = markedSides(cut);
+  const sides = keptSides(slab, cut);
   return edges.flatMap((edge) =>
     sides.map((side) => {
       const piece = madeEnd(slab, cut, side);
       const at = lineOf(cut, side)[edge];
-      return { cut: cut.n, edge, at, side, letter: piece?.letter ?? null, word: markWord(cut, side, edge, piece) };
+      return {
+        cut: cut.n,
+        edge,
+        at,
+        side,
+        letter: piece?.letter ?? null,
+        word: markWord(slab, cut, side, edge, piece),
+      };
     }),
   );
 }
 
-/** The sides of the kerf that somebody has to keep to. */
-export function markedSides(cut: NestCrosscut): ('left' | 'right')[] {
-  const sides: ('left' | 'right')[] = [];
-  if (cut.left !== null) sides.push('left');
-  if (cut.right !== null) sides.push('right');
-  if (sides.length === 0) sides.push(cut.kerfSide === 'right' ? 'left' : 'right');
-  return sides;
+/** The sides of the kerf that somebody has to keep to: those that are a piece's end, else the one the plan keeps. */
+export function keptSides(slab: PlacedSlab, cut: NestCrosscut): readonly [Side, ...Side[]] {
+  const [first, ...others] = (['left', 'right'] as const).filter((side) => madeEnd(slab, cut, side) !== null);
+  if (first) return [first, ...others];
+  if (cut.left !== null && cut.right === null) return ['left'];
+  if (cut.right !== null && cut.left === null) return ['right'];
+  return [cut.kerfSide === 'right' ? 'left' : 'right'];
 }
+
+export type Side = 'left' | 'right';
 
 /** Marks of one side of the kerf on the top and the bottom edge. */
 export function lineOf(cut: NestCrosscut, side: 'left' | 'right'): { readonly top: number; readonly bottom: number } {
@@ -97,12 +106,13 @@ export function pieceAt(slab: PlacedSlab, index: number | null): PlacedPiece | n
 }
 
 function markWord(
+  slab: PlacedSlab,
   cut: NestCrosscut,
   side: 'left' | 'right',
   edge: 'top' | 'bottom',
   piece: PlacedPiece | null,
 ): MarkWord {
-  if (isTrim(cut)) return 'trim';
+  if (isTrim(slab, cut)) return 'trim';
   if (!piece) return 'cut';
   if (isSquare(cut)) return 'end';
   const leansRight = cut.back > cut.front;

@@ -4,7 +4,7 @@ import type { NestCut } from '../../nest/types';
 import type { Plan } from '../../plan/types';
 import type { DrawItem, Scene } from '../display-list';
 import { text } from '../room/scene-styles';
-import { lineOf, markedSides, piecesAtRip } from './cut-marks';
+import { lineOf, keptSides, piecesAtRip } from './cut-marks';
 import { placeSlab, type PlacedPiece, type PlacedSlab } from './placed-slab';
 import { widestGap } from './widest-gap';
 
@@ -98,7 +98,7 @@ function cutLine(slab: PlacedSlab, cut: NestCut): DrawItem[] {
     const y = piecesAtRip(slab, cut).below.length > 0 ? cut.across : cut.acrossFar;
     return [{ ...tag, kind: 'line', from: [cut.from, y], to: [cut.to, y], stroke: { ink: 'ink', width: 1.6 } }];
   }
-  const line = lineOf(cut, markedSides(cut)[0]!);
+  const line = lineOf(cut, keptSides(slab, cut)[0]);
   if (!cut.shared || Math.abs(cut.back - cut.front) < 1) {
     const ends = { from: [line.bottom, cut.yFront], to: [line.top, cut.yBack] } as const;
     return [{ ...tag, kind: 'line', ...ends, stroke: { ink: 'ink', width: 1.6 } }];

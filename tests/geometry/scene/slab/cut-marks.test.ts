@@ -1,5 +1,5 @@
 import type { Point } from '@/geometry/core/point';
-import { cutMarks, lineOf, markedSides, offSquareDeg } from '@/geometry/scene/slab/cut-marks';
+import { cutMarks, lineOf, keptSides, offSquareDeg } from '@/geometry/scene/slab/cut-marks';
 import { placeSlab, type PlacedPiece, type PlacedSlab } from '@/geometry/scene/slab/placed-slab';
 import { formatLength, roundLength } from '@/geometry/tape/format-length';
 import type { Piece } from '@/geometry/top/types';
@@ -102,7 +102,7 @@ function rebuild(slab: PlacedSlab, piece: PlacedPiece, round: (at: number) => nu
   for (const cut of slab.cuts) {
     if (cut.kind !== 'crosscut' || middle[1] < cut.yFront || middle[1] > cut.yBack) continue;
     for (const side of ['left', 'right'] as const) {
-      const keeps = markedSides(cut).includes(side) || cut.left === null || cut.right === null;
+      const keeps = keptSides(slab, cut).includes(side) || cut.left === null || cut.right === null;
       const line = lineOf(cut, side);
       const [a, b] = [round(line.bottom), round(line.top)];
       const at = (y: number) => a + ((b - a) * (y - cut.yFront)) / (cut.yBack - cut.yFront);
