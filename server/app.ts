@@ -22,6 +22,7 @@ import { meRoutes } from './routes/me-routes';
 import { nestRoutes } from './routes/nest-routes';
 import { rackRoutes } from './routes/rack-routes';
 import { revisionRoutes } from './routes/revision-routes';
+import { sheetRoutes } from './routes/sheet-routes';
 import { shopRoutes } from './routes/shop-routes';
 import { stockRoutes } from './routes/stock-routes';
 import { createAccessTokens } from './services/access-tokens';
@@ -37,6 +38,7 @@ import { NestService } from './services/nest-service';
 import { openApiDocument } from './services/openapi';
 import { RackService } from './services/rack-service';
 import { RevisionService } from './services/revision-service';
+import { SheetService } from './services/sheet-service';
 import { ShopService } from './services/shop-service';
 import { StockService } from './services/stock-service';
 import { NestPool } from './work/nest-pool';
@@ -85,6 +87,7 @@ function api(config: Config, db: Knex, log: Logger): Router {
     layoutRoutes(new LayoutService(db, log)),
     revisionRoutes(new RevisionService(db)),
     nestRoutes(nests),
+    sheetRoutes(new SheetService(db, nests)),
     stockRoutes(new StockService(db)),
     rackRoutes(new RackService(db)),
     eventRoutes(new EventHub(db)),

@@ -50,7 +50,12 @@ export function route<C extends Contract>(
   });
 }
 
-function parseRequest(contract: Contract, req: Request) {
+/**
+ * Parses what came in by the schemas given.
+ *
+ * @throws ProblemError validation_failed with the path of every field that is not right; not_found for an id that is none
+ */
+export function parseRequest(contract: Pick<Contract, 'params' | 'query' | 'body'>, req: Request) {
   const issues: ProblemIssue[] = [];
   const read = (name: string, schema: z.ZodType | undefined, value: unknown): unknown => {
     if (!schema) return undefined;

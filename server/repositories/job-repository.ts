@@ -82,10 +82,12 @@ export async function findJob(trx: Knex.Transaction, jobId: string): Promise<Job
 }
 
 /** Locks the job until the transaction ends; null when the shop has none of this id. */
-export async function lockJob(trx: Knex.Transaction, jobId: string): Promise<{ id: string; stage: Stage } | null> {
-  return (
-    (await trx('jobs').where({ id: jobId }).forNoKeyUpdate().first<{ id: string; stage: Stage }>('id', 'stage')) ?? null
-  );
+export async function lockJob(
+  trx: Knex.Transaction,
+  jobId: string,
+): Promise<{ id: string; name: string; stage: Stage } | null> {
+  const query = trx('jobs').where({ id: jobId }).forNoKeyUpdate();
+  return (await query.first<{ id: string; name: string; stage: Stage }>('id', 'name', 'stage')) ?? null;
 }
 
 export async function insertJob(

@@ -8,6 +8,7 @@ export interface StoredLayout {
   readonly jobId: string;
   readonly doc: Layout;
   readonly seq: number;
+  readonly updatedAt: Date;
 }
 
 export interface StoredEdit {
@@ -23,7 +24,7 @@ export interface NewEdit {
   readonly edit: Edit;
 }
 
-const COLUMNS = { id: 'id', jobId: 'job_id', doc: 'doc', seq: 'seq' } as const;
+const COLUMNS = { id: 'id', jobId: 'job_id', doc: 'doc', seq: 'seq', updatedAt: 'updated_at' } as const;
 
 export async function insertLayout(
   trx: Knex.Transaction,

@@ -28,6 +28,7 @@ export interface RevisionRecord {
 }
 
 export interface FrozenRevision extends RevisionRecord {
+  readonly jobName: string;
   readonly doc: unknown;
   readonly settings: Readonly<Record<string, unknown>>;
   readonly plan: Plan;
@@ -37,6 +38,7 @@ export interface NewRevision {
   readonly shopId: string;
   readonly personId: string;
   readonly jobId: string;
+  readonly jobName: string;
   readonly layoutSeq: number;
   readonly doc: Layout;
   readonly settings: ShopSettings;
@@ -58,7 +60,7 @@ export async function findRevision(
 ): Promise<FrozenRevision | null> {
   const row = await revisions(trx)
     .where({ 'r.job_id': jobId, 'r.number': number })
-    .select<FrozenRevision[]>('r.doc', 'r.settings', 'r.plan')
+    .select<FrozenRevision[]>('r.job_name as jobName', 'r.doc', 'r.settings', 'r.plan')
     .first();
   return (row as FrozenRevision | undefined) ?? null;
 }
@@ -74,6 +76,7 @@ export async function insertRevision(trx: Knex.Transaction, revision: NewRevisio
     shop_id: revision.shopId,
     person_id: revision.personId,
     job_id: revision.jobId,
+    job_name: revision.jobName,
     number,
     layout_seq: revision.layoutSeq,
     doc: JSON.stringify(revision.doc),

@@ -18,6 +18,7 @@ export interface CurrentLayout {
   readonly seq: number;
   readonly layout: Layout;
   readonly settings: ShopSettings;
+  readonly updatedAt: Date;
 }
 
 /** Searches for slabs on the server, for clients that cannot or do not want to. */
@@ -68,5 +69,5 @@ export async function readCurrent(trx: Knex.Transaction, jobId: string): Promise
   const stored = await findLayoutOfJob(trx, jobId);
   if (!stored) throw noSuchJob();
   const { settings } = await readShop(trx);
-  return { seq: stored.seq, layout: openLayout(stored.doc), settings };
+  return { seq: stored.seq, layout: openLayout(stored.doc), settings, updatedAt: stored.updatedAt };
 }

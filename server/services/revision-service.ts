@@ -48,7 +48,7 @@ export class RevisionService {
   /** @throws ProblemError not_found */
   get(actor: Actor, jobId: string, number: number): Promise<Revision> {
     return inShop(this.db, actor, 'job.see', async (trx) => {
-      const { revision, seq } = await mustFind(trx, jobId, number);
+      const { revision, seq } = await mustFindRevision(trx, jobId, number);
       return {
         ...toSummary(revision, seq),
         layout: openLayout(revision.doc),
@@ -71,7 +71,8 @@ export class RevisionService {
       // Layout before job, as whoever edits does: the other way round two requests could wait for each other for ever.
       const found = await findLayoutOfJob(trx, jobId);
       const layout = found && (await lockLayout(trx, found.id));
-      if (!layout || !(await lockJob(trx, jobId))) throw noSuchJob();
+      const job = layout && (await lockJob(trx, jobId));
+      if (!layout || !job) throw noSuchJob();
       if (layout.seq !== seq) {
         throw new ProblemError('layout_moved_on', `The layout has ${layout.seq} edits by now, and you saw ${seq}.`);
       }
@@ -80,10 +81,10 @@ export class RevisionService {
       const plan = makePlan({ layout: doc, settings, nest });
       if (nest) mustBeSawable(plan);
       const sha256 = sha256Of({ doc, settings, nest, plan, engine: plan.engine });
-      const whose = { shopId: actor.shopId, personId: actor.personId, jobId };
+      const whose = { shopId: actor.shopId, personId: actor.personId, jobId, jobName: job.name };
       const number = await insertRevision(trx, { ...whose, layoutSeq: seq, doc, settings, nest, plan, sha256, note });
       await this.acted(trx, actor, jobId, number, 'revision.frozen');
-      return toSummary((await mustFind(trx, jobId, number)).revision, seq);
+      return toSummary((await mustFindRevision(trx, jobId, number)).revision, seq);
     });
   }
 
@@ -96,7 +97,7 @@ export class RevisionService {
     return inShop(this.db, actor, 'revision.sign', async (trx) => {
       const job = await lockJob(trx, jobId);
       if (!job) throw noSuchJob();
-      const { revision } = await mustFind(trx, jobId, number);
+      const { revision } = await mustFindRevision(trx, jobId, number);
       await mustBeUndecidedAndNewest(trx, jobId, revision);
       if (!SIGNABLE.includes(job.stage)) {
         throw new ProblemError('stage_refused', `The job is in ${STAGE_NAMES[job.stage]}; set it to Drawn first.`);
@@ -105,7 +106,7 @@ export class RevisionService {
       await markSignedOff(trx, revision.id, actor.personId);
       await updateJob(trx, jobId, { stage: 'signed_off', sent_for_check_at: null });
       await this.acted(trx, actor, jobId, number, 'revision.signed_off', { from: job.stage, to: 'signed_off' });
-      const decided = await mustFind(trx, jobId, number);
+      const decided = await mustFindRevision(trx, jobId, number);
       return toSummary(decided.revision, decided.seq);
     });
   }
@@ -114,12 +115,12 @@ export class RevisionService {
   sendBack(actor: Actor, jobId: string, number: number, note: string): Promise<RevisionSummary> {
     return inShop(this.db, actor, 'revision.sign', async (trx) => {
       if (!(await lockJob(trx, jobId))) throw noSuchJob();
-      const { revision } = await mustFind(trx, jobId, number);
+      const { revision } = await mustFindRevision(trx, jobId, number);
       await mustBeUndecidedAndNewest(trx, jobId, revision);
       await markSentBack(trx, revision.id, actor.personId, note);
       await updateJob(trx, jobId, { sent_for_check_at: null });
       await this.acted(trx, actor, jobId, number, 'revision.sent_back', { note });
-      const decided = await mustFind(trx, jobId, number);
+      const decided = await mustFindRevision(trx, jobId, number);
       return toSummary(decided.revision, decided.seq);
     });
   }
@@ -144,7 +145,8 @@ export class RevisionService {
   }
 }
 
-async function mustFind(
+/** @throws ProblemError not_found */
+export async function mustFindRevision(
   trx: Knex.Transaction,
   jobId: string,
   number: number,

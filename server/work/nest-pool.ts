@@ -3,9 +3,7 @@ import { Worker } from 'node:worker_threads';
 
 import type { NestError, NestInstance, NestPlan } from '@/geometry/nest/types';
 
-const WORKER = path.join(__dirname, 'nest-worker.ts');
-/** The worker is TypeScript; tsx reads it, whichever runner this process was started by. */
-const EXEC_ARGV = ['--import', 'tsx'];
+const WORKER = path.join(__dirname, 'nest-worker.cjs');
 
 const AT_ONCE = 2;
 const MOST_WAITING = 16;
@@ -30,6 +28,8 @@ export class NestPool {
   async run(instance: NestInstance, limitMs: number, signal: AbortSignal): Promise<NestPlan | NestError> {
     await this.turn(signal);
     try {
+      // It may have fired between two turns of the event loop, when nobody listened.
+      signal.throwIfAborted();
       return await search(instance, limitMs, signal);
     } finally {
       this.running--;
@@ -60,7 +60,7 @@ export class NestPool {
 
 function search(instance: NestInstance, limitMs: number, signal: AbortSignal): Promise<NestPlan | NestError> {
   return new Promise((resolve, reject) => {
-    const worker = new Worker(WORKER, { workerData: { instance, limitMs }, execArgv: EXEC_ARGV });
+    const worker = new Worker(WORKER, { workerData: { instance, limitMs }, execArgv: [] });
     const end = (outcome: () => void): void => {
       clearTimeout(overtime);
       signal.removeEventListener('abort', stop);
