@@ -10,8 +10,12 @@ import { widestGap } from '../slab/widest-gap';
 
 /** px: letter's disc, grain arrow and its distance from the letter. */
 const LETTER = 42;
+const SMALL_LETTER = 26;
 const ARROW = 56;
 const ARROW_OFF = 34;
+
+/** A strip less deep than this has room for a small letter and no arrow, inches. */
+const NARROW = 8;
 
 /** Place in the room of a point of the piece's own axes (x along the grain, y from its front edge). */
 export function toRoom(piece: Piece, [x, y]: Point): Point {
@@ -53,8 +57,10 @@ export function drawLetter(piece: Piece, grain: boolean): DrawItem[] {
   const { from, to } = gap.to > gap.from ? gap : whole;
   const at = toRoom(piece, [(from + to) / 2, middle]);
   const tag = { layer: 'letters', id: piece.letter } as const;
-  const disc: DrawItem = { ...tag, kind: 'mark', at, mark: 'disc', size: LETTER, ink: 'ink', text: piece.letter };
-  if (!grain) return [disc];
+  const narrow = piece.depth < NARROW;
+  const size = narrow ? SMALL_LETTER : LETTER;
+  const disc: DrawItem = { ...tag, kind: 'mark', at, mark: 'disc', size, ink: 'ink', text: piece.letter };
+  if (!grain || narrow) return [disc];
   // Towards the back edge: at an inside corner that is the longer one.
   const back = leftNormal(piece.grain);
   const arrow: DrawItem = {
