@@ -1,6 +1,7 @@
 import { toDegrees } from '../core/angle';
 import type { Prediction } from './network-statistics';
 import type { NetworkQuantity } from './network';
+import { inWords } from './relabel-room';
 import { angleQuantity, cornerInput, networkMark, triangleQuantity, wallQuantity } from './room-frame';
 import type { RoomFrame } from './room-frame';
 import { tapeSdOf } from './room-observations';
@@ -41,7 +42,7 @@ export function nextMeasurement(input: RoomInput, solved: SolvedRoom): NextMeasu
   if (!best || now - then < WORTHWHILE * now) return null;
   const loosest = angles.findIndex((a) => Math.sqrt(a.variance) === now);
   const figures = { worstCornerSdNowDeg: toDegrees(now), worstCornerSdThenDeg: toDegrees(then) };
-  return describe(frame, best, { ...figures, why: reason(frame, best, loosest, figures) });
+  return describe(frame, best, { ...figures, why: reason(inWords(frame, input.labels), best, loosest, figures) });
 }
 
 /** Standard deviation of the worst corner once a reading of this quantity is in the fit, radians. */

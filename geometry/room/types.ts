@@ -68,6 +68,8 @@ export interface RoomInput {
   readonly trust: readonly string[];
   /** Observation names that are left out of the fit. */
   readonly ignore: readonly string[];
+  /** What people call each wall, by id, for sentences only; a wall that is not in it goes by its id. */
+  readonly labels?: Readonly<Record<string, string>>;
   /** Rough corner points, inches, same axes as the result; one per point of the room. */
   readonly sketch?: readonly Point[];
 }

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 
-import { deepestHollow, highestBump, inOrder, measuredFace, offsetAt } from '@/geometry/room/profile';
+import { highestBump, inOrder, offsetAt } from '@/geometry/room/profile';
 
 /** Straight at the left, a 1/4 in bump at 60 in, a 1/8 in hollow at 100 in. */
 const PROFILE = [
@@ -24,7 +24,6 @@ describe('wall profile', () => {
   it('is flat where nothing was read', () => {
     expect(offsetAt([], 40)).toBe(0);
     expect(highestBump([], 0, 90)).toBe(0);
-    expect(deepestHollow([], 0, 90)).toBe(0);
   });
 
   it('finds the highest bump between two places, at a station or at an end', () => {
@@ -33,9 +32,9 @@ describe('wall profile', () => {
     expect(highestBump(PROFILE, 95, 120)).toBe(0);
   });
 
-  it('finds the deepest hollow', () => {
-    expect(deepestHollow(PROFILE, 0, 120)).toBe(0.125);
-    expect(deepestHollow(PROFILE, 0, 60)).toBe(0);
+  it('takes a hollow for what sticks out on the far side of the wall', () => {
+    expect(highestBump(PROFILE, 0, 120, 'back')).toBe(0.125);
+    expect(highestBump(PROFILE, 0, 60, 'back')).toBe(0);
   });
 
   it('does not care in which order the stations were read', () => {
@@ -56,26 +55,10 @@ describe('wall profile', () => {
         fc.double({ min: 0, max: 120, noNaN: true }),
         (profile, at) => {
           expect(-offsetAt(profile, at)).toBeLessThanOrEqual(highestBump(profile, 0, 120) + 1e-12);
-          expect(offsetAt(profile, at)).toBeLessThanOrEqual(deepestHollow(profile, 0, 120) + 1e-12);
+          expect(offsetAt(profile, at)).toBeLessThanOrEqual(highestBump(profile, 0, 120, 'back') + 1e-12);
         },
       ),
       { seed: 9, numRuns: 300 },
     );
-  });
-
-  it('draws the face with its bump standing into the room, on the right-hand side of the wall', () => {
-    const face = measuredFace([0, 0], [120, 0], PROFILE);
-    expect(face).toHaveLength(4);
-    expect(face[1]).toEqual([60, -0.25]);
-    expect(face[2]![1]).toBeCloseTo(0.125, 12);
-    expect(face[3]).toEqual([120, 0.125]);
-    expect(measuredFace([0, 0], [120, 0], PROFILE, 10)[1]).toEqual([60, -2.5]);
-  });
-
-  it('draws a wall without readings straight', () => {
-    expect(measuredFace([0, 0], [120, 0], [])).toEqual([
-      [0, 0],
-      [120, 0],
-    ]);
   });
 });
