@@ -120,5 +120,12 @@ const RANK: Readonly<Record<Severity, number>> = { stop: 0, warn: 1, note: 2 };
  */
 export function findingsOf(context: FindingContext): readonly Finding[] {
   const facts = factsOf(context);
-  return RULES.flatMap((rule) => rule(facts)).sort((a, b) => RANK[a.severity] - RANK[b.severity]);
+  const found = RULES.flatMap((rule) => rule(facts)).sort((a, b) => RANK[a.severity] - RANK[b.severity]);
+  const seen = new Map<string, number>();
+  return found.map((one) => {
+    const count = (seen.get(one.key) ?? 0) + 1;
+    seen.set(one.key, count);
+    // Two facts of one kind at one place, such as two bad pins on a run, are told apart by their order.
+    return count === 1 ? one : { ...one, key: `${one.key} #${count}` };
+  });
 }

@@ -15,7 +15,7 @@ export const cutoutOutsideCabinet: Rule = (facts) =>
         code: 'cutout-outside-cabinet',
         severity: 'warn',
         text: `${capital(cutoutName(facts, cutout))} reaches ${size(facts, over.past)} past the ${over.base.label ?? over.base.kind} under it; nothing of it may stand past its sides.`,
-        action: 'Centre it on the cabinet, or check that the cabinet sides can be cut.',
+        action: 'Center it on the cabinet, or check that the cabinet sides can be cut.',
         at: { cutout: cutout.id, base: over.base.id },
         source: PRACTICE,
       }),

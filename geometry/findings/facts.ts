@@ -4,8 +4,6 @@ import { solvedRoom } from '../top/solved-room';
 import type { LaidRun, Piece, TopJoint, TopSeam } from '../top/types';
 import type { WallFrame } from '../top/wall-frame';
 import { wallFrames } from '../top/wall-frame';
-import type { Section } from '../wood/sections';
-import { assembledSections } from '../wood/sections';
 import type { Cabinets } from '../wood/under';
 import type { FindingContext } from './context';
 import type { Finding } from './types';
@@ -22,8 +20,6 @@ export interface Facts extends FindingContext, Cabinets {
   readonly seamsOn: ReadonlyMap<string, readonly TopSeam[]>;
   readonly cutoutsOn: ReadonlyMap<string, readonly Cutout[]>;
   readonly cutoutById: ReadonlyMap<string, Cutout>;
-  readonly pieceByLetter: ReadonlyMap<string, FindingContext['pieces'][number]>;
-  readonly sections: readonly Section[];
 }
 
 /** One rule: everything it finds, nothing when all is well. */
@@ -44,8 +40,6 @@ export function factsOf(context: FindingContext): Facts {
     seamsOn: groupBy(tops.seams, (seam) => seam.on),
     cutoutsOn: groupBy(layout.cutouts, (cutout) => cutout.on),
     cutoutById: new Map(layout.cutouts.map((cutout) => [cutout.id, cutout])),
-    pieceByLetter: new Map(context.pieces.map((piece) => [piece.letter, piece])),
-    sections: assembledSections(tops),
   };
 }
 

@@ -16,7 +16,7 @@ export const gapUnderSwelling: Rule = (facts) =>
         code: 'gap-under-swelling',
         severity: 'stop',
         text: `${capital(runName(facts, run.id))} has a back gap of ${gap} and grows ${grows} by the wettest season.`,
-        action: `Make the back gap ${size(facts, leastBackGap(laid.depth, facts.movement))} or more, or take the slabs in wetter.`,
+        action: `Make the back gap ${size(facts, leastBackGap(laid.depth, facts.movement))} or more, or let the slabs settle in damper air before cutting.`,
         at: { run: run.id, wall: run.wall },
         source: MOVEMENT_SOURCE,
       }),

@@ -1,6 +1,6 @@
-import { handsFor, LIFT_CAUTION, teamCapacityLb } from '../wood/hands';
+import { LIFT_CAUTION, teamCapacityLb } from '../wood/hands';
 import { LIFTING, TEAM_LIFT } from '../wood/handbook';
-import { spanOf } from '../wood/sections';
+import { sectionLoads, type SectionLoad } from '../wood/section-loads';
 import type { Facts, Rule } from './facts';
 import { finding } from './finding';
 import type { Finding } from './types';
@@ -8,21 +8,11 @@ import { listText, pounds } from './words';
 
 /** A section that needs more hands than the crew has, or more than three. */
 export const heavySection: Rule = (facts) =>
-  facts.sections.flatMap((letters) => {
-    const pieces = letters.flatMap((letter) => facts.pieceByLetter.get(letter) ?? []);
-    const weightLb = pieces.reduce((sum, piece) => sum + piece.weight, 0);
-    const hands = handsFor(weightLb, spanOf(pieces));
-    const { crew } = facts.layout.access;
-    if (hands.people <= crew && hands.people < 4) return [];
-    return [heavy(facts, letters, weightLb, hands)];
-  });
+  sectionLoads(facts.tops, facts.pieces)
+    .filter(({ hands }) => hands.people > facts.layout.access.crew || hands.people === 4)
+    .map((load) => heavy(facts, load));
 
-function heavy(
-  facts: Facts,
-  letters: readonly string[],
-  weightLb: number,
-  hands: ReturnType<typeof handsFor>,
-): Finding {
+function heavy(facts: Facts, { letters, weightLb, hands }: SectionLoad): Finding {
   const { crew } = facts.layout.access;
   const most = Math.min(Math.max(Math.floor(crew), 1), 3) as 1 | 2 | 3;
   const need = hands.people === 4 ? 'four people or a lifting aid' : `${hands.people} people`;

@@ -8,7 +8,7 @@ export const noSpareReading: Rule = ({ fit, tops }) => {
     finding({
       code: 'no-spare-reading',
       severity: 'note',
-      text: 'The room has 0 readings to spare; with fewer than 1 a slip of the tape goes unnoticed.',
+      text: 'The room has 0 readings to spare; without at least 1 a slip of the tape goes unnoticed.',
       action: 'Take one more: a diagonal, or a triangle at a corner.',
       at: { detail: 'room' },
       source: 'least squares: degrees of freedom',

@@ -19,7 +19,7 @@ interface Overhang {
 /** A part of a top that hangs past the cabinets further than it stays stiff. */
 export const overhangUnsupported: Rule = (facts) => {
   const species = speciesOf(facts.layout.material.species);
-  if (!species) return [];
+  if (!species || facts.layout.material.thickness <= 0) return [];
   const { grain, thickness } = facts.layout.material;
   return facts.tops.runs.flatMap((laid) => {
     const wall = facts.wallById.get(laid.wall);

@@ -17,7 +17,7 @@ export const shortPiece: Rule = (facts) =>
         severity: 'warn',
         text: `Piece ${piece.letter} is only ${is} long; ${limit} is the shortest a seam may leave.`,
         action: 'Move the seam so that the piece gets longer.',
-        at: { pieces: [piece.letter], run: piece.on },
+        at: { pieces: [piece.letter], run: piece.on, detail: piece.key },
         source: PRACTICE,
       }),
     ];

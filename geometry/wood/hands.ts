@@ -12,7 +12,7 @@ export const TEAM_FACTORS = [
 export const LONG_PIECE = constant('Length from which two carry', 96, 'in', 'common practice', '');
 
 export const LIFT_CAUTION =
-  'The lifting equation is for lifting in one place, not for carrying, and less on stairs or a wet floor.';
+  'The lifting equation is for lifting in one place, not for carrying; on stairs or a wet floor people manage less.';
 
 /** Hands a load needs. */
 export interface Hands {

@@ -1,6 +1,6 @@
 import { found, proveCases } from './case';
 import { CUTOUT_CASES } from './cutout-cases';
-import { kitchen, sink } from './kitchen';
+import { base, kitchen, sink } from './kitchen';
 
 describe('findings of cutouts', () => {
   proveCases(CUTOUT_CASES);
@@ -26,5 +26,11 @@ describe('findings of cutouts', () => {
   it('says nothing of a base where none is drawn', () => {
     const context = kitchen({ layout: { cutouts: [sink({ width: 60 })] } });
     expect(found(context, 'sink-wider-than-base')).toEqual([]);
+  });
+
+  it('warns of the heat of a range as of a cooktop, once a top stands beside it', () => {
+    const range = base({ kind: 'range', from: 30, to: 60 });
+    expect(found(kitchen({ layout: { bases: [range] } }), 'cooktop-heat')[0]!.text).toContain('A range on wall A');
+    expect(found(kitchen({ layout: { runs: [], bases: [range] } }), 'cooktop-heat')).toEqual([]);
   });
 });
