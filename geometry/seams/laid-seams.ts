@@ -4,7 +4,7 @@ import { extent, toOwn, toRoom, type Deck } from '../top/deck';
 import type { BarePiece } from '../top/deck-pieces';
 import { spanAt } from '../top/deck-span';
 import type { TopSeam } from '../top/types';
-import type { PlannedSeam } from './place-seams';
+import type { PlannedSeam } from './seam-plan';
 
 /** A seam in the room before its pieces have letters. */
 export type LaidSeam = Omit<TopSeam, 'letters'> & {

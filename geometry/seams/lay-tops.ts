@@ -13,7 +13,8 @@ import type { SolvedRoom } from '../top/solved-room';
 import type { LayProblem, Piece, PlacedCutout, TopJoint, TopSeam, Tops } from '../top/types';
 import { laidSeam, type LaidSeam } from './laid-seams';
 import { layStrips } from './lay-strips';
-import { placeSeams, type SeamGround, type SeamPlan } from './place-seams';
+import { placeSeams } from './place-seams';
+import type { SeamGround, SeamPlan } from './seam-plan';
 import { cutoutsByDeck, seamGrounds } from './seam-grounds';
 
 /** Runs, islands and cutouts as they lie, before any is cut into pieces. */

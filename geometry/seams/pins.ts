@@ -1,7 +1,7 @@
 import { inches } from '../top/sentence';
 import type { LayProblem } from '../top/types';
 import { freeStretches, nearestFree, zoneAt } from './free-stretches';
-import type { SeamGround } from './place-seams';
+import type { SeamGround } from './seam-plan';
 import { within, type Row, type Zone } from './seam-zones';
 
 /** Pins nearer than this are one pin, inches. */

@@ -1,54 +1,16 @@
-import type { Step } from '../core/layout';
-import type { SeamLimits } from '../core/settings';
 import { extent, type Deck } from '../top/deck';
-import type { DeckCut } from '../top/deck-cells';
-import type { LaidCutout } from '../top/lay-cutouts';
 import { inches } from '../top/sentence';
 import type { LayProblem } from '../top/types';
 import { ripPlaces, rowsOf } from './deck-rows';
 import { divide, fewest, seamPlace, seamPlaces, type SeamPlace, type Span } from './divide-row';
 import { zoneAt } from './free-stretches';
-import { deepest, longestPiece, type LongStock, type WholePieces } from './long-stock';
+import { deepest, longestPiece } from './long-stock';
 import { readPins } from './pins';
-import { seamZones, visibleAt, within, type Hole, type Row, type Support, type Zone } from './seam-zones';
+import type { PlannedSeam, SeamGround, SeamPlan } from './seam-plan';
+import { seamZones, visibleAt, within, type Hole, type Row, type Zone } from './seam-zones';
 
-/** What decides about the seams of one deck. */
-export interface SeamGround {
-  readonly deck: Deck;
-  readonly holes: readonly Hole[];
-  /** What stands along its wall; none for an island. */
-  readonly supports: readonly Support[];
-  /** Pinned places, inches along the wall. */
-  readonly pins: readonly number[];
-  readonly limits: SeamLimits;
-  readonly stock: LongStock;
-  readonly whole: WholePieces;
-  /** Longest piece that can be carried in. */
-  readonly carried: number;
-  readonly step: Step;
-}
-
-/** A cross seam (own x, in one row) or an edge seam (own y). */
-export interface PlannedSeam {
-  readonly kind: 'cross' | 'edge';
-  readonly row: number;
-  /** Own y of the row's front and back edge. */
-  readonly bottom: number;
-  readonly top: number;
-  readonly at: number;
-  readonly visible: number;
-  readonly inCutout: LaidCutout | null;
-  readonly pinned: boolean;
-}
-
-export interface SeamPlan {
-  readonly cut: DeckCut;
-  readonly seams: readonly PlannedSeam[];
-  /** Longest piece each row may be cut into; Infinity where it can stay whole. */
-  readonly longest: readonly number[];
-  readonly problems: readonly LayProblem[];
-}
-
+/** Float noise a depth may be over, inches. */
+const SLACK = 1e-6;
 /** More seams than lengths call for that are tried before the rules are given up. */
 const MORE_SEAMS = 2;
 /** Seams of neighbouring rows of an island stand at least this far apart, inches. Common practice. */
@@ -61,9 +23,10 @@ export const STAGGER = 12;
 export function placeSeams(ground: SeamGround): SeamPlan {
   const { deck, holes, limits } = ground;
   const [from, to] = extent(deck);
-  const tooDeep = deck.depth > deepest(ground.stock);
+  const slab = deepest(ground.stock);
+  const tooDeep = deck.depth > slab + SLACK;
   const fromRack = tooDeep && to - from <= ground.carried && ground.whole.takeFromRack(to - from, deck.depth);
-  const rips = fromRack || !tooDeep ? [] : ripPlaces(deck, deepest(ground.stock), holes, limits);
+  const rips = fromRack || !tooDeep ? [] : ripPlaces(deck, slab, holes, limits);
   const problems: LayProblem[] = [];
   const seams: PlannedSeam[] = rips.map((y, i) => ({
     kind: 'edge',

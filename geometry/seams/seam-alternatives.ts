@@ -5,7 +5,7 @@ import type { SolvedRoom } from '../top/solved-room';
 import { rowsOf } from './deck-rows';
 import { divide, fewest, seamPlace, seamPlaces, type Division, type SeamPlace, type Span } from './divide-row';
 import { layDecks, planSeams } from './lay-tops';
-import type { SeamGround, SeamPlan } from './place-seams';
+import type { SeamGround, SeamPlan } from './seam-plan';
 import { seamZones, type Row, type Zone } from './seam-zones';
 
 /** One way to seam a top: what the slab search chooses from. */

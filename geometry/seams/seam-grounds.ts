@@ -6,7 +6,7 @@ import type { LaidCutout } from '../top/lay-cutouts';
 import type { LaidJoint } from '../top/lay-joints';
 import type { RoomWalls } from '../top/wall-frame';
 import { longestCarried, longStock, WholePieces } from './long-stock';
-import type { SeamGround } from './place-seams';
+import type { SeamGround } from './seam-plan';
 import type { Hole, Support } from './seam-zones';
 
 /** Cutouts that may touch each deck, by deck id: its own, and those of the runs it is joined to. */

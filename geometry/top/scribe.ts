@@ -1,5 +1,5 @@
 import type { Run } from '../core/layout';
-import { standoffOf } from './lay-runs';
+import { standoffOf } from './run-lines';
 import type { LaidRun } from './types';
 import type { WallFrame } from './wall-frame';
 import { inOrder, offsetAt } from './wall-profile';
