@@ -84,7 +84,6 @@ export function RevisionBar({ revisions, which, onWhich }: RevisionBarProps) {
         {mayFreeze && which === 'draft' && (
           <Button
             label={`Freeze revision ${(newest?.number ?? 0) + 1}`}
-            icon="lock"
             busy={freeze.isPending}
             disabled={pending > 0 || plan.nest === null}
             onPress={freezeNow}

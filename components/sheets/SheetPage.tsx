@@ -1,11 +1,10 @@
 import { memo } from 'react';
 import { View } from 'react-native';
-import Svg, { G } from 'react-native-svg';
+import Svg from 'react-native-svg';
 
 import type { Scene } from '@/geometry/scene/display-list';
 import { PAPER_SIZE, type Paper } from '@/geometry/scene/paper/sheet-head';
 import { PaintSvg } from '../canvas/paint-svg';
-import { palettes } from '../ui/tokens';
 
 export interface SheetPageProps {
   readonly scene: Scene;
@@ -28,9 +27,7 @@ export const SheetPage = memo(function SheetPage({ scene, paper, width }: SheetP
       style={{ width, height, backgroundColor: '#fff', borderWidth: 1.5, borderColor: '#14202E' }}
     >
       <Svg width={width} height={height} viewBox={`0 0 ${page.width * PAPER_PX} ${page.height * PAPER_PX}`}>
-        <G transform={`translate(0 ${page.height * PAPER_PX})`}>
-          <PaintSvg scene={scene} pxPerInch={PAPER_PX} colors={palettes.print} />
-        </G>
+        <PaintSvg scene={scene} pxPerInch={PAPER_PX} />
       </Svg>
     </View>
   );

@@ -2,6 +2,7 @@ import { useRouter } from 'expo-router';
 import { useState } from 'react';
 import { StyleSheet, View } from 'react-native';
 
+import { inches } from '@/geometry/top/sentence';
 import { useMay } from '../api/use-session';
 import { useOpenJob } from '../editor/JobProvider';
 import { JobFrame } from '../shell/JobFrame';
@@ -69,7 +70,7 @@ export function SlabsScreen() {
                 ))}
               </View>
             )}
-            <Text kind="second">{`Kerf ${layout.stock.kerf === 0.125 ? '1/8' : layout.stock.kerf}, already in every mark.`}</Text>
+            <Text kind="second">{`Kerf ${inches(layout.stock.kerf, layout.step)}, already in every mark.`}</Text>
           </View>
           <View style={wide ? styles.side : styles.below}>
             <PlanSummary />

@@ -61,12 +61,13 @@ describe('parseJobFile', () => {
     expect(layout.stock).toMatchObject({ kerf: 0.125, trim: 0.5, reuseMin: 18 });
   });
 
-  it('draws a first sketch with the room on the right-hand side of every wall', () => {
-    const [p0, p1, p2] = parse(FILE).layout.room.sketch;
+  it('draws a first sketch of a U as seen from its open side: wall A goes up, the room on its right-hand side', () => {
+    const [p0, p1, p2, p3] = parse(FILE).layout.room.sketch;
     expect(p0).toEqual([0, 0]);
-    expect(p1).toEqual([96.25, 0]);
-    expect(p2![0]).toBeCloseTo(96.25, 9);
-    expect(p2![1]).toBeCloseTo(-118.625, 9);
+    expect(p1![0]).toBeCloseTo(0, 9);
+    expect(p1![1]).toBeCloseTo(96.25, 9);
+    expect(p2![0]).toBeCloseTo(118.625, 9);
+    expect(p3![1]).toBeLessThan(p2![1]);
   });
 
   it('reads a file in millimetres: 2445 mm is 96.2598 in (1 in = 25.4 mm, NIST SP 811)', () => {
