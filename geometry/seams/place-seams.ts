@@ -14,7 +14,7 @@ const SLACK = 1e-6;
 /** More seams than lengths call for that are tried before the rules are given up. */
 const MORE_SEAMS = 2;
 /** Seams of neighbouring rows of an island stand at least this far apart, inches. Common practice. */
-export const STAGGER = 12;
+const STAGGER = 12;
 
 /**
  * Decides where a deck is cut: along the grain where it is deeper than every slab, across it where a row is longer than

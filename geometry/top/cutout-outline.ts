@@ -42,7 +42,7 @@ function templateShape(cutout: Cutout, template: Polygon, centreX: number): Cuto
 }
 
 /** Counter-clockwise from the front left corner; radii front left, front right, back right, back left. */
-export function roundedRectangle(
+function roundedRectangle(
   { minX, minY, maxX, maxY }: Box,
   [frontLeft, frontRight, backRight, backLeft]: readonly [number, number, number, number],
 ): Polygon {

@@ -11,8 +11,6 @@ export interface DeckCut {
   readonly cross: readonly (readonly number[])[];
 }
 
-export const UNCUT: DeckCut = { rows: [], cross: [[]] };
-
 /** One piece of a deck in the deck's own axes. */
 export interface Cell {
   readonly row: number;

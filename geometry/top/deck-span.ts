@@ -16,11 +16,3 @@ export function spanAt(outline: Polygon, x: number): readonly [number, number] |
   const ys = crossings(outline, x);
   return ys.length < 2 ? null : [ys[0]!, ys[ys.length - 1]!];
 }
-
-/** Inches of the line across the grain at `x` inside an outline. */
-export function chordAt(outline: Polygon, x: number): number {
-  const ys = crossings(outline, x);
-  let sum = 0;
-  for (let i = 0; i + 1 < ys.length; i += 2) sum += ys[i + 1]! - ys[i]!;
-  return sum;
-}

@@ -2,7 +2,7 @@ const FIRST = 'P'.charCodeAt(0);
 const COUNT = 'Z'.charCodeAt(0) - FIRST + 1;
 
 /** The letter at `index`: P to Z, then P2 to Z2, P3 … */
-export function pieceLetter(index: number): string {
+function pieceLetter(index: number): string {
   const round = Math.floor(index / COUNT);
   return `${String.fromCharCode(FIRST + (index % COUNT))}${round === 0 ? '' : round + 1}`;
 }

@@ -13,18 +13,6 @@ export function intersection(a: Polygon, b: Polygon): readonly Polygon[] {
   return outers(polygonClipping.intersection([ring(a)], [ring(b)]));
 }
 
-/** Parts of `a` that lie outside all of `others`, counter-clockwise outer outlines with their holes behind them. */
-export function difference(
-  a: Polygon,
-  others: readonly Polygon[],
-): readonly { readonly outline: Polygon; readonly holes: readonly Polygon[] }[] {
-  const parts = polygonClipping.difference([ring(a)], ...others.map((other) => [ring(other)]));
-  return parts.map(([outline, ...holes]) => ({
-    outline: counterClockwise(open(outline ?? [])),
-    holes: holes.map(open),
-  }));
-}
-
 function outers(parts: [number, number][][][]): readonly Polygon[] {
   return parts
     .map(([outline]) => counterClockwise(open(outline ?? [])))

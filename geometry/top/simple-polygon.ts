@@ -13,7 +13,7 @@ export function crossesItself(polygon: Polygon): boolean {
 }
 
 /** Whether two segments share a point. */
-export function segmentsMeet(a: Point, b: Point, c: Point, d: Point): boolean {
+function segmentsMeet(a: Point, b: Point, c: Point, d: Point): boolean {
   const abc = turn(a, b, c);
   const abd = turn(a, b, d);
   const cda = turn(c, d, a);
