@@ -28,10 +28,9 @@ export function partShape(given: Polygon): PartShape {
   if (outline.length < 3 || !(depth > SAME_SIZE) || !(length > SAME_SIZE)) throw new RangeError('outline has no area');
   if (!isConvex(outline)) throw new RangeError('outline is not convex');
   const left = leftLine(outline, depth);
-  const right = leftLine(
-    outline.map(([x, y]): Point => [-x, y]),
-    depth,
-  );
+  // A mirrored outline runs clockwise, so it is read backwards.
+  const mirrored = outline.map(([x, y]): Point => [-x, y]).reverse();
+  const right = leftLine(mirrored, depth);
   const mid = -right.at - left.at;
   const size = area(outline);
   return {

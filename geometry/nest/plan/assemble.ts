@@ -1,8 +1,10 @@
 import type { Problem } from '../model/problem';
 import type { NestPlanSlab } from '../types';
 import { cutTree, type Leaf, type RowNode } from './cut-tree';
+import { leafOutline } from './leaf-outline';
 import { offcutsOf } from './offcuts';
 import type { Pattern } from './pattern';
+import { nameCuts } from './name-cuts';
 import { sawCuts } from './saw-cuts';
 
 /**
@@ -24,23 +26,19 @@ export function assemble(problem: Problem, patterns: readonly Pattern[], picked:
     if (!tree) throw new RangeError(`a pattern is longer than slab ${stock.slab.id}`);
     const leaves = leavesOf(tree);
     const ids = new Map<string, readonly string[]>();
-    const names = new Map<Leaf, { index: number; id: string }>();
-    leaves.forEach((leaf, index) => {
+    const named = leaves.map((leaf) => {
       const key = `${leaf.item}/${leaf.copy}`;
       if (!ids.has(key)) {
         const next = waiting[leaf.item]!.shift();
         if (!next) throw new RangeError('a pattern cuts more copies than there are');
         ids.set(key, next);
       }
-      names.set(leaf, { index, id: ids.get(key)![leaf.memberIndex]! });
+      return { leaf, id: ids.get(key)![leaf.memberIndex]!, outline: leafOutline(leaf) };
     });
     return {
       stock: stock.slab.id,
-      parts: leaves.map((leaf) => {
-        const { x, y, turned, over } = leaf;
-        return { id: names.get(leaf)!.id, x, y, turned, turnedOver: over };
-      }),
-      cuts: sawCuts(tree, problem.kerf, names),
+      parts: named.map(({ leaf: { x, y, turned, over }, id }) => ({ id, x, y, turned, turnedOver: over })),
+      cuts: nameCuts(sawCuts(tree, problem.kerf), named),
       offcuts: offcutsOf(tree, stock.slab, stock.trim, problem.kerf, problem.instance.reuseMin),
     };
   });

@@ -26,7 +26,7 @@ export function fillSlab(
   const room = lengthLeft(stock, rows, held, problem.kerf);
   const shallow = order.filter((i) => rows.shallow.includes(i));
   const section = fillSection(problem, rowsAt, stock.depth, room, shallow, [...left]);
-  return held.length > 0 || section ? makePattern(stock, rows, held, section) : null;
+  return held.length > 0 || section ? makePattern(problem, stock, rows, held, section) : null;
 }
 
 function fillRoundDefects(

@@ -1,0 +1,105 @@
+import type { Problem } from '../model/problem';
+import { FIT, SAME_SIZE } from '../model/tolerance';
+import { createLinearProgram } from '../lp/simplex';
+import type { DepthRows } from '../row/depth-rows';
+
+/** More ways than this to fill the depth with lanes are not listed; the bound then takes lanes by their share of the depth. */
+const MOST_LANE_SETS = 300;
+
+export interface LanePlans {
+  /** Lane depths that shallow items ask for, least first. */
+  readonly depths: readonly number[];
+  /** Fullest numbers of lanes of each depth that fit side by side; null when there are too many to list. */
+  readonly sets: readonly (readonly number[])[] | null;
+  /** Share of the section that a lane of each depth takes, so that the shares of any lanes side by side sum to 1 at most. */
+  readonly share: readonly number[];
+}
+
+/** How a section of this depth can be ripped into lanes for its shallow items. */
+export function lanePlans(problem: Problem, rows: DepthRows): LanePlans {
+  const depths = distinct(rows.shallow.map((i) => problem.items[i]!.depth));
+  const { kerf } = problem;
+  const sets: number[][] = [];
+  let tooMany = false;
+
+  function list(set: number[], from: number, free: number): void {
+    if (tooMany) return;
+    let grew = false;
+    // Deepest first, so that each set is listed once, in falling order of depth.
+    for (let d = from; d >= 0; d--) {
+      if (depths[d]! > free + FIT) continue;
+      grew = true;
+      set[d]!++;
+      list(set, d, free - depths[d]! - kerf);
+      set[d]!--;
+    }
+    if (!grew && !(depths.length > 0 && depths[0]! <= free + FIT)) {
+      sets.push([...set]);
+      if (sets.length > MOST_LANE_SETS) tooMany = true;
+    }
+  }
+
+  if (depths.length > 0)
+    list(
+      depths.map(() => 0),
+      depths.length - 1,
+      rows.depth,
+    );
+  const fullest = sets.filter((a) => !sets.some((b) => b !== a && b.every((n, d) => n >= a[d]!)));
+  const share = tooMany
+    ? depths.map((d) => (d + kerf) / (rows.depth + kerf + FIT))
+    : fairShares(
+        depths,
+        fullest,
+        depths.map((d) => lengthAt(problem, rows, d)),
+      );
+  return { depths, sets: tooMany ? null : fullest, share };
+}
+
+function distinct(depths: readonly number[]): number[] {
+  const sorted = [...depths].sort((a, b) => a - b);
+  return sorted.filter((d, i) => i === 0 || d - sorted[i - 1]! > SAME_SIZE);
+}
+
+const lengthAt = (problem: Problem, rows: DepthRows, depth: number): number =>
+  rows.shallow.reduce((sum, i) => {
+    const item = problem.items[i]!;
+    return Math.abs(item.depth - depth) <= SAME_SIZE ? sum + item.box : sum;
+  }, 1);
+
+/** The shares that count the most for these lengths: no set of lanes sums to more than 1, and a deeper lane has no smaller share. */
+function fairShares(
+  depths: readonly number[],
+  sets: readonly (readonly number[])[],
+  weights: readonly number[],
+): number[] {
+  const rows = [...sets.map(() => 1), ...depths.slice(1).map(() => 0)];
+  const program = createLinearProgram(rows.map((rhs) => ({ sense: '<=', rhs, penalty: 0 })));
+  depths.forEach((_, d) => {
+    const entries: [number, number][] = sets.flatMap((set, r): [number, number][] =>
+      set[d]! > 0 ? [[r, set[d]!]] : [],
+    );
+    if (d > 0) entries.push([sets.length + d - 1, -1]);
+    if (d < depths.length - 1) entries.push([sets.length + d, 1]);
+    program.addColumn(
+      -weights[d]!,
+      entries.map((e) => e[0]),
+      entries.map((e) => e[1]),
+    );
+  });
+  // Shaved so that rounding in the program can never let a set sum to more than 1.
+  return program.solve().x.map((s) => s * (1 - 1e-9));
+}
+
+/** The most that lanes side by side can be worth together, when a lane of each depth is worth so much. */
+export function bestLaneSet({ sets, share }: LanePlans, worth: readonly number[]): number {
+  let best = 0;
+  if (!sets) for (let k = 0; k < worth.length; k++) best = Math.max(best, worth[k]! / share[k]!);
+  else
+    for (const set of sets) {
+      let sum = 0;
+      for (let k = 0; k < set.length; k++) sum += set[k]! * worth[k]!;
+      if (sum > best) best = sum;
+    }
+  return best;
+}

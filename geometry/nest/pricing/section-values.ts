@@ -1,0 +1,130 @@
+import type { Problem } from '../model/problem';
+import { FIT } from '../model/tolerance';
+import type { DepthRows } from '../row/depth-rows';
+import { relaxSection } from './section-lanes';
+import { bestLaneSet, lanePlans, type LanePlans } from './lane-plans';
+import { rowSizes, type RowSizes } from './row-sizes';
+
+/**
+ * Upper bounds on what a section can hold. The quick one is a table by length: the lesser of lanes valued apart (each item
+ * once in a lane, but perhaps in several lanes) and of all lanes as one long lane (each item once). The exact one is what
+ * the relaxed section is worth.
+ */
+export interface SectionValues {
+  readonly plans: LanePlans;
+  update(value: readonly number[], demand: readonly number[]): void;
+  /** The quick bound for a section of at most `room`, rounded up to cells; 0 when there is no room. */
+  most(room: number): number;
+  /** The sharper bound. */
+  exact(room: number): number;
+}
+
+interface LaneKind {
+  readonly sizes: RowSizes;
+  /** Items that lie in a lane of this depth. */
+  readonly items: readonly number[];
+}
+
+export function createSectionValues(
+  problem: Problem,
+  rows: DepthRows,
+  rowsAt: (depth: number) => DepthRows,
+  cell: number,
+  cells: number,
+): SectionValues {
+  const plans = lanePlans(problem, rows);
+  const kinds = plans.depths.map((depth): LaneKind => {
+    const lane = rowsAt(depth);
+    const items = rows.shallow.filter((i) => lane.shapes[i]);
+    return { items, sizes: rowSizes(lane, items, problem.kerf) };
+  });
+  const together = joinLanes(problem, rows, plans, kinds);
+  const values = new Float64Array(cells);
+  const longest = Math.max(together.ends, 0, ...kinds.map((k) => k.sizes.ends));
+  const table = new Float64Array(cells + Math.ceil((longest + FIT) / cell) + 2);
+  const byLane = kinds.map(() => new Float64Array(cells));
+  const known = new Map<number, number>();
+  let current: { value: readonly number[]; demand: readonly number[] } = { value: [], demand: [] };
+
+  function update(value: readonly number[], demand: readonly number[]): void {
+    values.fill(0);
+    known.clear();
+    current = { value, demand };
+    if (kinds.length === 0) return;
+    fillTable(table, rows.shallow, together.size, value, demand, cell);
+    readTable(table, values, together.ends, cell);
+    kinds.forEach(({ items, sizes }, k) => {
+      fillTable(table, items, sizes.size, value, demand, cell);
+      readTable(table, byLane[k]!, sizes.ends, cell);
+    });
+    addLanes(plans, byLane, values);
+  }
+
+  const most = (room: number): number =>
+    room <= 0 ? 0 : values[Math.min(cells - 1, Math.floor((room + FIT) / cell))]!;
+
+  function exact(room: number): number {
+    const quick = most(room);
+    if (quick <= 0) return 0;
+    let worth = known.get(room);
+    if (worth === undefined) {
+      const { value, demand } = current;
+      worth = relaxSection(plans, rowsAt, rows.shallow, room, value, demand).bound;
+      known.set(room, worth);
+    }
+    return Math.min(worth, quick);
+  }
+
+  return { plans, update, most, exact };
+}
+
+/** Each item's least size in any lane it may lie in, times the share of the section that its lane takes. */
+function joinLanes(problem: Problem, rows: DepthRows, plans: LanePlans, kinds: readonly LaneKind[]): RowSizes {
+  const size = problem.items.map(() => Infinity);
+  kinds.forEach(({ items, sizes }) => items.forEach((i) => (size[i] = Math.min(size[i]!, sizes.size[i]!))));
+  for (const i of rows.shallow) {
+    const lane = plans.depths.findIndex((d) => d >= problem.items[i]!.depth - FIT);
+    size[i]! *= plans.share[lane]!;
+  }
+  return { size, ends: Math.max(0, ...kinds.map((k) => k.sizes.ends)) };
+}
+
+/** Best total value of items, each at most `demand` times, by cells of room; sizes are rounded down, so the bound holds. */
+function fillTable(
+  table: Float64Array,
+  items: readonly number[],
+  size: readonly number[],
+  value: readonly number[],
+  demand: readonly number[],
+  cell: number,
+): void {
+  table.fill(0);
+  for (const i of items) {
+    const worth = value[i]!;
+    if (worth <= 0 || !demand[i]) continue;
+    const step = Math.floor(size[i]! / cell);
+    const copies = Math.min(demand[i]!, Math.ceil(table.length / Math.max(1, step)));
+    for (let n = 0; n < copies; n++)
+      for (let c = table.length - 1; c >= step; c--) {
+        const more = table[c - step]! + worth;
+        if (more > table[c]!) table[c] = more;
+      }
+  }
+}
+
+/** Entry q of the answer holds for every room under (q + 1) cells. */
+function readTable(table: Float64Array, out: Float64Array, ends: number, cell: number): void {
+  for (let q = 0; q < out.length; q++) {
+    const c = Math.floor(((q + 1) * cell + FIT + ends) / cell);
+    out[q] = table[Math.max(0, Math.min(table.length - 1, c))]!;
+  }
+}
+
+/** Lowers `values` to what the best lanes side by side are worth. */
+function addLanes(plans: LanePlans, byLane: readonly Float64Array[], values: Float64Array): void {
+  const at = byLane.map(() => 0);
+  for (let q = 0; q < values.length; q++) {
+    for (let k = 0; k < at.length; k++) at[k] = byLane[k]![q]!;
+    values[q] = Math.min(values[q]!, bestLaneSet(plans, at));
+  }
+}

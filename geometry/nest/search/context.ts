@@ -1,0 +1,31 @@
+import type { MixCut } from '../bound/cheapest-mix';
+import type { Problem } from '../model/problem';
+import type { LanePlans } from '../pricing/lane-plans';
+import type { Pricing } from '../pricing/pricing';
+import type { DepthRows } from '../row/depth-rows';
+import type { Column, ColumnPool, RealColumn } from './column';
+
+/** What every stage of the search shares. */
+export interface SearchContext {
+  readonly problem: Problem;
+  readonly rowsAt: (depth: number) => DepthRows;
+  readonly plansAt: (depth: number) => LanePlans;
+  readonly pricing: Pricing;
+  /** Columns for bounds, and those that can be sawn. */
+  readonly relaxed: ColumnPool<Column>;
+  readonly real: ColumnPool<RealColumn>;
+  /** Most copies of each item in any plan. */
+  readonly most: readonly number[];
+  /** Adds units of work and tells whether the search must end. */
+  readonly spend: (units: number) => boolean;
+}
+
+/** The inequality on what is bought that these item values prove: a slab is worth no more than its best pattern. */
+export function mixCut(problem: Problem, value: readonly number[], worth: readonly number[]): MixCut {
+  const need = (needs: readonly number[]): number => needs.reduce((sum, n, i) => sum + n * value[i]!, 0);
+  return {
+    worth,
+    need: need(problem.fixed.need),
+    optionNeed: problem.choices.map(({ options }) => options.map((o) => need(o.need))),
+  };
+}

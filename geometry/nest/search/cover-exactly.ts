@@ -1,0 +1,99 @@
+import type { Problem } from '../model/problem';
+import type { PricedRow } from '../pricing/pricing';
+
+export interface CoverGoal {
+  /** Copies of each item to be cut. */
+  readonly demand: readonly number[];
+  /** Slabs to be used at most, by stock entry. */
+  readonly slabs: readonly number[];
+  /** By stock entry: price plus rent, the worth of a perfect pattern; and by how much all patterns may fall short of it. */
+  readonly perfect: readonly number[];
+  readonly slack: number;
+  readonly nodeLimit: number;
+}
+
+export type Cover =
+  | { readonly kind: 'found'; readonly rows: readonly PricedRow[]; readonly nodes: number }
+  /** No choice of rows covers the items within the slack. */
+  | { readonly kind: 'none'; readonly nodes: number }
+  | { readonly kind: 'unknown'; readonly nodes: number };
+
+/** What to do when every item that must lie in a row lies in one: pack the rest beside them, or say why not. */
+export type Finish = (
+  rows: readonly PricedRow[],
+  left: readonly number[],
+  slabs: readonly number[],
+) => 'packed' | 'impossible' | 'unknown';
+
+/**
+ * Chooses rows so that each item that can lie only in a row is cut exactly as often as asked, by branching on the item
+ * with the fewest rows left.
+ */
+export function coverExactly(
+  problem: Problem,
+  rows: readonly PricedRow[],
+  goal: CoverGoal,
+  onlyInRows: readonly number[],
+  finish: Finish,
+): Cover {
+  const { perfect, nodeLimit } = goal;
+  const left = [...goal.demand];
+  const slabs = [...goal.slabs];
+  const counts = rows.map((row) => countItems(row.items));
+  const rowsOf = problem.items.map((_, i) => rows.flatMap((__, r) => (counts[r]!.has(i) ? [r] : [])));
+  const short = rows.map((row) => Math.max(0, perfect[row.stock.index]! - row.value));
+  const chosen: PricedRow[] = [];
+  let nodes = 0;
+  let open = false;
+
+  const fits = (r: number, slack: number): boolean => {
+    if (short[r]! > slack || slabs[rows[r]!.stock.index]! <= 0) return false;
+    for (const [i, n] of counts[r]!) if (left[i]! < n) return false;
+    return true;
+  };
+
+  function scarcest(slack: number): { item: number; options: number[] } | null {
+    let best: { item: number; options: number[] } | null = null;
+    for (const item of onlyInRows) {
+      if (left[item]! <= 0) continue;
+      const options = rowsOf[item]!.filter((r) => fits(r, slack));
+      if (!best || options.length < best.options.length) best = { item, options };
+      if (options.length === 0) break;
+    }
+    return best;
+  }
+
+  function branch(slack: number): boolean {
+    if (++nodes > nodeLimit) {
+      open = true;
+      return false;
+    }
+    const next = scarcest(slack);
+    if (!next) {
+      const end = finish(chosen, left, slabs);
+      if (end === 'unknown') open = true;
+      return end === 'packed';
+    }
+    for (const r of next.options) {
+      const row = rows[r]!;
+      for (const [i, n] of counts[r]!) left[i]! -= n;
+      slabs[row.stock.index]!--;
+      chosen.push(row);
+      if (branch(slack - short[r]!)) return true;
+      chosen.pop();
+      slabs[row.stock.index]!++;
+      for (const [i, n] of counts[r]!) left[i]! += n;
+      if (nodes > nodeLimit) return false;
+    }
+    return false;
+  }
+
+  if (branch(goal.slack)) return { kind: 'found', rows: [...chosen], nodes };
+  return { kind: open ? 'unknown' : 'none', nodes };
+}
+
+function countItems(items: readonly number[]): Map<number, number> {
+  const counts = new Map<number, number>();
+  for (const i of items) counts.set(i, (counts.get(i) ?? 0) + 1);
+  return counts;
+}

@@ -1,0 +1,155 @@
+import { cheapestMix, type Mix, type MixCut } from '../bound/cheapest-mix';
+import { demandOf } from '../model/problem';
+import { FIT } from '../model/tolerance';
+import type { Pattern } from '../plan/pattern';
+import type { PricedRow } from '../pricing/pricing';
+import type { SearchContext } from './context';
+import { mixCut } from './context';
+import { coverExactly } from './cover-exactly';
+import { dive } from './dive';
+import { lengthLeft, makePattern } from './make-pattern';
+import { packSections } from './pack-sections';
+import { relaxMix, type MixRelaxation } from './relax';
+
+const MIX_NODES = 100_000;
+/** Rows listed for one mix at most; with more the mix is roomy, and other ways find its plan sooner. */
+const MOST_ROWS = 6000;
+
+export interface FoundPlan {
+  readonly patterns: readonly Pattern[];
+  readonly picked: readonly number[];
+  readonly cost: number;
+}
+
+export type MixStep =
+  | { readonly kind: 'found'; readonly plan: FoundPlan }
+  /** A mix was shown too small, or put aside. */
+  | { readonly kind: 'moved' }
+  /** No mix cheaper than asked for is left to look at. */
+  | { readonly kind: 'done' }
+  | { readonly kind: 'out of work' };
+
+export interface MixSearch {
+  readonly cuts: MixCut[];
+  /** Looks at the cheapest mix of slabs that nothing speaks against. */
+  step(below: number, nodeLimit: number): MixStep;
+  /** No plan of the class costs less. */
+  lower(): number;
+  /** Mixes shown by exhaustion to be too small, and those put aside undecided. */
+  readonly tooSmall: readonly Mix[];
+  readonly undecided: readonly Mix[];
+  /** Looks at the undecided mixes again, the cheapest first. */
+  reopen(): void;
+}
+
+/**
+ * Goes through mixes of slabs from the cheapest on. Each is refuted by a new inequality, by exhaustion, or found to hold
+ * all parts; so the first plan found is the cheapest there is, unless a mix before it stayed undecided.
+ */
+export function createMixSearch(
+  context: SearchContext,
+  firstCuts: readonly MixCut[],
+  firstValues: readonly number[],
+): MixSearch {
+  const { problem } = context;
+  const prices = problem.stock.map((s) => s.price);
+  const counts = problem.stock.map((s) => s.count);
+  const cuts = [...firstCuts];
+  const tooSmall: Mix[] = [];
+  const undecided: Mix[] = [];
+  let next = 0;
+
+  function step(below: number, nodeLimit: number): MixStep {
+    const answer = cheapestMix({ prices, counts, cuts, tooSmall: [...tooSmall, ...undecided] }, below, MIX_NODES);
+    if (answer.kind === 'limit') {
+      next = answer.bound;
+      return { kind: 'out of work' };
+    }
+    next = answer.kind === 'mix' ? answer.mix.cost : below;
+    if (answer.kind === 'none') return { kind: 'done' };
+    const { mix } = answer;
+    const relaxed = relaxMix(context, mix, firstValues);
+    if (relaxed.holds === 'no') {
+      cuts.push(mixCut(problem, relaxed.value, relaxed.worth));
+      return { kind: 'moved' };
+    }
+    if (relaxed.holds === 'unknown') return { kind: 'out of work' };
+    const plan = pack(mix, relaxed, nodeLimit);
+    if (plan === 'none') tooSmall.push(mix);
+    else if (plan === 'unknown') undecided.push(mix);
+    else return { kind: 'found', plan };
+    return context.spend(0) ? { kind: 'out of work' } : { kind: 'moved' };
+  }
+
+  function pack(mix: Mix, relaxed: MixRelaxation, nodeLimit: number): FoundPlan | 'none' | 'unknown' {
+    const demand = demandOf(problem, mix.picked);
+    const perfect = prices.map((price, s) => Math.max(price, relaxed.worth[s]!));
+    const tolerance = 1e-6 * (mix.cost + 1);
+    const slack = Math.max(0, relaxed.slack) + tolerance;
+    const above = perfect.map((p, s) => (mix.slabs[s]! > 0 ? p - slack : Infinity));
+    const dived = dive(context, demand, mix.slabs, Infinity);
+    if (dived) {
+      const patterns = dived.map((c) => c.pattern);
+      return { patterns, picked: mix.picked, cost: patterns.reduce((sum, p) => sum + prices[p.stock]!, 0) };
+    }
+    const rows = context.pricing.all(relaxed.value, demand, above, MOST_ROWS, 20 * nodeLimit);
+    if (!rows) return 'unknown';
+    const depths = new Set(problem.stock.filter((s) => mix.slabs[s.index]! > 0).map((s) => s.depth));
+    const onlyInRows = problem.items
+      .filter((item) => demand[item.index]! > 0 && [...depths].every((d) => item.depth >= d - FIT))
+      .map((item) => item.index);
+    let plan: FoundPlan | null = null;
+    const cover = coverExactly(
+      problem,
+      rows,
+      { demand, slabs: mix.slabs, perfect, slack, nodeLimit },
+      onlyInRows,
+      (chosen, left, slabs) => {
+        const patterns = finish(chosen, left, slabs);
+        if (patterns === 'impossible' || patterns === 'unknown') return patterns;
+        plan = { patterns, picked: mix.picked, cost: patterns.reduce((sum, p) => sum + prices[p.stock]!, 0) };
+        return 'packed';
+      },
+    );
+    context.spend(cover.nodes);
+    return plan ?? (cover.kind === 'none' ? 'none' : 'unknown');
+  }
+
+  /** Sections for what does not lie in a row, beside the rows and on the slabs not yet used. */
+  function finish(
+    chosen: readonly PricedRow[],
+    left: readonly number[],
+    slabs: readonly number[],
+  ): Pattern[] | 'impossible' | 'unknown' {
+    const empty = problem.stock.flatMap((stock) =>
+      new Array<PricedRow>(slabs[stock.index]!).fill({ stock, items: [], value: 0, room: stock.usable }),
+    );
+    const all = [...chosen, ...empty];
+    const rooms = all.map((row) => ({
+      depth: row.stock.depth,
+      length:
+        row.items.length > 0
+          ? lengthLeft(row.stock, context.rowsAt(row.stock.depth), row.items, problem.kerf)
+          : row.stock.usable,
+    }));
+    const sections = packSections(problem, context.rowsAt, context.plansAt, rooms, left, context.spend);
+    if (!sections) return 'unknown';
+    const patterns: Pattern[] = [];
+    for (const [r, row] of all.entries()) {
+      if (row.items.length === 0 && !sections[r]) continue;
+      const pattern = makePattern(problem, row.stock, context.rowsAt(row.stock.depth), row.items, sections[r]!);
+      if (!pattern) return 'unknown';
+      patterns.push(pattern);
+    }
+    return patterns;
+  }
+
+  return {
+    cuts,
+    step,
+    lower: () => Math.min(next, ...undecided.map((m) => m.cost)),
+    tooSmall,
+    undecided,
+    reopen: () => void (undecided.length = 0),
+  };
+}

@@ -1,0 +1,178 @@
+import { areaCut } from '../bound/area-cut';
+import { cheapestMix, type MixCut } from '../bound/cheapest-mix';
+import { demandOf, type Problem } from '../model/problem';
+import type { Pattern } from '../plan/pattern';
+import { createPricing } from '../pricing/pricing';
+import { createDepthRows } from '../row/depth-rows';
+import { createColumnPool, makeColumn, type Column, type RealColumn } from './column';
+import { mixCut, type SearchContext } from './context';
+import { dive } from './dive';
+import { greedy } from './greedy';
+import { createMixSearch, type FoundPlan, type MixSearch } from './mix-search';
+import { createLanePlans } from './pack-sections';
+import { groupsOf, recut } from './regroup';
+import { relax } from './relax';
+
+const MIX_NODES = 100_000;
+/** Nodes spent on a mix at first sight; each later visit to an undecided one spends four times more. */
+const FIRST_NODES = 20_000;
+/** Groups of slabs cut again between two mixes. */
+const GROUPS_PER_ROUND = 12;
+
+export interface SearchResult {
+  readonly plan: FoundPlan | null;
+  readonly lower: number;
+  /** Inequalities that prove the bound. */
+  readonly cuts: readonly MixCut[];
+  readonly work: number;
+}
+
+export interface SearchLimits {
+  readonly stop: () => boolean;
+  readonly workLimit: number;
+  readonly onBetter: (plan: FoundPlan, lower: number) => void;
+}
+
+/** Looks for the cheapest plan of the class until it is proved, or until the limits say stop. */
+export function search(problem: Problem, limits: SearchLimits): SearchResult {
+  const state = createState(problem, limits);
+  const { context } = state;
+  for (const picked of settledChoices(problem)) {
+    const patterns = greedy(problem, context.rowsAt, demandOf(problem, picked));
+    if (patterns) state.offer(patterns, picked);
+    if (context.spend(1)) break;
+  }
+  const area = areaCut(problem);
+  state.raise(boundOf(problem, [area], state.below()));
+  if (state.done() || context.spend(0)) return state.result([area]);
+  const first = relax(context);
+  const cuts = [area, mixCut(problem, first.value, first.worth)];
+  state.raise(boundOf(problem, cuts, state.below()));
+  if (state.done() || !first.finished) return state.result(cuts);
+  const mixes = createMixSearch(context, cuts, first.value);
+  improve(state, mixes);
+  return state.result(mixes.cuts);
+}
+
+/** Mixes from the cheapest on; while they stay undecided, dives and regroups for a better plan in between. */
+function improve(state: State, mixes: MixSearch): void {
+  const { context } = state;
+  let groups: Generator<number[]> | null = null;
+  let dived = false;
+  let nodes = FIRST_NODES;
+  for (;;) {
+    const step = mixes.step(state.below(), nodes);
+    state.raise(mixes.lower());
+    if (step.kind === 'found') state.offer(step.plan.patterns, step.plan.picked);
+    state.raise(mixes.lower());
+    if (state.done() || step.kind === 'out of work' || context.spend(0)) return;
+    if (mixes.undecided.length === 0 && step.kind === 'moved') continue;
+    const plan = state.plan();
+    if (!dived) {
+      dived = true;
+      const picked = plan?.picked ?? mixes.undecided[0]!.picked;
+      const counts = context.problem.stock.map((s) => s.count);
+      const columns = dive(context, demandOf(context.problem, picked), counts, state.below());
+      if (columns)
+        state.offer(
+          columns.map((c) => c.pattern),
+          picked,
+        );
+    }
+    groups = regroup(state, groups);
+    if (step.kind === 'done') {
+      nodes *= 4;
+      mixes.reopen();
+    }
+    if (state.done() || context.spend(0)) return;
+  }
+}
+
+/** A round of cutting a few slabs again; begins a new order of groups whenever the plan has changed. */
+function regroup(state: State, groups: Generator<number[]> | null): Generator<number[]> | null {
+  let order = groups;
+  for (let n = 0; n < GROUPS_PER_ROUND; n++) {
+    const plan = state.plan();
+    if (!plan || plan.patterns.length < 2 || state.context.spend(0)) return null;
+    order ??= groupsOf(plan.patterns.length, 4);
+    const group = order.next().value as number[];
+    const better = recut(state.context, plan.patterns, group);
+    if (!better) continue;
+    const kept = plan.patterns.filter((_, i) => !group.includes(i));
+    state.offer([...kept, ...better], plan.picked);
+    order = null;
+    if (state.done()) return null;
+  }
+  return order;
+}
+
+interface State {
+  readonly context: SearchContext;
+  readonly plan: () => FoundPlan | null;
+  /** What a better plan must cost less than. */
+  readonly below: () => number;
+  readonly done: () => boolean;
+  readonly raise: (bound: number) => void;
+  readonly offer: (patterns: readonly Pattern[], picked: readonly number[]) => void;
+  readonly result: (cuts: readonly MixCut[]) => SearchResult;
+}
+
+function createState(problem: Problem, { stop, workLimit, onBetter }: SearchLimits): State {
+  const rowsAt = createDepthRows(problem);
+  let work = 0;
+  let best: FoundPlan | null = null;
+  let lower = 0;
+  const context: SearchContext = {
+    problem,
+    rowsAt,
+    plansAt: createLanePlans(problem, rowsAt),
+    pricing: createPricing(problem, rowsAt),
+    relaxed: createColumnPool<Column>(),
+    real: createColumnPool<RealColumn>(),
+    most: problem.items.map((_, i) => mostOf(problem, i)),
+    spend(units) {
+      work += units;
+      return work >= workLimit || stop();
+    },
+  };
+  const below = (): number => best?.cost ?? Infinity;
+  return {
+    context,
+    plan: () => best,
+    below,
+    done: () => best !== null && lower >= best.cost,
+    raise: (bound) => void (lower = Math.max(lower, Math.min(bound, below()))),
+    offer(patterns, picked) {
+      const cost = patterns.reduce((sum, p) => sum + problem.stock[p.stock]!.price, 0);
+      for (const pattern of patterns) {
+        const column = makeColumn(pattern);
+        context.relaxed.add(column);
+        context.real.add(column);
+      }
+      if (cost >= below()) return;
+      best = { patterns, picked, cost };
+      onBetter(best, lower);
+    },
+    result: (cuts) => ({ plan: best, lower, cuts, work }),
+  };
+}
+
+/** Most copies of an item that any way of settling the choices needs. */
+const mostOf = (problem: Problem, i: number): number =>
+  problem.choices.reduce((sum, c) => sum + Math.max(...c.options.map((o) => o.need[i]!)), problem.fixed.need[i]!);
+
+function boundOf(problem: Problem, cuts: readonly MixCut[], below: number): number {
+  const prices = problem.stock.map((s) => s.price);
+  const counts = problem.stock.map((s) => s.count);
+  const answer = cheapestMix({ prices, counts, cuts, tooSmall: [] }, below, MIX_NODES);
+  return answer.kind === 'mix' ? answer.mix.cost : answer.kind === 'none' ? below : answer.bound;
+}
+
+/** Option numbers to try at once: every option with the others at their first. */
+function settledChoices(problem: Problem): number[][] {
+  const first = problem.choices.map(() => 0);
+  const others = problem.choices.flatMap((choice, c) =>
+    choice.options.slice(1).map((_, o) => first.map((p, i) => (i === c ? o + 1 : p))),
+  );
+  return [first, ...others];
+}
