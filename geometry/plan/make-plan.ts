@@ -34,8 +34,10 @@ export interface NestGiven {
 export function finishPlan(laid: Laid, layout: Layout, settings: ShopSettings, given: NestGiven): Plan {
   const { room, tops } = laid;
   const { material, climate, fixing } = layout;
-  const deepest = Math.max(0, ...tops.pieces.filter((piece) => piece.kind !== 'strip').map((piece) => piece.depth));
-  const movement = movementOf(material, climate, deepest || material.slabDepth, settings);
+  // The wall gap and the slots belong to runs; a kitchen of islands alone still moves.
+  const depths = (layout.runs.length > 0 ? layout.runs : layout.islands).map((top) => top.depth);
+  const deepest = depths.length > 0 ? Math.max(...depths) : material.slabDepth;
+  const movement = movementOf(material, climate, deepest, settings);
   const instance = nestInstanceOf(layout, tops.pieces);
   const nest = given.nest !== null && given.nest.instance === instance.id ? given.nest : null;
   const pieces = tops.pieces.map((piece) => ({

@@ -1,4 +1,4 @@
-import type { RoomReadings, Wall } from '../core/layout';
+import { wallLabel, type RoomReadings, type Wall } from '../core/layout';
 import { distance } from '../core/vector';
 import type { RoomInput, WallInput } from '../room/types';
 
@@ -22,7 +22,7 @@ export function roomInputOf(room: RoomReadings, provisional = false): RoomInput 
           a: corner.triangle.a.value,
           b: corner.triangle.b.value,
           c: corner.triangle.c.value,
-          ...(corner.triangle.c.sd !== undefined && { sd: corner.triangle.c.sd }),
+          ...sdOf(corner.triangle.c.sd ?? corner.sd),
         },
       }),
       ...(corner.angle !== undefined && { angleDeg: corner.angle }),
@@ -36,11 +36,14 @@ export function roomInputOf(room: RoomReadings, provisional = false): RoomInput 
       ...(tie.length.sd !== undefined && { sd: tie.length.sd }),
     })),
     tapeSd: room.tapeSd,
+    labels: Object.fromEntries(room.walls.map((wall, i) => [wall.id, wallLabel(i)])),
     trust: room.trust,
     ignore: room.ignore,
     ...(room.sketch.length > 0 && { sketch: room.sketch }),
   };
 }
+
+const sdOf = (sd: number | undefined) => (sd === undefined ? {} : { sd });
 
 /** Walls without a tape reading, by id. */
 export function untapedWalls(room: RoomReadings): readonly string[] {

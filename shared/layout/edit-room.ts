@@ -85,6 +85,18 @@ function rejoin(room: Room): void {
   const ids = new Set(room.walls.map((w) => w.id));
   room.corners = cornersOf(room);
   room.ties = room.ties.filter((t) => ids.has(t.from.wall) && ids.has(t.to.wall));
+  forgetMarks(room);
+}
+
+/** Trust and ignore marks of readings that are gone. */
+function forgetMarks(room: Room): void {
+  const names = new Set([
+    ...room.walls.map((w) => `wall ${w.id}`),
+    ...room.corners.map((c) => `corner ${c.between.join('-')}`),
+    ...room.ties.map((t) => `tie ${t.id}`),
+  ]);
+  room.trust = room.trust.filter((name) => names.has(name));
+  room.ignore = room.ignore.filter((name) => names.has(name));
 }
 
 function traceRoom(room: Room, edit: Of<'traceRoom'>): void {
@@ -218,7 +230,7 @@ export function applyRoomEdit(draft: Draft<Layout>, edit: RoomEdit): void {
     case 'removeTie':
       find(room.ties, edit.tie, 'tie');
       room.ties = room.ties.filter((t) => t.id !== edit.tie);
-      return;
+      return forgetMarks(room);
     case 'setProfile':
       wallOf(room, edit.wall).profile = edit.profile;
       return;

@@ -46,4 +46,30 @@ export function readingIn(units: LengthUnit) {
   });
 }
 
+/** One reading or a list of them, always as a list. */
+export function readingsIn(units: LengthUnit) {
+  return z.union([rawLengthSchema, z.array(rawLengthSchema).max(12)]).transform((raw, context): Reading[] => {
+    const one = readingIn(units);
+    const list = Array.isArray(raw) ? raw : [raw];
+    return list.flatMap((item, i) => {
+      const read = one.safeParse(item);
+      if (read.success) return [read.data];
+      const path = Array.isArray(raw) ? [i] : [];
+      context.addIssue({ code: 'custom', message: read.error.issues[0]!.message, path });
+      return [];
+    });
+  });
+}
+
+/** A place along a wall: 'end' is its right-hand corner; gives inches. */
+export function alongIn(units: LengthUnit) {
+  return rawLengthSchema.transform((raw, context): number | 'end' => {
+    if (raw === 'end') return raw;
+    const result = inchesOf(raw, units, false);
+    if ('value' in result) return result.value;
+    context.addIssue({ code: 'custom', message: result.message });
+    return z.NEVER;
+  });
+}
+
 const textOf = (value: number, units: LengthUnit): string => (units === 'in' ? String(value) : `${value} ${units}`);

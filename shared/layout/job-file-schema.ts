@@ -1,7 +1,7 @@
 import { z } from 'zod';
 
 import type { LengthUnit } from '@/geometry/tape/parse-length';
-import { fileUnitsSchema, lengthIn, readingIn } from './file-length';
+import { alongIn, fileUnitsSchema, lengthIn, readingIn, readingsIn } from './file-length';
 import { acceptedFindingSchema, climateYearSchema, finishSchema } from './layout-schema';
 
 const id = z.string().min(1).max(40);
@@ -12,7 +12,7 @@ export function roomBlockSchema(units: LengthUnit) {
   const length = lengthIn(units);
   const signed = lengthIn(units, true);
   const reading = readingIn(units);
-  const along = z.union([z.literal('end'), length]);
+  const along = alongIn(units);
   const mark = z.strictObject({ wall: id, at: along });
   const sd = length.optional();
   return z.strictObject({
@@ -23,7 +23,7 @@ export function roomBlockSchema(units: LengthUnit) {
       .array(
         z.strictObject({
           id,
-          length: z.union([reading, z.array(reading).max(12)]).optional(),
+          length: readingsIn(units).optional(),
           sd,
           profile: z.array(z.strictObject({ at: length, off: signed })).optional(),
           outOfPlumb: signed.optional(),
@@ -54,7 +54,7 @@ export function jobFileSchema(units: LengthUnit) {
   const length = lengthIn(units);
   const signed = lengthIn(units, true);
   const point = z.tuple([signed, signed]);
-  const along = z.union([z.literal('end'), length]);
+  const along = alongIn(units);
   const end = z.discriminatedUnion('kind', [
     z.strictObject({ kind: z.literal('wall'), clearance: length.optional() }),
     z.strictObject({ kind: z.literal('open'), overhang: signed.optional(), radius: length.optional() }),

@@ -125,7 +125,7 @@ export function roomOf(file: { room: JobFile['room'] }, settings: ShopSettings):
   const { room } = file;
   const closed = room.closed ?? false;
   const walls: Wall[] = room.walls.map(({ length, sd, profile, ...wall }) => {
-    const readings = length === undefined ? [] : Array.isArray(length) ? length : [length];
+    const readings = length ?? [];
     return {
       ...wall,
       length: readings.map((reading) => ({ ...reading, ...(sd !== undefined && { sd }) })),

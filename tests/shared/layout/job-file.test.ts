@@ -93,7 +93,7 @@ describe('parseJobFile', () => {
       'letters in a length',
       { ...FILE, room: { ...FILE.room, walls: [{ id: 'A', length: 'abc' }] } },
       'room.walls[0].length',
-      /./,
+      /abc/,
     ],
     ['a run on no wall', { ...FILE, runs: [{ ...FILE.runs[0], wall: 'Z' }] }, 'runs[0].wall', /no wall "Z"/],
     ['a cutout in no top', { ...FILE, cutouts: [{ ...FILE.cutouts[0], on: '9' }] }, 'cutouts[0].on', /no run/],
