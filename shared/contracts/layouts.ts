@@ -45,7 +45,7 @@ export const listEdits = contract({
   summary: 'Edits after a sequence number, in order: what others did.',
   may: 'job.see',
   params: layoutParams,
-  query: z.strictObject({ since: z.coerce.number().int().min(0) }),
+  query: z.strictObject({ since: z.coerce.number().int().min(0).default(0) }),
   response: editsSinceSchema,
   problems: ['not_found'],
 });
