@@ -61,7 +61,8 @@ export function runServerProgram(program, args, { input = '', silent = false } =
       // The server's user may not be able to enter the folder we were called from.
       cwd: '/',
       detached: true,
-      env: { PATH: process.env.PATH, LC_ALL: 'C.UTF-8' },
+      // Nothing of ours: a PGDATA or PGPORT of the shell must not lead it to another cluster.
+      env: { NODE_ENV: process.env.NODE_ENV, PATH: process.env.PATH, LC_ALL: 'C.UTF-8' },
       stdio: silent ? 'ignore' : 'pipe',
     });
     let output = '';

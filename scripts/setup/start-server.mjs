@@ -25,7 +25,7 @@ export async function startServer(root) {
   try {
     loadSettingsFile(root);
     await ensureNpmPackages(root);
-    const environment = withoutEmpty({ NODE_ENV: 'production', ...process.env });
+    const environment = withoutEmpty({ ...process.env, NODE_ENV: process.env.NODE_ENV || 'production' });
     environment.TOKEN_SECRET ??= keptSecret(stateFolder(root, environment));
     process.exitCode = environment.DATABASE_URL
       ? await serve(root, environment)
@@ -99,5 +99,6 @@ function keptSecret(state) {
  * @returns {NodeJS.ProcessEnv} without the names that were given no value
  */
 function withoutEmpty(environment) {
-  return Object.fromEntries(Object.entries(environment).filter(([, value]) => value !== ''));
+  const given = Object.entries(environment).filter(([, value]) => value !== '');
+  return /** @type {NodeJS.ProcessEnv} */ (Object.fromEntries(given));
 }
