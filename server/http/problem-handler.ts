@@ -1,6 +1,7 @@
 import type { ErrorRequestHandler, RequestHandler, Response } from 'express';
 import type { Logger } from 'pino';
 
+import { loggable } from './loggable';
 import { ProblemError } from './problem-error';
 
 /** Turns every failure of an API request into `application/problem+json`; what nobody expected is logged once, untold. */
@@ -8,7 +9,8 @@ export function problemHandler(log: Logger): ErrorRequestHandler {
   // Express knows an error handler by its four parameters.
   return (error: unknown, req, res, next) => {
     const problem = asProblem(error);
-    if (!problem) log.error({ err: error, requestId: req.id, method: req.method, path: req.path }, 'request failed');
+    if (!problem)
+      log.error({ failure: loggable(error), requestId: req.id, method: req.method, path: req.path }, 'request failed');
     if (res.headersSent) {
       // Half an answer is out; only closing the connection tells the client that it is not whole.
       next(error);

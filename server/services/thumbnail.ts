@@ -6,6 +6,7 @@ import type { ShopSettings } from '@/geometry/core/settings';
 import { layRoom } from '@/geometry/plan/lay-room';
 import type { Piece } from '@/geometry/top/types';
 import type { Thumbnail } from '@/shared/contracts/jobs';
+import { loggable } from '../http/loggable';
 
 /** Places are kept to this many steps an inch: a list draws a room an inch or two wide. */
 const STEPS_PER_INCH = 16;
@@ -33,7 +34,7 @@ export function drawThumbnail(layout: Layout, settings: ShopSettings, log: Logge
   try {
     return thumbnailOf(layout, settings);
   } catch (error) {
-    log.error({ err: error }, 'the outline of a layout could not be computed');
+    log.error({ failure: loggable(error) }, 'the outline of a layout could not be computed');
     return null;
   }
 }

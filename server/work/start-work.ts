@@ -3,6 +3,7 @@ import type { Logger } from 'pino';
 
 import type { Config } from '../config';
 import { asOwner } from '../db/tenant-transaction';
+import { loggable } from '../http/loggable';
 import { outboxOnlyTransport, smtpTransport } from '../mail/mail-transport';
 import { sweep } from '../repositories/sweep-repository';
 import { deliverMail } from './deliver-mail';
@@ -41,7 +42,7 @@ function repeat(name: string, everyMs: number, log: Logger, work: () => Promise<
     underWay ??= work()
       .then((done) => log.debug({ work: name, ...done }, 'work done'))
       // The next turn tries again: a database that is away for a minute must not end the server.
-      .catch((error: unknown) => log.error({ work: name, err: error }, 'work failed'))
+      .catch((error: unknown) => log.error({ work: name, failure: loggable(error) }, 'work failed'))
       .finally(() => {
         underWay = null;
       });
