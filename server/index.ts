@@ -62,7 +62,8 @@ function greeting(config: Config, signIns: readonly DemoSignIn[]): string {
   if (signIns.length > 0) {
     const width = Math.max(...signIns.map(({ email }) => email.length));
     lines.push('Demo sign-ins (e-mail, password):');
-    for (const { email, password, role } of signIns) lines.push(`  ${email.padEnd(width)}  ${password}  ${role.replaceAll('_', ' ')}`);
+    for (const { email, password, role } of signIns)
+      lines.push(`  ${email.padEnd(width)}  ${password}  ${role.replaceAll('_', ' ')}`);
   }
   lines.push('Ctrl-C stops it.');
   return lines.join('\n');
