@@ -26,7 +26,7 @@ export interface ReadingPadProps {
 export function ReadingPad({ view, target, firstKey }: ReadingPadProps) {
   const { layout } = useOpenJob();
   const next = nextTarget(layout, view.room.fit?.next ?? null, target);
-  const goOn = () => (next ? view.open(next) : view.stopTyping());
+  const goOn = () => (next ? view.open(next) : view.select(null));
   const nextLabel = next
     ? ({ label: targetName(layout, next), icon: 'next' } as const)
     : ({ label: 'Done', icon: 'check' } as const);
