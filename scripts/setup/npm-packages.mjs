@@ -4,6 +4,7 @@ import { existsSync, readFileSync, rmSync, statfsSync, writeFileSync } from 'nod
 import path from 'node:path';
 
 import { run } from './children.mjs';
+import { withHome } from './own-folders.mjs';
 import { diskFull, saysDiskFull, SetupProblem } from './problem.mjs';
 import { step } from './steps.mjs';
 
@@ -69,7 +70,10 @@ async function install(root) {
   // Under `npm start` npm says where it is itself, which is right even when PATH is not.
   const script = process.env.npm_execpath;
   const [command, first] = script ? [process.execPath, [script]] : ['npm', []];
-  const { code, output } = await run(command, [...first, 'ci', '--no-audit', '--no-fund'], { cwd: root });
+  const { code, output } = await run(command, [...first, 'ci', '--no-audit', '--no-fund'], {
+    cwd: root,
+    env: withHome(),
+  });
   // npm only warns of files that it could not write for want of space, and calls that a success.
   const full = saysDiskFull(output);
   if (code === 0 && !full) return;
@@ -77,8 +81,9 @@ async function install(root) {
   rmSync(path.join(root, RECORD), { force: true });
   if (full) throw diskFull(root);
   if (/EACCES|EPERM/.test(output)) {
+    const place = /npm error path (.+)/.exec(output)?.[1] ?? root;
     throw new SetupProblem(
-      `npm may not write to ${root}: give this user the right to write there, or use a checkout of your own.`,
+      `npm may not write to ${place}: give this user the right to write there, or use a checkout of your own.`,
     );
   }
   if (/ENOTFOUND|EAI_AGAIN|ECONNREFUSED|ETIMEDOUT|ECONNRESET/.test(output)) {

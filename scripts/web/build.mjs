@@ -1,9 +1,9 @@
 // @ts-check
-import { existsSync, mkdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
-import os from 'node:os';
+import { existsSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 
 import { run } from '../setup/children.mjs';
+import { temporaryFolder, withHome } from '../setup/own-folders.mjs';
 import { diskFull, saysDiskFull, SetupProblem } from '../setup/problem.mjs';
 import { step } from '../setup/steps.mjs';
 import { compressTwins } from './compress.mjs';
@@ -54,24 +54,18 @@ async function exportApp(root, folder) {
   const { code, output } = await run(process.execPath, [expo, 'export', '-p', 'web', '--output-dir', folder], {
     cwd: root,
     env: {
-      ...process.env,
+      ...withHome(),
       NODE_ENV: 'production',
       CI: '1',
       EXPO_NO_TELEMETRY: '1',
       EXPO_OFFLINE: '1',
-      TMPDIR: cacheFolder(),
+      // The bundler's cache lies here.
+      TMPDIR: temporaryFolder('build'),
     },
   });
   if (code === 0) return;
   if (saysDiskFull(output)) throw diskFull(root);
   throw new SetupProblem(`The web app could not be built:\n${output.trim().split('\n').slice(-30).join('\n')}`);
-}
-
-/** The bundler's cache lies in the temporary folder under a name that all users share, and only the first could write it. */
-function cacheFolder() {
-  const folder = path.join(os.tmpdir(), `offsquare-build-${process.getuid?.() ?? 'user'}`);
-  mkdirSync(folder, { recursive: true, mode: 0o700 });
-  return folder;
 }
 
 /**
