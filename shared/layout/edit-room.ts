@@ -4,6 +4,7 @@ import type { Layout } from '@/geometry/core/layout';
 import type { Draft } from 'immer';
 import { EditRefused, find, sameCorner } from './edit-refused';
 import { betweenSchema, readingSchema, stationSchema, tapeSdSchema, tieSchema, triangleSchema } from './layout-schema';
+import { breakWall, breakWallSchema, mirrorRoom, mirrorRoomSchema } from './reshape-room';
 import { cornersOf, freshWallId } from './wall-chain';
 
 const uuid = z.uuid();
@@ -66,6 +67,8 @@ export const roomEditSchema = z.discriminatedUnion('kind', [
     mark: z.enum(['trust', 'ignore']).nullable(),
   }),
   z.strictObject({ id: uuid, kind: z.literal('setTapeSd'), tapeSd: tapeSdSchema }),
+  breakWallSchema,
+  mirrorRoomSchema,
 ]);
 
 export type RoomEdit = z.infer<typeof roomEditSchema>;
@@ -86,6 +89,18 @@ function rejoin(room: Room): void {
   room.corners = cornersOf(room);
   room.ties = room.ties.filter((t) => ids.has(t.from.wall) && ids.has(t.to.wall));
   forgetMarks(room);
+}
+
+/** What stood along a wall goes with it, and so does the top over it. */
+function dropStranded(draft: Draft<Layout>): void {
+  const ids = new Set(draft.room.walls.map((w) => w.id));
+  draft.bases = draft.bases.filter((base) => ids.has(base.wall));
+  const gone = new Set(draft.runs.filter((run) => !ids.has(run.wall)).map((run) => run.id));
+  if (gone.size === 0) return;
+  draft.runs = draft.runs.filter((run) => !gone.has(run.id));
+  draft.cutouts = draft.cutouts.filter((cutout) => !gone.has(cutout.on));
+  draft.seams = draft.seams.filter((seam) => !gone.has(seam.on));
+  draft.joints = draft.joints.filter((joint) => !joint.between.some((run) => gone.has(run)));
 }
 
 /** Trust and ignore marks of readings that are gone. */
@@ -166,17 +181,24 @@ export function applyRoomEdit(draft: Draft<Layout>, edit: RoomEdit): void {
   const room = draft.room;
   switch (edit.kind) {
     case 'traceRoom':
-      return traceRoom(room, edit);
+      traceRoom(room, edit);
+      return dropStranded(draft);
+    case 'breakWall':
+      return breakWall(draft, edit);
+    case 'mirrorRoom':
+      return mirrorRoom(draft, edit);
     case 'moveCorner':
       if (edit.index >= room.sketch.length) throw new EditRefused('The corner to move is gone.');
       room.sketch[edit.index] = edit.to;
+      room.corners = cornersOf(room);
       return;
     case 'addWall':
       return addWall(room, edit);
     case 'splitWall':
       return splitWall(room, edit);
     case 'removeWall':
-      return removeWall(room, edit);
+      removeWall(room, edit);
+      return dropStranded(draft);
     case 'closeRing':
       return closeRing(room, edit);
     case 'addReading':
