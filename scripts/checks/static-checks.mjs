@@ -3,7 +3,7 @@ import { existsSync } from 'node:fs';
 import path from 'node:path';
 
 import { run } from '../setup/children.mjs';
-import { step } from '../setup/steps.mjs';
+import { step, took } from '../setup/steps.mjs';
 
 /** Folders whose imports have a direction; package.json's `directions` names the same ones. */
 const FOLDERS = ['app', 'components', 'geometry', 'shared', 'server', 'migrations', 'seeds'];
@@ -12,17 +12,40 @@ const FOLDERS = ['app', 'components', 'geometry', 'shared', 'server', 'migration
  * @typedef {object} Count
  * @property {number} passed
  * @property {number} failed
+ *
+ * @typedef {object} Check
+ * @property {string} title
+ * @property {string} program - inside node_modules
+ * @property {readonly string[]} args
  */
 
 /**
- * Checks types, lint, import directions and formatting, all of them whatever the first ones say.
+ * Checks types, lint, import directions and formatting, all at once, and says what each found.
  *
  * @param {string} root - absolute path of the checkout
  * @returns {Promise<Count>}
  */
 export async function runStaticChecks(root) {
+  const results = await step(
+    'Types, lint, import directions and format',
+    () => Promise.all(checksOf(root).map((check) => runCheck(root, check))),
+    (ended) => (ended.every(({ code }) => code === 0) ? 'passed' : 'failed'),
+  );
+  for (const { title, code, output, time } of results) {
+    console.log(`  ${title}: ${code === 0 ? 'passed' : 'failed'} in ${time}`);
+    if (code !== 0) console.log(output.trimEnd());
+  }
+  const passed = results.filter(({ code }) => code === 0).length;
+  return { passed, failed: results.length - passed };
+}
+
+/**
+ * @param {string} root
+ * @returns {Check[]}
+ */
+function checksOf(root) {
   const folders = FOLDERS.filter((folder) => existsSync(path.join(root, folder)));
-  const checks = [
+  return [
     { title: 'Types', program: 'typescript/bin/tsc', args: ['--noEmit'] },
     { title: 'Lint', program: 'eslint/bin/eslint.js', args: ['.', '--max-warnings=0'] },
     {
@@ -32,26 +55,16 @@ export async function runStaticChecks(root) {
     },
     { title: 'Format', program: 'prettier/bin/prettier.cjs', args: ['--check', '.'] },
   ];
-  const count = { passed: 0, failed: 0 };
-  for (const { title, program, args } of checks) {
-    const passed = await runCheck(root, title, [path.join(root, 'node_modules', program), ...args]);
-    count[passed ? 'passed' : 'failed'] += 1;
-  }
-  return count;
 }
 
 /**
  * @param {string} root
- * @param {string} title
- * @param {readonly string[]} args - of Node.js
- * @returns {Promise<boolean>}
+ * @param {Check} check
  */
-async function runCheck(root, title, args) {
-  const { code, output } = await step(
-    title,
-    () => run(process.execPath, args, { cwd: root }),
-    (ended) => (ended.code === 0 ? 'passed' : 'failed'),
-  );
-  if (code !== 0) console.log(output.trimEnd());
-  return code === 0;
+async function runCheck(root, { title, program, args }) {
+  const began = Date.now();
+  const { code, output } = await run(process.execPath, [path.join(root, 'node_modules', program), ...args], {
+    cwd: root,
+  });
+  return { title, code, output, time: took(began) };
 }
