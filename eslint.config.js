@@ -1,6 +1,5 @@
 const { defineConfig } = require('eslint/config');
 const expo = require('eslint-config-expo/flat');
-const globals = require('globals');
 
 /** A folder may not reach into these others (see DEVELOPERS.md, 'Map of the house'). */
 const zone = (target, from, message) => ({ target: `./${target}`, from: from.map((f) => `./${f}`), message });
@@ -29,8 +28,16 @@ module.exports = defineConfig([
         'error',
         {
           zones: [
-            zone('geometry', ['app', 'components', 'server', 'shared', 'migrations', 'seeds'], 'geometry imports only itself'),
-            zone('shared', ['app', 'components', 'server', 'migrations', 'seeds'], 'shared sits below client and server'),
+            zone(
+              'geometry',
+              ['app', 'components', 'server', 'shared', 'migrations', 'seeds'],
+              'geometry imports only itself',
+            ),
+            zone(
+              'shared',
+              ['app', 'components', 'server', 'migrations', 'seeds'],
+              'shared sits below client and server',
+            ),
             zone('components', ['app', 'server', 'migrations', 'seeds'], 'components never see server or screens'),
             zone('app', ['server', 'geometry', 'migrations', 'seeds'], 'routes hold no logic; the client talks HTTP'),
             zone('server', ['app', 'components', 'migrations', 'seeds'], 'the server never sees the UI'),
@@ -68,7 +75,6 @@ module.exports = defineConfig([
       ],
     },
   },
-  { files: ['tests/**', 'jest.config.js'], languageOptions: { globals: { ...globals.jest, ...globals.node } } },
   {
     files: ['server/config.ts', 'scripts/**', 'tests/**', 'jest.config.js'],
     rules: { 'no-restricted-properties': 'off' },
