@@ -1,5 +1,6 @@
 import type { Layout, RackPiece, StockSlab } from '../core/layout';
 import type { NestInstance, NestPart, NestSlab } from '../nest/types';
+import { convexHull } from '../top/convex-hull';
 import type { Piece } from '../top/types';
 
 /** Slabs within this of the wanted thickness are the same slab, inches. */
@@ -53,7 +54,8 @@ function partOf(piece: Piece, turn: boolean, turnOver: boolean): NestPart {
   return {
     id: piece.letter,
     ...(piece.count > 1 && { count: piece.count }),
-    outline: piece.shape,
+    // A diagonal front or an inner corner is cut after the piece: it lies on the slab as its convex hull.
+    outline: convexHull(piece.shape),
     turn,
     turnOver,
   };

@@ -161,6 +161,7 @@ export function jobFileSchema(units: LengthUnit) {
           kind: z.enum(['miter', 'butt', 'diagonal']),
           through: id.optional(),
           width: length.optional(),
+          angle: z.number().min(1).max(179).optional(),
           assembled: z.enum(['shop', 'site']).optional(),
         }),
       )

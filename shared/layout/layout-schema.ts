@@ -134,6 +134,7 @@ export const jointChoiceSchema = z.strictObject({
   kind: z.enum(['miter', 'butt', 'diagonal']),
   through: id.optional(),
   width: size.optional(),
+  angle: z.number().min(1).max(179).optional(),
   assembled: z.enum(['shop', 'site']),
 });
 

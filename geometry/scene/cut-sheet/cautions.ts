@@ -27,7 +27,7 @@ export function cutCautions(slab: PlacedSlab, layout: Layout, head: SheetHead): 
     [
       { text: 'Slab not ' },
       { inches: slab.depth, step, style: styles.number },
-      { text: ` all along? Stop, tell ${head.signedBy ?? head.drawnBy}.` },
+      { text: ` all along? Stop, tell ${head.signedBy ?? (head.drawnBy || 'the designer')}.` },
     ],
     ...(slab.defects.length > 0 ? [[{ text: 'Keep every piece clear of the crossed defect.' }]] : []),
     [{ text: 'Guard on. Cover eyes, ears, mouth: saw dust.' }],

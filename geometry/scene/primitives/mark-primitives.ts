@@ -53,7 +53,7 @@ export function markPrimitives(mark: Mark, view: View): Primitive[] {
       return [
         ...pen.stem(),
         { kind: 'path', path: pen.circle(0.5), fill: mark.ink, line: pen.line(0.08, 'card') },
-        ...pen.icon('slide', 'onchalk', 0.6),
+        ...pen.icon('slide', 'onchalk', 0.6, true),
       ];
     case 'turnOver':
       return pen.icon('turnOver', mark.ink);
@@ -137,13 +137,15 @@ class MarkPen {
   }
 
   /** An icon of the 24 grid, as large as `share` of the mark. */
-  icon(name: IconName, ink: Ink, share = 1): Primitive[] {
+  icon(name: IconName, ink: Ink, share = 1, across = false): Primitive[] {
     const scale = share / 24;
+    // Across: its x axis lies square to the mark's turn.
+    const lay = (x: number, y: number): Point => (across ? [y * scale, -x * scale] : [x * scale, y * scale]);
     return ICONS[name].map((stroke) => ({
       kind: 'path',
       path: stroke.paths.flatMap((points) =>
         this.through(
-          points.map(([x, y]): Point => [(x - 12) * scale, (y - 12) * scale]),
+          points.map(([x, y]) => lay(x - 12, y - 12)),
           stroke.closed ?? false,
         ),
       ),
