@@ -14,14 +14,6 @@ export interface LpAnswer {
   readonly shortfall: number;
 }
 
-export interface LinearProgram {
-  /** Adds a column and gives its number. */
-  addColumn(cost: number, rows: readonly number[], factors: readonly number[]): number;
-  /** Minimises; goes on from the last basis. */
-  solve(): LpAnswer;
-  readonly pivots: () => number;
-}
-
 interface Column {
   readonly cost: number;
   readonly rows: readonly number[];
@@ -37,27 +29,66 @@ const STALL = 60;
 
 /**
  * Minimises a linear program over columns that arrive in batches (primal revised simplex with a dense basis inverse; rows
- * are few, columns many and thin). Right-hand sides must be 0 or more.
+ * are few, columns many and thin). Right-hand sides must be 0 or more. Each `solve` goes on from the last basis.
  */
-export function createLinearProgram(rows: readonly LpRow[]): LinearProgram {
-  const m = rows.length;
-  const columns: Column[] = [];
-  rows.forEach((row, i) => {
-    if (row.sense !== '<=') columns.push({ cost: row.penalty, rows: [i], factors: [1] });
-    if (row.sense !== '=') columns.push({ cost: 0, rows: [i], factors: [row.sense === '<=' ? 1 : -1] });
-  });
-  const own = columns.length;
-  const basis = rows.map((_, i) => columns.findIndex((c) => c.rows[0] === i && c.factors[0] === 1));
-  const inBasis = new Set(basis);
-  const inverse = new Float64Array(m * m);
-  const values = new Float64Array(m);
-  const duals = new Float64Array(m);
-  const step = new Float64Array(m);
-  let pivots = 0;
-  let sinceRefresh = 0;
-  for (let i = 0; i < m; i++) inverse[i * m + i] = 1;
+export class LinearProgram {
+  private readonly m: number;
+  private readonly columns: Column[] = [];
+  private readonly own: number;
+  private readonly basis: number[] = [];
+  private readonly basic: boolean[] = [];
+  private readonly inverse: Float64Array;
+  private readonly values: Float64Array;
+  private readonly duals: Float64Array;
+  private readonly step: Float64Array;
+  private sinceRefresh = 0;
 
-  function findValues(): void {
+  constructor(private readonly rows: readonly LpRow[]) {
+    const m = rows.length;
+    this.m = m;
+    this.inverse = new Float64Array(m * m);
+    this.values = new Float64Array(m);
+    this.duals = new Float64Array(m);
+    this.step = new Float64Array(m);
+    for (let i = 0; i < m; i++) {
+      const row = rows[i]!;
+      this.basis.push(this.columns.length);
+      if (row.sense !== '<=') this.columns.push({ cost: row.penalty, rows: [i], factors: [1] });
+      if (row.sense !== '=') this.columns.push({ cost: 0, rows: [i], factors: [row.sense === '<=' ? 1 : -1] });
+      this.inverse[i * m + i] = 1;
+    }
+    this.own = this.columns.length;
+    for (const j of this.basis) this.basic[j] = true;
+  }
+
+  /** Adds a column and gives its number. */
+  addColumn(cost: number, rows: readonly number[], factors: readonly number[]): number {
+    this.columns.push({ cost, rows, factors });
+    return this.columns.length - 1 - this.own;
+  }
+
+  /** @throws RangeError when there is no least value */
+  solve(): LpAnswer {
+    this.findValues();
+    let last = Infinity;
+    let stalled = 0;
+    for (;;) {
+      if (this.sinceRefresh >= REFRESH) this.refresh();
+      this.findDuals();
+      const entering = this.findEntering(stalled > STALL);
+      if (entering < 0) break;
+      const leaving = this.findLeaving(this.columns[entering]!);
+      if (leaving < 0) throw new RangeError('the linear program has no least value');
+      this.pivot(leaving, entering);
+      const objective = this.cost();
+      stalled = objective < last - 1e-9 * Math.max(1, Math.abs(last)) ? 0 : stalled + 1;
+      last = Math.min(last, objective);
+    }
+    return this.answer();
+  }
+
+  private findValues(): void {
+    const { m, inverse, values, rows } = this;
     for (let i = 0; i < m; i++) {
       let sum = 0;
       for (let j = 0; j < m; j++) sum += inverse[i * m + j]! * rows[j]!.rhs;
@@ -65,46 +96,43 @@ export function createLinearProgram(rows: readonly LpRow[]): LinearProgram {
     }
   }
 
-  function findDuals(): void {
+  private findDuals(): void {
+    const { m, inverse, duals, basis, columns } = this;
     duals.fill(0);
     for (let i = 0; i < m; i++) {
-      const cost = columns[basis[i]!]!.cost;
+      const { cost } = columns[basis[i]!]!;
       if (cost === 0) continue;
       for (let j = 0; j < m; j++) duals[j]! += cost * inverse[i * m + j]!;
     }
   }
 
-  const reducedCost = (c: Column): number => {
-    let cost = c.cost;
-    for (let k = 0; k < c.rows.length; k++) cost -= duals[c.rows[k]!]! * c.factors[k]!;
-    return cost;
-  };
-
-  function findEntering(first: boolean): number {
+  private findEntering(first: boolean): number {
+    const { columns, duals, basic } = this;
     let best = -1;
     let least = -REDUCED;
     for (let j = 0; j < columns.length; j++) {
-      const cost = reducedCost(columns[j]!);
-      if (cost >= least || inBasis.has(j)) continue;
+      const { cost, rows, factors } = columns[j]!;
+      let reduced = cost;
+      for (let k = 0; k < rows.length; k++) reduced -= duals[rows[k]!]! * factors[k]!;
+      if (reduced >= least || basic[j]) continue;
       if (first) return j;
-      least = cost;
+      least = reduced;
       best = j;
     }
     return best;
   }
 
-  function findLeaving(entering: Column): number {
-    for (let i = 0; i < m; i++) {
-      let sum = 0;
-      for (let k = 0; k < entering.rows.length; k++) sum += inverse[i * m + entering.rows[k]!]! * entering.factors[k]!;
-      step[i] = sum;
-    }
+  private findLeaving({ rows, factors }: Column): number {
+    const { m, inverse, values, step } = this;
     let best = -1;
     let least = Infinity;
     for (let i = 0; i < m; i++) {
-      if (step[i]! <= PIVOT) continue;
-      const ratio = values[i]! / step[i]!;
-      if (ratio < least - 1e-12 || (ratio <= least + 1e-12 && best >= 0 && step[i]! > step[best]!)) {
+      let sum = 0;
+      for (let k = 0; k < rows.length; k++) sum += inverse[i * m + rows[k]!]! * factors[k]!;
+      step[i] = sum;
+      if (sum <= PIVOT) continue;
+      const ratio = values[i]! / sum;
+      if (ratio < least - 1e-12 || (ratio <= least + 1e-12 && best >= 0 && sum > step[best]!)) {
         least = Math.min(least, ratio);
         best = i;
       }
@@ -112,78 +140,51 @@ export function createLinearProgram(rows: readonly LpRow[]): LinearProgram {
     return best;
   }
 
-  function pivot(leaving: number, entering: number): void {
+  private pivot(leaving: number, entering: number): void {
+    const { m, inverse, values, step, basis } = this;
     const p = step[leaving]!;
-    for (let j = 0; j < m; j++) inverse[leaving * m + j]! /= p;
+    const at = leaving * m;
+    for (let j = 0; j < m; j++) inverse[at + j]! /= p;
     const moved = values[leaving]! / p;
     for (let i = 0; i < m; i++) {
       const f = step[i]!;
       if (i === leaving || f === 0) continue;
       values[i] = Math.max(0, values[i]! - f * moved);
-      for (let j = 0; j < m; j++) inverse[i * m + j]! -= f * inverse[leaving * m + j]!;
+      for (let j = 0; j < m; j++) inverse[i * m + j]! -= f * inverse[at + j]!;
     }
     values[leaving] = moved;
-    inBasis.delete(basis[leaving]!);
-    inBasis.add(entering);
+    this.basic[basis[leaving]!] = false;
+    this.basic[entering] = true;
     basis[leaving] = entering;
-    pivots++;
-    sinceRefresh++;
+    this.sinceRefresh++;
   }
 
-  function refresh(): void {
+  private refresh(): void {
     invert(
-      m,
-      basis.map((j) => columns[j]!),
-      inverse,
+      this.m,
+      this.basis.map((j) => this.columns[j]!),
+      this.inverse,
     );
-    sinceRefresh = 0;
-    findValues();
+    this.sinceRefresh = 0;
+    this.findValues();
   }
 
-  function solve(): LpAnswer {
-    findValues();
-    let last = Infinity;
-    let stalled = 0;
-    for (;;) {
-      if (sinceRefresh >= REFRESH) refresh();
-      findDuals();
-      const entering = findEntering(stalled > STALL);
-      if (entering < 0) break;
-      const leaving = findLeaving(columns[entering]!);
-      if (leaving < 0) throw new RangeError('the linear program has no least value');
-      pivot(leaving, entering);
-      const objective = costOf();
-      stalled = objective < last - 1e-9 * Math.max(1, Math.abs(last)) ? 0 : stalled + 1;
-      last = Math.min(last, objective);
-    }
-    return answer();
-  }
-
-  function costOf(): number {
+  private cost(): number {
     let sum = 0;
-    for (let i = 0; i < m; i++) sum += columns[basis[i]!]!.cost * values[i]!;
+    for (let i = 0; i < this.m; i++) sum += this.columns[this.basis[i]!]!.cost * this.values[i]!;
     return sum;
   }
 
-  function answer(): LpAnswer {
-    const x = new Array<number>(columns.length - own).fill(0);
+  private answer(): LpAnswer {
+    const x = new Array<number>(this.columns.length - this.own).fill(0);
     let shortfall = 0;
-    for (let i = 0; i < m; i++) {
-      const j = basis[i]!;
-      if (j >= own) x[j - own] = values[i]!;
-      else shortfall += columns[j]!.cost * values[i]!;
+    for (let i = 0; i < this.m; i++) {
+      const j = this.basis[i]!;
+      if (j >= this.own) x[j - this.own] = this.values[i]!;
+      else shortfall += this.columns[j]!.cost * this.values[i]!;
     }
-    return { objective: costOf(), x, duals: Array.from(duals), shortfall };
+    return { objective: this.cost(), x, duals: Array.from(this.duals), shortfall };
   }
-
-  return {
-    addColumn(cost, at, factors) {
-      columns.push({ cost, rows: at, factors });
-      return columns.length - 1 - own;
-    },
-    solve,
-    pivots: () => pivots,
-  };
 }
 
 /** Writes the inverse of the matrix with these columns, by Gauss-Jordan elimination with row exchange. */

@@ -3,7 +3,7 @@ import type { Lane, Section } from '../plan/pattern';
 import type { DepthRows } from '../row/depth-rows';
 import { fillLane } from './fill-lane';
 import type { LanePlans } from './lane-plans';
-import { relaxSection } from './section-lanes';
+import type { SectionRelaxer } from './section-lanes';
 
 export interface ValuedSection {
   readonly section: Section;
@@ -18,6 +18,7 @@ export interface ValuedSection {
  */
 export function bestSection(
   plans: LanePlans,
+  relaxer: SectionRelaxer,
   rowsAt: (depth: number) => DepthRows,
   shallow: readonly number[],
   room: number,
@@ -26,7 +27,7 @@ export function bestSection(
   kerf: number,
   depth: number,
 ): ValuedSection | null {
-  const relaxed = relaxSection(plans, rowsAt, shallow, room, value, demand);
+  const relaxed = relaxer.relax(room, value, demand);
   const net = value.map((v, i) => Math.max(0, v - relaxed.penalty[i]!));
   const ranked = relaxed.lanes.filter((lane) => lane.x > 1e-6).sort((a, b) => b.x - a.x);
   const left = [...demand];

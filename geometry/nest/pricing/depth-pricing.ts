@@ -6,9 +6,6 @@ import { CELLS, createRowTables } from './row-tables';
 import { searchRows, type RowCandidate, type RowQuery } from './search-rows';
 import { createSectionValues, type SectionValues } from './section-values';
 
-/** Most nodes of one search for the best rows; beyond it the table's own bound is used, which is a little higher. */
-const BEST_NODES = 60_000;
-
 export interface StockBest {
   /** No pattern of the class on this slab is worth more. */
   readonly bound: number;
@@ -21,8 +18,9 @@ export interface DepthPricing {
   readonly stock: readonly Stock[];
   readonly rows: DepthRows;
   readonly sections: SectionValues;
-  /** The best rows for each slab, `keep` of them. */
-  best(query: RowQuery, keep: number): StockBest[];
+  /** The best rows for each slab, `keep` of them, that are worth more than a pattern known already (by stock entry). When the nodes
+   * do not suffice, the bound is the table's own, which is higher. */
+  best(query: RowQuery, keep: number, known: readonly number[], nodes: number): StockBest[];
   /** Every row worth more than `above` (by slab); null when there are more than `most` or they take too long to list. */
   all(query: RowQuery, above: readonly number[], most: number, nodes: number): RowCandidate[][] | null;
   /** Units of work so far. */
@@ -51,15 +49,15 @@ export function createDepthPricing(
     return fill(rows.full, value, demand, withWorthless);
   }
 
-  function best(query: RowQuery, keep: number): StockBest[] {
+  function best(query: RowQuery, keep: number, known: readonly number[], nodeLimit: number): StockBest[] {
     updateSections(query);
     const tables = tablesFor(query, false);
     return stock.map((s) => {
-      const limits = { above: 0, keep, nodes: BEST_NODES };
+      const limits = { above: known[s.index]!, keep, nodes: nodeLimit };
       const { found, nodes, complete } = searchRows(problem, s, rows, sizes, sections, tables, query, limits);
       work += nodes;
-      const met = found[0]?.value ?? 0;
-      return { rows: found, bound: complete ? met : Math.max(met, tables.most(0, s.usable + FIT + sizes.ends)) };
+      const met = found[0]?.value ?? known[s.index]!;
+      return { rows: found, bound: complete ? met : Math.max(met, tables.most(0, s.usable + FIT + sizes.ends, false)) };
     });
   }
 

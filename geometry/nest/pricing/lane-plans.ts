@@ -1,6 +1,6 @@
 import type { Problem } from '../model/problem';
 import { FIT, SAME_SIZE } from '../model/tolerance';
-import { createLinearProgram } from '../lp/simplex';
+import { LinearProgram } from '../lp/simplex';
 import type { DepthRows } from '../row/depth-rows';
 
 /** More ways than this to fill the depth with lanes are not listed; the bound then takes lanes by their share of the depth. */
@@ -74,7 +74,7 @@ function fairShares(
   weights: readonly number[],
 ): number[] {
   const rows = [...sets.map(() => 1), ...depths.slice(1).map(() => 0)];
-  const program = createLinearProgram(rows.map((rhs) => ({ sense: '<=', rhs, penalty: 0 })));
+  const program = new LinearProgram(rows.map((rhs) => ({ sense: '<=', rhs, penalty: 0 })));
   depths.forEach((_, d) => {
     const entries: [number, number][] = sets.flatMap((set, r): [number, number][] =>
       set[d]! > 0 ? [[r, set[d]!]] : [],

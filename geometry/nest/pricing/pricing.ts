@@ -5,7 +5,6 @@ import { makeColumn, relaxedColumn, type Column, type RealColumn } from '../sear
 import { bestSection } from './best-section';
 import { createDepthPricing, type DepthPricing } from './depth-pricing';
 import type { RowCandidate } from './search-rows';
-import { relaxSection } from './section-lanes';
 
 /** Rows kept for each slab when new columns are wanted. */
 const KEEP = 3;
@@ -21,8 +20,9 @@ export interface Priced {
 }
 
 export interface Pricing {
-  /** The best rows on every slab for these values of items. */
-  price(value: readonly number[], demand: readonly number[]): Priced;
+  /** The best rows on every slab for these values of items, where they are worth more than a pattern known already
+   * (by stock entry). `nodes` limits the search on each slab; with fewer the rows may not be the best and the worth is too high. */
+  price(value: readonly number[], demand: readonly number[], known: readonly number[], nodes: number): Priced;
   /** Every row worth more than `above`, by stock entry; null when there are too many. */
   all(
     value: readonly number[],
@@ -31,7 +31,7 @@ export interface Pricing {
     most: number,
     nodes: number,
   ): PricedRow[] | null;
-  /** The row beside its relaxed section: lanes may be used in fractions. */
+  /** The row, of the last pricing, beside its relaxed section: lanes may be used in fractions. */
   relaxed(row: PricedRow, value: readonly number[], demand: readonly number[]): Column | null;
   /** The row beside a section that exists. */
   real(row: PricedRow, value: readonly number[], demand: readonly number[]): RealColumn | null;
@@ -52,11 +52,11 @@ export function createPricing(problem: Problem, rowsAt: (depth: number) => Depth
   const conflict = conflicts(problem);
   let work = 0;
 
-  function price(value: readonly number[], demand: readonly number[]): Priced {
+  function price(value: readonly number[], demand: readonly number[], known: readonly number[], nodes: number): Priced {
     const worth = problem.stock.map(() => 0);
     const found: PricedRow[] = [];
     for (const group of groups) {
-      const best = group.best({ value, demand, conflict }, KEEP);
+      const best = group.best({ value, demand, conflict }, KEEP, known, nodes);
       group.stock.forEach((stock, i) => {
         worth[stock.index] = best[i]!.bound;
         best[i]!.rows.forEach((row) => found.push({ ...row, stock }));
@@ -91,10 +91,9 @@ export function createPricing(problem: Problem, rowsAt: (depth: number) => Depth
   function relaxed(row: PricedRow, value: readonly number[], demand: readonly number[]): Column | null {
     const group = groupAt.get(row.stock.depth)!;
     if (!hasSection(group, row)) return real(row, value, demand);
-    const { rows, sections } = group;
-    const section = relaxSection(sections.plans, rowsAt, rows.shallow, row.room, value, demand);
+    const section = group.sections.relaxedAt(row.room);
     work += section.work;
-    return relaxedColumn(row.stock.index, row.items, section.lanes);
+    return relaxedColumn(row, section.lanes);
   }
 
   function real(row: PricedRow, value: readonly number[], demand: readonly number[]): RealColumn | null {
@@ -103,6 +102,7 @@ export function createPricing(problem: Problem, rowsAt: (depth: number) => Depth
     const filled = hasSection(group, row)
       ? bestSection(
           sections.plans,
+          sections.relaxer,
           rowsAt,
           rows.shallow,
           row.room,

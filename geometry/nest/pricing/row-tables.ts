@@ -5,26 +5,39 @@ import type { SectionValues } from './section-values';
 export const CELLS = 2048;
 
 /**
- * What is still to be had from a row: `most(j, room)` bounds what items j, j+1 … of the order and one section can add in
- * so much room. Sizes are rounded down to cells and room up, so the bound holds.
+ * What is still to be had from a row: `most(j, room, odd)` bounds what items j, j+1 … of the order and one section can add
+ * in so much room, when the row so far has an even or odd number of steep ends. Sizes are rounded down to cells and room up,
+ * so the bound holds.
  */
 export interface RowTables {
   readonly order: readonly number[];
-  most(j: number, room: number): number;
+  most(j: number, room: number, odd: boolean): number;
 }
 
 export function createRowTables(sizes: RowSizes, sections: SectionValues, cell: number, kerf: number) {
   const width = CELLS + Math.ceil(Math.max(0, sizes.ends) / cell) + 4;
-  let table = new Float64Array(0);
+  /** By parity of the steep ends that are added: best value by place in the order and cells of room. */
+  let tables = [new Float64Array(0), new Float64Array(0)] as const;
 
-  function addItem(at: number, size: number, worth: number, copies: number): void {
+  function addItem(at: number, size: number, worth: number, flips: boolean): void {
     const step = Math.floor(size / cell);
-    table.copyWithin(at, at + width, at + 2 * width);
-    for (let k = Math.min(copies, Math.ceil(width / Math.max(1, step))); k > 0; k--)
-      for (let c = width - 1; c >= step; c--) {
-        const more = table[at + c - step]! + worth;
-        if (more > table[at + c]!) table[at + c] = more;
-      }
+    const [even, odd] = tables;
+    for (let c = width - 1; c >= step; c--) {
+      const from = at + c - step;
+      const moreEven = (flips ? odd[from]! : even[from]!) + worth;
+      const moreOdd = (flips ? even[from]! : odd[from]!) + worth;
+      if (moreEven > even[at + c]!) even[at + c] = moreEven;
+      if (moreOdd > odd[at + c]!) odd[at + c] = moreOdd;
+    }
+  }
+
+  function most(j: number, room: number, isOdd: boolean): number {
+    if (room < 0) return 0;
+    const same = tables[isOdd ? 1 : 0][j * width + Math.min(width - 1, Math.floor(room / cell))]!;
+    const less = room - sizes.oddCost;
+    if (less < 0) return same > 0 ? same : 0;
+    const other = tables[isOdd ? 0 : 1][j * width + Math.min(width - 1, Math.floor(less / cell))]!;
+    return Math.max(same, other, 0);
   }
 
   /** Items worth nothing can be left out when only the best rows are wanted, never when all rows are. */
@@ -38,12 +51,20 @@ export function createRowTables(sizes: RowSizes, sections: SectionValues, cell: 
       .filter((i) => (withWorthless || value[i]! > 0) && demand[i]! > 0)
       .sort((a, b) => value[b]! / sizes.size[b]! - value[a]! / sizes.size[a]! || a - b);
     const n = order.length;
-    if (table.length < (n + 1) * width) table = new Float64Array((n + 1) * width);
-    for (let c = 0; c < width; c++) table[n * width + c] = sections.most((c + 1) * cell - kerf);
-    for (let j = n - 1; j >= 0; j--) addItem(j * width, sizes.size[order[j]!]!, value[order[j]!]!, demand[order[j]!]!);
-    return {
-      order,
-      most: (j, room) => (room < 0 ? 0 : table[j * width + Math.min(width - 1, Math.floor(room / cell))]!),
-    };
+    if (tables[0].length < (n + 1) * width)
+      tables = [new Float64Array((n + 1) * width), new Float64Array((n + 1) * width)];
+    tables[1].fill(-Infinity, n * width, (n + 1) * width);
+    for (let c = 0; c < width; c++) tables[0][n * width + c] = sections.most((c + 1) * cell - kerf);
+    for (let j = n - 1; j >= 0; j--) {
+      const item = order[j]!;
+      for (const table of tables) table.copyWithin(j * width, (j + 1) * width, (j + 2) * width);
+      for (
+        let k = Math.min(demand[item]!, Math.ceil(width / Math.max(1, Math.floor(sizes.size[item]! / cell))));
+        k > 0;
+        k--
+      )
+        addItem(j * width, sizes.size[item]!, value[item]!, sizes.odd[item]!);
+    }
+    return { order, most };
   };
 }

@@ -61,9 +61,14 @@ export function searchRows(
     length <= usable + FIT &&
     !(hasDefects && fitRoundDefects(problem, stock, rows, held, null).kind === 'does not fit');
 
+  function clashes(item: number): boolean {
+    for (const other of held) if (conflict(other, item)) return true;
+    return false;
+  }
+
   function offer(worth: number, room: number): void {
     if (worth + sections.most(room) <= least) return;
-    const total = worth + sections.exact(room);
+    const total = worth + sections.exact(room, least - worth);
     if (total <= least) return;
     const candidate = { items: [...held], value: total, room };
     if (keep === Infinity) {
@@ -76,12 +81,17 @@ export function searchRows(
     if (found.length === keep) least = found[keep - 1]!.value;
   }
 
-  function extend(j: number, worth: number, room: number): void {
+  function extend(j: number, worth: number, room: number, odd: boolean): void {
     if (++nodes > nodeLimit) return;
     for (let i = j; i < order.length; i++) {
-      if (worth + tables.most(i, room) <= least + 1e-9) return;
+      if (worth + tables.most(i, room, odd) <= least + 1e-9) return;
       const item = order[i]!;
-      if (room - sizes.size[item]! < -FIT || held.some((h) => conflict(h, item))) continue;
+      const size = sizes.size[item]!;
+      const flips = sizes.odd[item]!;
+      if (room - size < -FIT || clashes(item)) continue;
+      // With this item the bound is its own worth and what the later ones can add.
+      if (demand[item] === 1 && worth + value[item]! + tables.most(i + 1, room - size, odd !== flips) <= least + 1e-9)
+        continue;
       const before = held.length;
       for (let n = 1; n <= demand[item]!; n++) {
         held.push(item);
@@ -89,14 +99,14 @@ export function searchRows(
         if (!fits(length)) break;
         const now = worth + n * value[item]!;
         offer(now, usable - length - problem.kerf);
-        extend(i + 1, now, room - n * sizes.size[item]!);
+        extend(i + 1, now, room - n * size, flips && n % 2 === 1 ? !odd : odd);
       }
       held.length = before;
     }
   }
 
   offer(0, usable);
-  extend(0, 0, usable + FIT + sizes.ends);
+  extend(0, 0, usable + FIT + sizes.ends, false);
   if (keep === Infinity) found.sort((a, b) => b.value - a.value);
   return { found, nodes, complete: nodes <= nodeLimit };
 }

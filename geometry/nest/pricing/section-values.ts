@@ -1,7 +1,7 @@
 import type { Problem } from '../model/problem';
 import { FIT } from '../model/tolerance';
 import type { DepthRows } from '../row/depth-rows';
-import { relaxSection } from './section-lanes';
+import { createSectionRelaxer, type RelaxedSection, type SectionRelaxer } from './section-lanes';
 import { bestLaneSet, lanePlans, type LanePlans } from './lane-plans';
 import { rowSizes, type RowSizes } from './row-sizes';
 
@@ -12,11 +12,21 @@ import { rowSizes, type RowSizes } from './row-sizes';
  */
 export interface SectionValues {
   readonly plans: LanePlans;
+  readonly relaxer: SectionRelaxer;
   update(value: readonly number[], demand: readonly number[]): void;
   /** The quick bound for a section of at most `room`, rounded up to cells; 0 when there is no room. */
   most(room: number): number;
-  /** The sharper bound. */
-  exact(room: number): number;
+  /** The sharper bound; not sharper than needed to be at or under `enough`. */
+  exact(room: number, enough: number): number;
+  /** The relaxed section of this length for the values of the last update. */
+  relaxedAt(room: number): RelaxedSection;
+}
+
+interface KnownSection {
+  readonly room: number;
+  readonly relaxed: RelaxedSection;
+  /** The bound was worked out to the end. */
+  readonly sharp: boolean;
 }
 
 interface LaneKind {
@@ -43,12 +53,14 @@ export function createSectionValues(
   const longest = Math.max(together.ends, 0, ...kinds.map((k) => k.sizes.ends));
   const table = new Float64Array(cells + Math.ceil((longest + FIT) / cell) + 2);
   const byLane = kinds.map(() => new Float64Array(cells));
-  const known = new Map<number, number>();
+  const relaxer = createSectionRelaxer(plans, rowsAt, rows.shallow);
+  /** Sections looked at for these values, shortest first. */
+  const known: KnownSection[] = [];
   let current: { value: readonly number[]; demand: readonly number[] } = { value: [], demand: [] };
 
   function update(value: readonly number[], demand: readonly number[]): void {
     values.fill(0);
-    known.clear();
+    known.length = 0;
     current = { value, demand };
     if (kinds.length === 0) return;
     fillTable(table, rows.shallow, together.size, value, demand, cell);
@@ -63,23 +75,37 @@ export function createSectionValues(
   const most = (room: number): number =>
     room <= 0 ? 0 : values[Math.min(cells - 1, Math.floor((room + FIT) / cell))]!;
 
-  function exact(room: number): number {
+  /** A longer section is worth no less: what is known of one bounds this one, and its penalties are nearly right. */
+  function exact(room: number, enough: number): number {
     const quick = most(room);
-    if (quick <= 0) return 0;
-    let worth = known.get(room);
-    if (worth === undefined) {
-      const { value, demand } = current;
-      worth = relaxSection(plans, rowsAt, rows.shallow, room, value, demand).bound;
-      known.set(room, worth);
-    }
-    return Math.min(worth, quick);
+    if (quick <= enough) return quick;
+    const at = known.findIndex((k) => k.room >= room);
+    const longer = known[at];
+    if (longer && longer.relaxed.bound <= enough) return Math.min(quick, longer.relaxed.bound);
+    if (longer?.room === room && longer.sharp) return Math.min(quick, longer.relaxed.bound);
+    const guess = (longer ?? known[known.length - 1])?.relaxed.penalty;
+    const relaxed = relaxer.relax(room, current.value, current.demand, enough, guess);
+    const found = { room, relaxed, sharp: relaxed.bound > enough };
+    if (longer?.room === room) known[at] = found;
+    else known.splice(at < 0 ? known.length : at, 0, found);
+    return Math.min(quick, relaxed.bound);
   }
 
-  return { plans, update, most, exact };
+  function relaxedAt(room: number): RelaxedSection {
+    const found = known.find((k) => k.room === room && k.sharp);
+    return found?.relaxed ?? relaxer.relax(room, current.value, current.demand);
+  }
+
+  return { plans, relaxer, update, most, exact, relaxedAt };
 }
 
 /** Each item's least size in any lane it may lie in, times the share of the section that its lane takes. */
-function joinLanes(problem: Problem, rows: DepthRows, plans: LanePlans, kinds: readonly LaneKind[]): RowSizes {
+function joinLanes(
+  problem: Problem,
+  rows: DepthRows,
+  plans: LanePlans,
+  kinds: readonly LaneKind[],
+): Pick<RowSizes, 'size' | 'ends'> {
   const size = problem.items.map(() => Infinity);
   kinds.forEach(({ items, sizes }) => items.forEach((i) => (size[i] = Math.min(size[i]!, sizes.size[i]!))));
   for (const i of rows.shallow) {

@@ -1,5 +1,5 @@
 import { SAME_SLOPE } from '../model/tolerance';
-import { endGap } from './kerf';
+import { createOrderFinder, type LaidEnds } from './best-order';
 
 /** What a row needs to know of one part at the row's own depth: mid-depth length, slopes dx/dy of its ends, allowed moves. */
 export interface RowShape {
@@ -43,18 +43,6 @@ export function usefulMoves(shape: RowShape): number[] {
   return moves;
 }
 
-interface EndClass {
-  readonly moves: readonly number[];
-  readonly ends: readonly (readonly [number, number])[];
-}
-
-/** Best way to go on from a state: total gap to come, and the class and move that come next (-1 at the end of the row). */
-interface Step {
-  readonly total: number;
-  readonly next: number;
-  readonly move: number;
-}
-
 /**
  * Gap totals of rows at one depth. Square parts never need more than one kerf each, so only the others are ordered; the
  * best order depends on the multiset of their end pairs alone and is remembered by it.
@@ -63,85 +51,62 @@ interface Step {
  * @param depth - depth of the row, inches
  */
 export function createRowGaps(shapes: readonly (RowShape | null)[], depth: number, kerf: number): RowGaps {
-  const half = depth / 2;
-  const classes: EndClass[] = [];
+  const classes: LaidEnds[][] = [];
   const classOf = shapes.map((shape) => (shape && !isSquare(shape) ? findClass(classes, shape) : -1));
-  const steps = new Map<string, Step>();
-  const totals = new Map<string, number>();
-
-  function best(counts: number[], last: number | null): Step {
-    const key = `${counts.join()}|${last}`;
-    const known = steps.get(key);
-    if (known) return known;
-    let step: Step = { total: last === null ? 0 : Math.abs(last) * half, next: -1, move: 0 };
-    let least = Infinity;
-    for (let c = 0; c < classes.length; c++) {
-      if (!counts[c]) continue;
-      counts[c]!--;
-      classes[c]!.ends.forEach(([left, right], i) => {
-        const before = last === null ? Math.abs(left) * half : endGap(last, left, half, kerf);
-        const total = before + best(counts, right).total;
-        if (total < least - 1e-12) {
-          least = total;
-          step = { total, next: c, move: classes[c]!.moves[i]! };
-        }
-      });
-      counts[c]!++;
-    }
-    steps.set(key, step);
-    return step;
-  }
-
-  function countAngled(items: readonly number[]): number[] {
-    const counts = new Array<number>(classes.length).fill(0);
-    for (const i of items) if (classOf[i]! >= 0) counts[classOf[i]!]!++;
-    return counts;
-  }
+  const finder = createOrderFinder(classes, depth / 2, kerf);
+  const totals = new Map<number | string, number>();
 
   function gap(items: readonly number[]): number {
-    const angled: number[] = [];
-    for (const i of items) if (classOf[i]! >= 0) angled.push(classOf[i]!);
-    if (angled.length === 0) return Math.max(0, items.length - 1) * kerf;
-    const key = angled.sort((a, b) => a - b).join();
+    let angled: number[] | null = null;
+    for (const i of items) if (classOf[i]! >= 0) (angled ??= []).push(classOf[i]!);
+    if (!angled) return Math.max(0, items.length - 1) * kerf;
+    angled.sort((a, b) => a - b);
+    const key = keyOf(angled);
     let total = totals.get(key);
-    if (total === undefined) totals.set(key, (total = best(countAngled(items), null).total));
+    if (total === undefined) totals.set(key, (total = finder.total(angled)));
     return total + (items.length - angled.length) * kerf;
   }
 
   function arrange(items: readonly number[]): RowEntry[] {
     const square = items.filter((i) => classOf[i]! < 0).map((item) => ({ item, move: 0 }));
-    const waiting = items.filter((i) => classOf[i]! >= 0);
-    const counts = countAngled(items);
-    const row: RowEntry[] = [];
-    let last: number | null = null;
-    while (row.length + square.length < items.length) {
-      const { next, move }: Step = best(counts, last);
-      const at = waiting.findIndex((i) => classOf[i] === next);
-      const item = waiting.splice(at, 1)[0]!;
-      counts[next]!--;
-      row.push({ item, move });
-      last = movedEnds(shapes[item]!, move)[1];
-    }
-    if (row.length === 0) return square;
-    const first = movedEnds(shapes[row[0]!.item]!, row[0]!.move)[0];
+    const angled = items.filter((i) => classOf[i]! >= 0);
+    if (angled.length === 0) return square;
+    const order = finder.order(angled.map((i) => classOf[i]!));
+    const row = order.map(({ place, move }): RowEntry => ({ item: angled[place]!, move }));
+    const ends = row.map(({ item, move }) => movedEnds(shapes[item]!, move));
     // Square parts go where the row begins or ends squarer, so that they share their cut with a neighbour.
-    return Math.abs(first) <= Math.abs(last!) ? [...square, ...row] : [...row, ...square];
+    return Math.abs(ends[0]![0]) <= Math.abs(ends[ends.length - 1]![1]) ? [...square, ...row] : [...row, ...square];
   }
 
   return { gap, arrange };
 }
 
+/** Up to six classes fit in the exact part of a number; longer lists are joined. */
+function keyOf(angled: readonly number[]): number | string {
+  if (angled.length > 6 || angled[angled.length - 1]! >= 255) return angled.join();
+  let key = 0;
+  for (const c of angled) key = key * 256 + c + 1;
+  return key;
+}
+
 const isSquare = (shape: RowShape): boolean => Math.abs(shape.left) < SAME_SLOPE && Math.abs(shape.right) < SAME_SLOPE;
 
-function findClass(classes: EndClass[], shape: RowShape): number {
-  const moves = usefulMoves(shape);
-  const ends = moves.map((move) => movedEnds(shape, move));
+function findClass(classes: LaidEnds[][], shape: RowShape): number {
+  const ways = usefulMoves(shape).map((move): LaidEnds => {
+    const [left, right] = movedEnds(shape, move);
+    return { move, left, right };
+  });
   const found = classes.findIndex(
     (c) =>
-      c.moves.join() === moves.join() &&
-      c.ends.every(([l, r], i) => Math.abs(l - ends[i]![0]) < SAME_SLOPE && Math.abs(r - ends[i]![1]) < SAME_SLOPE),
+      c.length === ways.length &&
+      c.every(
+        ({ move, left, right }, i) =>
+          move === ways[i]!.move &&
+          Math.abs(left - ways[i]!.left) < SAME_SLOPE &&
+          Math.abs(right - ways[i]!.right) < SAME_SLOPE,
+      ),
   );
   if (found >= 0) return found;
-  classes.push({ moves, ends });
+  classes.push(ways);
   return classes.length - 1;
 }

@@ -1,3 +1,4 @@
+import type { PricedRow } from '../pricing/pricing';
 import { patternItems, type Pattern } from '../plan/pattern';
 
 /** A pattern as the linear program sees it. */
@@ -5,6 +6,8 @@ export interface Column {
   readonly stock: number;
   /** Null for a column whose section is relaxed: good for bounds, not for sawing. */
   readonly pattern: Pattern | null;
+  /** Of a relaxed column: the row beside its section. */
+  readonly row?: PricedRow;
   /** Items cut, each once, and how many of each. */
   readonly items: readonly number[];
   readonly counts: readonly number[];
@@ -23,18 +26,17 @@ export function makeColumn(pattern: Pattern): RealColumn {
 
 /** A row beside fractions of lanes. */
 export function relaxedColumn(
-  stock: number,
-  row: readonly number[],
+  row: PricedRow,
   lanes: readonly { readonly items: readonly number[]; readonly x: number }[],
 ): Column {
   const counts = new Map<number, number>();
   const add = (item: number, n: number): void => void counts.set(item, (counts.get(item) ?? 0) + n);
-  row.forEach((i) => add(i, 1));
+  row.items.forEach((i) => add(i, 1));
   lanes.forEach(({ items, x }) => x > 1e-9 && items.forEach((i) => add(i, x)));
-  return { ...fromCounts(stock, counts), pattern: null };
+  return { ...fromCounts(row.stock.index, counts), pattern: null, row };
 }
 
-function fromCounts(stock: number, counts: ReadonlyMap<number, number>): Omit<Column, 'pattern'> {
+function fromCounts(stock: number, counts: ReadonlyMap<number, number>): Omit<Column, 'pattern' | 'row'> {
   const items = [...counts.keys()].sort((a, b) => a - b);
   const numbers = items.map((i) => counts.get(i)!);
   return { stock, items, counts: numbers, key: `${stock}|${items.join()}|${numbers.map((n) => n.toFixed(6)).join()}` };

@@ -1,15 +1,15 @@
 import type { MixCut } from '../bound/cheapest-mix';
 import type { Problem } from '../model/problem';
-import type { LanePlans } from '../pricing/lane-plans';
 import type { Pricing } from '../pricing/pricing';
 import type { DepthRows } from '../row/depth-rows';
+import type { LaneTools } from './pack-sections';
 import type { Column, ColumnPool, RealColumn } from './column';
 
 /** What every stage of the search shares. */
 export interface SearchContext {
   readonly problem: Problem;
   readonly rowsAt: (depth: number) => DepthRows;
-  readonly plansAt: (depth: number) => LanePlans;
+  readonly lanesAt: (depth: number) => LaneTools;
   readonly pricing: Pricing;
   /** Columns for bounds, and those that can be sawn. */
   readonly relaxed: ColumnPool<Column>;

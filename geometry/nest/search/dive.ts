@@ -1,5 +1,6 @@
 import { isWithin, type RealColumn } from './column';
 import type { SearchContext } from './context';
+import type { Generation } from './generate-columns';
 import { createMaster, type MasterAnswer } from './master';
 
 /** A column used this nearly whole is taken as it is. */
@@ -7,6 +8,20 @@ const NEARLY_WHOLE = 0.95;
 /** Rounds of new columns before each decision: the first program needs more than those that follow. */
 const FIRST_ROUNDS = 12;
 const LATER_ROUNDS = 3;
+
+/** Puts a real section beside the row of each relaxed column that a bound's program uses, so that a dive can begin there. */
+export function realiseUsed(context: SearchContext, generation: Generation, demand: readonly number[]): void {
+  const { pricing, real } = context;
+  const before = pricing.work();
+  for (const { row } of generation.used) {
+    const made = row && pricing.real(row, generation.value, demand);
+    if (made) real.add(made);
+  }
+  context.spend(pricing.work() - before);
+}
+
+/** Nodes of each search for rows while diving. */
+const DIVE_NODES = 1000;
 
 /**
  * Plunges to a plan that can be sawn: solves the master program over real columns, takes the columns it uses most, and
@@ -78,7 +93,12 @@ function solveReal(
   let out = false;
   for (let round = 0; round < rounds && !out; round++) {
     const before = pricing.work();
-    const { rows } = pricing.price(answer.value, left);
+    const { rows } = pricing.price(
+      answer.value,
+      left,
+      cost.map((c, s) => c + answer.rent[s]! + 1e-6),
+      DIVE_NODES,
+    );
     let helped = false;
     for (const row of rows) {
       if (slabs[row.stock.index]! <= 0 || row.value <= cost[row.stock.index]! + answer.rent[row.stock.index]! + 1e-6)

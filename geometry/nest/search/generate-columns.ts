@@ -1,14 +1,18 @@
-import { worthOf } from './column';
+import { isWithin, worthOf, type Column } from './column';
 import type { SearchContext } from './context';
 import { createMaster, type MasterAnswer, type MasterGoal } from './master';
 
 /** How much of the best duals so far is mixed into those that are priced: pure duals of a young program swing wildly. */
-const SMOOTHING = 0.7;
+const SMOOTHING = 0.6;
+/** Most nodes of one search for the best rows of a slab. */
+const ROW_NODES = 60_000;
 /** A column must save this share of the program's objective to be worth adding. */
 const WORTHWHILE = 1e-7;
 
 export interface Generation {
   readonly answer: MasterAnswer;
+  /** Columns that the last program uses, the most used first. */
+  readonly used: readonly Column[];
   /** Best lower bound met, and the values it came from with the worth of each slab under them. */
   readonly bound: number;
   readonly value: readonly number[];
@@ -33,15 +37,21 @@ export function generateColumns(
 ): Generation {
   const { relaxed: pool, pricing } = context;
   const master = createMaster(context.problem, goal);
-  pool.list.forEach((column) => goal.counts[column.stock]! > 0 && master.add(column));
+  const added: Column[] = [];
+  const add = (column: Column): void => {
+    master.add(column);
+    added.push(column);
+  };
+  pool.list.forEach((column) => goal.counts[column.stock]! > 0 && add(column));
   let answer = master.solve();
   let stable = first;
   let best = { bound: -Infinity, value: first, worth: [] as readonly number[] };
   let smoothing = SMOOTHING;
+  const finish = (finished: boolean): Generation => ({ answer, used: usedColumns(added, answer.x), ...best, finished });
   for (;;) {
     const before = pricing.work();
     const value = answer.value.map((v, i) => smoothing * stable[i]! + (1 - smoothing) * v);
-    const { worth, rows } = pricing.price(value, context.most);
+    const { worth, rows } = pricing.price(value, context.most, knownWorth(context, pool.list, value), ROW_NODES);
     const bound = boundOf(value, worth);
     if (bound > best.bound) {
       best = { bound, value, worth };
@@ -55,12 +65,27 @@ export function generateColumns(
       return saving > WORTHWHILE * Math.max(1, answer.objective);
     });
     const out = context.spend(pricing.work() - before + pool.list.length / 8 + 20);
-    if (enough(best.bound, answer)) return { answer, ...best, finished: true };
-    if (!helps && smoothing === 0) return { answer, ...best, finished: true };
-    if (out) return { answer, ...best, finished: false };
+    if (enough(best.bound, answer)) return finish(true);
+    if (!helps && smoothing === 0) return finish(true);
+    if (out) return finish(false);
     smoothing = helps ? SMOOTHING : 0;
-    fresh.forEach(master.add);
+    fresh.forEach(add);
     if (!helps) continue;
     answer = master.solve();
   }
+}
+
+function usedColumns(added: readonly Column[], x: readonly number[]): Column[] {
+  const used = added.map((column, k) => ({ column, x: x[k] ?? 0 })).filter((c) => c.x > 1e-6);
+  return used.sort((a, b) => b.x - a.x).map((c) => c.column);
+}
+
+/** By stock entry, the most that a column met so far is worth; columns with more copies than this context asks for do not count. */
+function knownWorth({ problem, most }: SearchContext, columns: readonly Column[], value: readonly number[]): number[] {
+  const known = problem.stock.map(() => 0);
+  for (const column of columns) {
+    const worth = worthOf(column, value);
+    if (worth > known[column.stock]! && isWithin(column, most)) known[column.stock] = worth;
+  }
+  return known;
 }

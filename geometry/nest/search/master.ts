@@ -1,4 +1,4 @@
-import { createLinearProgram, type LinearProgram, type LpAnswer, type LpRow } from '../lp/simplex';
+import { LinearProgram, type LpAnswer, type LpRow } from '../lp/simplex';
 import type { Problem } from '../model/problem';
 import type { Column } from './column';
 
@@ -46,7 +46,7 @@ export function createMaster(problem: Problem, goal: MasterGoal): Master {
     ...limited.map((s): LpRow => ({ sense: '<=', rhs: goal.counts[s]!, penalty: 0 })),
     ...choices.map((): LpRow => ({ sense: '=', rhs: 1, penalty: most * items.length })),
   ];
-  const program: LinearProgram = createLinearProgram(rows);
+  const program = new LinearProgram(rows);
   let extra = 0;
   choices.forEach(({ options }, c) =>
     options.forEach(({ need }) => {

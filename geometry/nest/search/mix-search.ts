@@ -6,7 +6,7 @@ import type { PricedRow } from '../pricing/pricing';
 import type { SearchContext } from './context';
 import { mixCut } from './context';
 import { coverExactly } from './cover-exactly';
-import { dive } from './dive';
+import { dive, realiseUsed } from './dive';
 import { lengthLeft, makePattern } from './make-pattern';
 import { packSections } from './pack-sections';
 import { relaxMix, type MixRelaxation } from './relax';
@@ -87,6 +87,7 @@ export function createMixSearch(
     const tolerance = 1e-6 * (mix.cost + 1);
     const slack = Math.max(0, relaxed.slack) + tolerance;
     const above = perfect.map((p, s) => (mix.slabs[s]! > 0 ? p - slack : Infinity));
+    realiseUsed(context, relaxed, demand);
     const dived = dive(context, demand, mix.slabs, Infinity);
     if (dived) {
       const patterns = dived.map((c) => c.pattern);
@@ -132,7 +133,7 @@ export function createMixSearch(
           ? lengthLeft(row.stock, context.rowsAt(row.stock.depth), row.items, problem.kerf)
           : row.stock.usable,
     }));
-    const sections = packSections(problem, context.rowsAt, context.plansAt, rooms, left, context.spend);
+    const sections = packSections(problem, context.rowsAt, context.lanesAt, rooms, left, context.spend);
     if (!sections) return 'unknown';
     const patterns: Pattern[] = [];
     for (const [r, row] of all.entries()) {

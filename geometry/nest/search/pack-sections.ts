@@ -1,6 +1,7 @@
 import type { Problem } from '../model/problem';
 import { bestSection } from '../pricing/best-section';
 import { lanePlans, type LanePlans } from '../pricing/lane-plans';
+import { createSectionRelaxer, type SectionRelaxer } from '../pricing/section-lanes';
 import type { Section } from '../plan/pattern';
 import type { DepthRows } from '../row/depth-rows';
 
@@ -22,7 +23,7 @@ const LENGTH_WEIGHTS = [0.15, 0.6, 0];
 export function packSections(
   problem: Problem,
   rowsAt: (depth: number) => DepthRows,
-  plansAt: (depth: number) => LanePlans,
+  lanesAt: (depth: number) => LaneTools,
   rooms: readonly Room[],
   left: readonly number[],
   spend: (units: number) => boolean,
@@ -40,7 +41,17 @@ export function packSections(
         const { depth, length } = rooms[r]!;
         if (length <= 0) continue;
         const rows = rowsAt(depth);
-        const best = bestSection(plansAt(depth), rowsAt, rows.shallow, length, value, waiting, problem.kerf, depth);
+        const best = bestSection(
+          lanesAt(depth).plans,
+          lanesAt(depth).relaxer,
+          rowsAt,
+          rows.shallow,
+          length,
+          value,
+          waiting,
+          problem.kerf,
+          depth,
+        );
         if (!best) continue;
         sections[r] = best.section;
         best.items.forEach((i) => waiting[i]!--);
@@ -51,12 +62,23 @@ export function packSections(
   return null;
 }
 
-/** Lane plans of each depth, made once. */
-export function createLanePlans(problem: Problem, rowsAt: (depth: number) => DepthRows): (depth: number) => LanePlans {
-  const made = new Map<number, LanePlans>();
+/** How sections of a depth come apart into lanes. */
+export interface LaneTools {
+  readonly plans: LanePlans;
+  readonly relaxer: SectionRelaxer;
+}
+
+/** Lane tools of each depth, made once. */
+export function createLaneTools(problem: Problem, rowsAt: (depth: number) => DepthRows): (depth: number) => LaneTools {
+  const made = new Map<number, LaneTools>();
   return (depth) => {
-    let plans = made.get(depth);
-    if (!plans) made.set(depth, (plans = lanePlans(problem, rowsAt(depth))));
-    return plans;
+    let tools = made.get(depth);
+    if (!tools) {
+      const rows = rowsAt(depth);
+      const plans = lanePlans(problem, rows);
+      tools = { plans, relaxer: createSectionRelaxer(plans, rowsAt, rows.shallow) };
+      made.set(depth, tools);
+    }
+    return tools;
   };
 }

@@ -4,7 +4,7 @@ import { patternItems, type Pattern } from '../plan/pattern';
 import { createColumnPool, makeColumn, type Column, type RealColumn } from './column';
 import { mixCut, type SearchContext } from './context';
 import { createMixSearch } from './mix-search';
-import { relax } from './relax';
+import { MET, relax } from './relax';
 
 /** Nodes spent on one mix of a few slabs, and mixes looked at before the group is left as it is. */
 const GROUP_NODES = 1500;
@@ -13,9 +13,15 @@ const GROUP_STEPS = 8;
 /**
  * Cuts the parts of a few slabs again from the cheapest slabs for just those parts.
  *
+ * @param values - of the items in the whole plan, a first guess
  * @returns cheaper patterns for the same parts, or null when none are found
  */
-export function recut(context: SearchContext, all: readonly Pattern[], group: readonly number[]): Pattern[] | null {
+export function recut(
+  context: SearchContext,
+  all: readonly Pattern[],
+  group: readonly number[],
+  values: readonly number[],
+): Pattern[] | null {
   const inGroup = new Set(group);
   const own = all.filter((_, i) => inGroup.has(i));
   const problem = groupProblem(
@@ -33,7 +39,7 @@ export function recut(context: SearchContext, all: readonly Pattern[], group: re
     real.add(column);
   }
   const part: SearchContext = { ...context, problem, relaxed, real, most };
-  const first = relax(part);
+  const first = relax(part, values, MET);
   if (!first.finished || first.bound >= cost - 1e-6) return null;
   const search = createMixSearch(part, [areaCut(problem), mixCut(problem, first.value, first.worth)], first.value);
   for (let n = 0; n < GROUP_STEPS; n++) {

@@ -5,7 +5,7 @@ import { mixCut, type SearchContext } from './context';
 import { generateColumns, type Generation } from './generate-columns';
 
 /** Bound and objective this share apart have met. */
-const MET = 1e-7;
+export const MET = 1e-7;
 
 /** Cents of penalty that are rounding, not an uncut part. */
 const NOTHING = 1e-3;
@@ -16,8 +16,13 @@ const penalties = ({ problem }: SearchContext): number[] => {
   return problem.items.map(() => 1000 * (most + 100));
 };
 
-/** The cheapest fractional plan over all patterns, and the item values that prove the best bound. */
-export function relax(context: SearchContext): Generation {
+/**
+ * The cheapest fractional plan over all patterns, and the item values that prove the best bound.
+ *
+ * @param first - item values to begin with
+ * @param apart - share by which bound and objective may lie apart in the end
+ */
+export function relax(context: SearchContext, first: readonly number[], apart: number): Generation {
   const { problem } = context;
   const prices = problem.stock.map((s) => s.price);
   const counts = problem.stock.map((s) => s.count);
@@ -25,13 +30,13 @@ export function relax(context: SearchContext): Generation {
   return generateColumns(
     context,
     { demand: problem.fixed.need, withChoices: true, counts, cost: prices, penalty: penalties(context) },
-    areaValues(context),
+    first,
     (value, worth) => {
       const cut = mixCut(problem, value, worth);
       const need = cut.need + cut.optionNeed.reduce((sum, o) => sum + Math.min(...o), 0);
       return fractionalCover(coverOrder(cut.worth, prices, order), need, 0, prices, counts);
     },
-    (bound, answer) => answer.shortfall < NOTHING && bound >= answer.objective * (1 - MET),
+    (bound, answer) => answer.shortfall < NOTHING && bound >= answer.objective * (1 - apart),
   );
 }
 

@@ -6,16 +6,19 @@ import { createPricing } from '../pricing/pricing';
 import { createDepthRows } from '../row/depth-rows';
 import { createColumnPool, makeColumn, type Column, type RealColumn } from './column';
 import { mixCut, type SearchContext } from './context';
-import { dive } from './dive';
+import { dive, realiseUsed } from './dive';
+import type { Generation } from './generate-columns';
 import { greedy } from './greedy';
 import { createMixSearch, type FoundPlan, type MixSearch } from './mix-search';
-import { createLanePlans } from './pack-sections';
+import { createLaneTools } from './pack-sections';
 import { groupsOf, recut } from './regroup';
-import { relax } from './relax';
+import { areaValues, MET, relax } from './relax';
 
 const MIX_NODES = 100_000;
 /** Nodes spent on a mix at first sight; each later visit to an undecided one spends four times more. */
 const FIRST_NODES = 20_000;
+/** Bound and objective this share apart are near enough for a first dive. */
+const ROUGH = 0.02;
 /** Groups of slabs cut again between two mixes. */
 const GROUPS_PER_ROUND = 12;
 
@@ -45,20 +48,45 @@ export function search(problem: Problem, limits: SearchLimits): SearchResult {
   const area = areaCut(problem);
   state.raise(boundOf(problem, [area], state.below()));
   if (state.done() || context.spend(0)) return state.result([area]);
-  const first = relax(context);
-  const cuts = [area, mixCut(problem, first.value, first.worth)];
-  state.raise(boundOf(problem, cuts, state.below()));
+  const cuts = [area];
+  const learn = ({ value, worth }: Generation): void => {
+    cuts.push(mixCut(problem, value, worth));
+    state.raise(boundOf(problem, cuts, state.below()));
+  };
+  const rough = relax(context, areaValues(context), ROUGH);
+  learn(rough);
+  if (state.done() || !rough.finished) return state.result(cuts);
+  plunge(state, cuts, rough);
+  const first = relax(context, rough.value, MET);
+  learn(first);
   if (state.done() || !first.finished) return state.result(cuts);
   const mixes = createMixSearch(context, cuts, first.value);
-  improve(state, mixes);
+  improve(state, mixes, first.value);
   return state.result(mixes.cuts);
 }
 
+/** A first good plan, by diving from the relaxation with the options of the cheapest mix. */
+function plunge({ context, below, offer }: State, cuts: readonly MixCut[], first: Generation): void {
+  const { problem } = context;
+  const prices = problem.stock.map((s) => s.price);
+  const counts = problem.stock.map((s) => s.count);
+  const answer = cheapestMix({ prices, counts, cuts, tooSmall: [] }, below(), MIX_NODES);
+  if (answer.kind !== 'mix') return;
+  const { picked } = answer.mix;
+  const demand = demandOf(problem, picked);
+  realiseUsed(context, first, demand);
+  const columns = dive(context, demand, counts, below());
+  if (columns)
+    offer(
+      columns.map((c) => c.pattern),
+      picked,
+    );
+}
+
 /** Mixes from the cheapest on; while they stay undecided, dives and regroups for a better plan in between. */
-function improve(state: State, mixes: MixSearch): void {
+function improve(state: State, mixes: MixSearch, values: readonly number[]): void {
   const { context } = state;
   let groups: Generator<number[]> | null = null;
-  let dived = false;
   let nodes = FIRST_NODES;
   for (;;) {
     const step = mixes.step(state.below(), nodes);
@@ -67,19 +95,7 @@ function improve(state: State, mixes: MixSearch): void {
     state.raise(mixes.lower());
     if (state.done() || step.kind === 'out of work' || context.spend(0)) return;
     if (mixes.undecided.length === 0 && step.kind === 'moved') continue;
-    const plan = state.plan();
-    if (!dived) {
-      dived = true;
-      const picked = plan?.picked ?? mixes.undecided[0]!.picked;
-      const counts = context.problem.stock.map((s) => s.count);
-      const columns = dive(context, demandOf(context.problem, picked), counts, state.below());
-      if (columns)
-        state.offer(
-          columns.map((c) => c.pattern),
-          picked,
-        );
-    }
-    groups = regroup(state, groups);
+    groups = regroup(state, groups, values);
     if (step.kind === 'done') {
       nodes *= 4;
       mixes.reopen();
@@ -89,14 +105,18 @@ function improve(state: State, mixes: MixSearch): void {
 }
 
 /** A round of cutting a few slabs again; begins a new order of groups whenever the plan has changed. */
-function regroup(state: State, groups: Generator<number[]> | null): Generator<number[]> | null {
+function regroup(
+  state: State,
+  groups: Generator<number[]> | null,
+  values: readonly number[],
+): Generator<number[]> | null {
   let order = groups;
   for (let n = 0; n < GROUPS_PER_ROUND; n++) {
     const plan = state.plan();
     if (!plan || plan.patterns.length < 2 || state.context.spend(0)) return null;
     order ??= groupsOf(plan.patterns.length, 4);
     const group = order.next().value as number[];
-    const better = recut(state.context, plan.patterns, group);
+    const better = recut(state.context, plan.patterns, group, values);
     if (!better) continue;
     const kept = plan.patterns.filter((_, i) => !group.includes(i));
     state.offer([...kept, ...better], plan.picked);
@@ -125,7 +145,7 @@ function createState(problem: Problem, { stop, workLimit, onBetter }: SearchLimi
   const context: SearchContext = {
     problem,
     rowsAt,
-    plansAt: createLanePlans(problem, rowsAt),
+    lanesAt: createLaneTools(problem, rowsAt),
     pricing: createPricing(problem, rowsAt),
     relaxed: createColumnPool<Column>(),
     real: createColumnPool<RealColumn>(),
