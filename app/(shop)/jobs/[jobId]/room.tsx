@@ -1,5 +1,6 @@
-import { RoomScreen } from '@/components/room/RoomScreen';
+import { useJobScreens } from '@/components/shell/use-job-screens';
 
 export default function Room() {
+  const { RoomScreen } = useJobScreens();
   return <RoomScreen />;
 }

@@ -1,5 +1,6 @@
-import { SheetsScreen } from '@/components/sheets/SheetsScreen';
+import { useJobScreens } from '@/components/shell/use-job-screens';
 
 export default function Sheets() {
+  const { SheetsScreen } = useJobScreens();
   return <SheetsScreen />;
 }

@@ -1,5 +1,6 @@
-import { SlabsScreen } from '@/components/slabs/SlabsScreen';
+import { useJobScreens } from '@/components/shell/use-job-screens';
 
 export default function Slabs() {
+  const { SlabsScreen } = useJobScreens();
   return <SlabsScreen />;
 }

@@ -1,5 +1,6 @@
-import { TopsScreen } from '@/components/tops/TopsScreen';
+import { useJobScreens } from '@/components/shell/use-job-screens';
 
 export default function Tops() {
+  const { TopsScreen } = useJobScreens();
   return <TopsScreen />;
 }
