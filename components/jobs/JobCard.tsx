@@ -44,9 +44,11 @@ export function JobCard({ job, href, onOpen }: JobRowProps) {
           {who ? (
             <View style={styles.pair}>
               <Icon name="person" size={18} />
-              <Text kind="second" tone="ink" hidden>
-                {who}
-              </Text>
+              <View style={styles.who}>
+                <Text kind="second" tone="ink" hidden>
+                  {who}
+                </Text>
+              </View>
             </View>
           ) : null}
           {look ? (
@@ -146,7 +148,8 @@ const styles = StyleSheet.create({
   picture: { backgroundColor: color.paper },
   words: { flex: 1, gap: 5, minWidth: 0 },
   foot: { flexDirection: 'row', flexWrap: 'wrap', justifyContent: 'space-between', gap: space.s },
-  pair: { flexDirection: 'row', alignItems: 'center', gap: 6 },
+  pair: { flexDirection: 'row', alignItems: 'center', gap: 6, flexShrink: 1, minWidth: 0 },
+  who: { flexShrink: 1, minWidth: 0 },
   row: {
     flexDirection: 'row',
     alignItems: 'center',

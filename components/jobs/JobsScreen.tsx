@@ -10,6 +10,7 @@ import { Button } from '../ui/Button';
 import { Field } from '../ui/Field';
 import { PageFrame } from '../ui/PageFrame';
 import { Chips } from '../ui/Segmented';
+import { useSingleKeys } from '../ui/preferences';
 import { StageRuler } from '../ui/StageRuler';
 import type { Stage } from '../ui/StageChip';
 import { Text } from '../ui/Text';
@@ -40,7 +41,8 @@ export function JobsScreen() {
   const counts = useCounts(everything.data?.pages.flatMap((page) => page.items));
   const open = (job: JobListItem) =>
     router.navigate(`/jobs/${job.id}/${job.stage === 'new' ? 'room' : 'tops'}` as never);
-  const selected = useListKeys(jobs.length, (index) => open(jobs[index]!), wide);
+  const [singleKeys] = useSingleKeys();
+  const selected = useListKeys(jobs.length, (index) => open(jobs[index]!), wide && singleKeys);
 
   const searchField = (
     <Field
@@ -127,7 +129,7 @@ export function JobsScreen() {
       )}
       {wide && jobs.length > 0 && (
         <Text kind="small">
-          {`Showing ${jobs.length}. Dashed outline: no top signed off for drawing yet. Press J and K to move, Enter to open.`}
+          {`Showing ${jobs.length}. Dashed outline: not drawn yet. Press J and K to move, Enter to open.`}
         </Text>
       )}
       <NewJobDialog

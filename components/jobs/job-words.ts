@@ -33,9 +33,11 @@ export function dayWords(day: string): string {
   });
 }
 
-/** Names on the job, installer first. */
+/** First names on the job, installer first; the whole name stands in the job. */
 export function people(job: Pick<JobListItem, 'installer' | 'designer' | 'shopHand'>): string {
-  const names = [job.installer, job.designer, job.shopHand].flatMap((person) => (person ? [person.name] : []));
+  const names = [job.installer, job.designer, job.shopHand].flatMap((person) =>
+    person ? [person.name.split(' ')[0]!] : [],
+  );
   return [...new Set(names)].join(', ');
 }
 

@@ -34,10 +34,12 @@ export function ShopShell({ children }: { readonly children: ReactNode }) {
 
 function useSections(path: string): NavItem[] {
   const seesStock = useMay('stock.see');
+  const seesRack = useMay('rack.see');
   const all: (NavItem & { readonly shown: boolean })[] = [
     { key: 'jobs', label: 'Jobs', icon: 'jobs', href: '/jobs', shown: true },
     { key: 'stock', label: 'Stock', icon: 'stock', href: '/stock', shown: seesStock },
-    { key: 'crew', label: 'Crew', icon: 'crew', href: '/account', shown: true },
+    { key: 'rack', label: 'Rack', icon: 'rack', href: '/rack', shown: seesRack },
+    { key: 'account', label: 'Account', icon: 'person', href: '/account', shown: true },
   ];
   return all
     .filter(({ shown }) => shown)
