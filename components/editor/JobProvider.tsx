@@ -1,17 +1,19 @@
 import { createContext, useContext, useEffect, useMemo, useState, type ReactNode } from 'react';
 import { useStore } from 'zustand';
 
-import { DEFAULT_SETTINGS, type ShopSettings } from '@/geometry/core/settings';
+import type { ShopSettings } from '@/geometry/core/settings';
 import type { Job } from '@/shared/contracts/jobs';
 import type { EditDraft } from '@/shared/layout/apply-edit';
 import type { ApiProblem } from '../api/api-problem';
 import { ApiError } from '../api/api-problem';
 import { useJob } from '../api/use-jobs';
 import { useMay } from '../api/use-session';
+import { useShopSettings } from '../api/use-shop';
 import { useToast } from '../ui/ToastProvider';
 import type { EditorStore } from './editor-store';
 import { saveWords } from './editor-store';
 import { openEditor } from './open-editor';
+import { useFreshStock } from './use-fresh-stock';
 import { useLivePlan, type LivePlan } from './use-plan';
 
 export interface OpenJob extends LivePlan {
@@ -81,9 +83,10 @@ export function JobProvider({ jobId, loading, failed, children }: JobProviderPro
 }
 
 function WithPlan({ job, store, children }: { job: Job; store: EditorStore; children: ReactNode }) {
-  const settings = DEFAULT_SETTINGS;
+  const settings = useShopSettings();
   const live = useLivePlan(store, settings);
   const mayEdit = useMay('layout.edit');
+  useFreshStock(store, job.layoutId, mayEdit);
   const toast = useToast();
   const value = useMemo<OpenJob>(
     () => ({
