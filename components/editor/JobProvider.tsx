@@ -55,7 +55,6 @@ export function JobProvider({ jobId, loading, failed, children }: JobProviderPro
 
   useEffect(() => {
     if (!layoutId) return;
-    setProblem(null);
     const opening = openEditor(layoutId, {
       opened: setStore,
       failed: setProblem,
@@ -69,6 +68,7 @@ export function JobProvider({ jobId, loading, failed, children }: JobProviderPro
   }, [layoutId, attempt, toast]);
 
   const again = () => {
+    setProblem(null);
     void job.refetch();
     setAttempt((n) => n + 1);
   };

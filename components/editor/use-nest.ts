@@ -63,14 +63,9 @@ export function useNest(instance: NestInstance | null): NestSearch {
   }, [end]);
 
   useEffect(() => {
-    if (!instance || id === null) return setProgress(NOTHING);
-    const known = kept.get(id);
-    if (known) {
-      setProgress({ ...NOTHING, instance: id, plan: known, lowerBound: known.lowerBound });
-      return;
-    }
-    setProgress({ ...NOTHING, instance: id, searching: true });
+    if (!instance || id === null || kept.has(id)) return;
     const timer = setTimeout(() => {
+      setProgress({ ...NOTHING, instance: id, searching: true });
       const started = startNestWorker();
       worker.current = started;
       if (!started) return;
@@ -95,8 +90,14 @@ export function useNest(instance: NestInstance | null): NestSearch {
     // eslint-disable-next-line react-hooks/exhaustive-deps
   }, [id, end]);
 
-  const current = progress.instance === id ? progress : NOTHING;
-  return { ...current, searching: current.searching || (id !== null && progress.instance !== id), stop };
+  return { ...shown(id, progress), stop };
+}
+
+function shown(id: string | null, progress: Progress): Progress {
+  if (id === null) return NOTHING;
+  const known = kept.get(id);
+  if (known) return { ...NOTHING, instance: id, plan: known, lowerBound: known.lowerBound };
+  return progress.instance === id ? progress : { ...NOTHING, instance: id, searching: true };
 }
 
 function progressAfter(now: Progress, id: string, reply: NestReply): Progress {

@@ -23,12 +23,12 @@ export function useSheetActions(choice: {
   const [busy, setBusy] = useState<SheetActions['busy']>(null);
   const [error, setError] = useState<string | null>(null);
   const { job, revision, paper } = choice;
-  const act = async (what: 'download' | 'print', use: (address: string) => void) => {
+  const act = async (what: 'download' | 'print', deliver: (address: string) => void) => {
     setBusy(what);
     setError(null);
     try {
       const address = URL.createObjectURL(await fetchCutSheet({ jobId: job.id, revision, paper }));
-      use(address);
+      deliver(address);
       setTimeout(() => URL.revokeObjectURL(address), KEEP_MS);
     } catch (failure) {
       setError(failure instanceof ApiError ? failure.message : 'The file could not be opened. Try again.');
