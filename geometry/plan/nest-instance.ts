@@ -46,7 +46,7 @@ function slabOf(slab: StockSlab | RackPiece, count: number | null, price: number
     price,
     count,
     ...(trim !== undefined && { trim }),
-    ...(slab.defects && slab.defects.length > 0 && { defects: slab.defects }),
+    ...(slab.defects && slab.defects.length > 0 && { defects: slab.defects.map(({ x, y, w, h }) => ({ x, y, w, h })) }),
   };
 }
 
