@@ -54,7 +54,7 @@ export function serverAccount() {
  * @param {{input?: string, silent?: boolean}} [options] `silent` for a program that leaves a server behind, which would hold our pipe open
  * @returns {Promise<{code: number, output: string}>}
  */
-export function runServerProgram(program, args, { input = '', silent = false } = {}) {
+export function runServerProgram(program, args, { input, silent = false } = {}) {
   return new Promise((resolve, reject) => {
     const child = spawn(program, args, {
       ...serverAccount(),
@@ -63,7 +63,7 @@ export function runServerProgram(program, args, { input = '', silent = false } =
       detached: true,
       // Nothing of ours: a PGDATA or PGPORT of the shell must not lead it to another cluster.
       env: { NODE_ENV: process.env.NODE_ENV, PATH: process.env.PATH, LC_ALL: 'C.UTF-8' },
-      stdio: silent ? 'ignore' : 'pipe',
+      stdio: silent ? 'ignore' : [input === undefined ? 'ignore' : 'pipe', 'pipe', 'pipe'],
     });
     let output = '';
     for (const stream of [child.stdout, child.stderr]) {
@@ -71,7 +71,8 @@ export function runServerProgram(program, args, { input = '', silent = false } =
         output += text;
       });
     }
-    child.stdin?.end(input);
+    // One that ends before it has read everything tells why by its output and exit code.
+    child.stdin?.on('error', () => {}).end(input);
     child.once('error', reject);
     child.once(silent ? 'exit' : 'close', (code) => resolve({ code: code ?? 1, output }));
   });
