@@ -56,7 +56,7 @@ export function addFoot(page: PageBuilder, head: SheetHead, sheet: number, of: n
   const cells: readonly (readonly [share: number, name: string, value: string])[] = [
     [0.35, 'Job', `${head.jobNumber} ${head.jobName}`],
     [0.27, head.changedSince ? `Revision (changed since revision ${head.changedSince})` : 'Revision', `${head.revision}, ${dateWords(head.revisionDate)}`], // prettier-ignore
-    [0.22, 'Drawn, signed off', `${head.drawnBy}, ${head.signedBy ?? 'not signed off'}`],
+    [0.22, 'Drawn, signed off', [head.drawnBy, head.signedBy ?? 'not signed off'].filter(Boolean).join(', ')],
     [0.16, 'Sheet', `${sheet} of ${of}`],
   ];
   let x = MARGIN;
