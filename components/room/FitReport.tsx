@@ -1,6 +1,6 @@
 import { StyleSheet, View } from 'react-native';
 
-import type { RoomFit } from '@/geometry/room/types';
+import type { NextMeasurement, RoomFit } from '@/geometry/room/types';
 import { inches } from '@/geometry/top/sentence';
 import { useOpenJob } from '../editor/JobProvider';
 import { Button } from '../ui/Button';
@@ -8,42 +8,57 @@ import { Icon } from '../ui/Icon';
 import { Text } from '../ui/Text';
 import { color, space } from '../ui/tokens';
 import { fitWords, type FitWords } from './fit-words';
+import { FractionText } from './FractionText';
+import { RetakeCard } from './RetakeCard';
+import { RoomActs, SiteLevel } from './SiteLevel';
+import type { RoomTools } from './use-room-tools';
 import { ReadingRow } from './ReadingRow';
 import type { RoomView } from './use-room-view';
-import { isTaken, observationOf, targetName, walkOf, type Target } from './tape-walk';
+import { observationOf, targetName, walkOf, type Target } from './tape-walk';
 
-const LOOK: Readonly<Record<FitWords['mood'], { icon: 'check' | 'warn' | 'look' | 'note' | 'tape'; red: boolean }>> = {
-  empty: { icon: 'tape', red: false },
-  missing: { icon: 'tape', red: false },
-  right: { icon: 'check', red: false },
-  bare: { icon: 'look', red: false },
-  retake: { icon: 'warn', red: true },
-  unsure: { icon: 'look', red: true },
-  broken: { icon: 'warn', red: true },
-};
+const LOOK: Readonly<Record<FitWords['mood'], { icon: 'check' | 'warn' | 'look' | 'retake' | 'tape'; red: boolean }>> =
+  {
+    empty: { icon: 'tape', red: false },
+    missing: { icon: 'tape', red: false },
+    right: { icon: 'check', red: false },
+    bare: { icon: 'look', red: false },
+    retake: { icon: 'retake', red: true },
+    unsure: { icon: 'look', red: true },
+    broken: { icon: 'warn', red: true },
+  };
 
 /** The fact on top: closes, re-take, still missing. Read out when it changes. */
-export function FitHead({ view }: { readonly view: RoomView }) {
+export function FitHead({ view, boxed = false }: { readonly view: RoomView; readonly boxed?: boolean }) {
   const { layout } = useOpenJob();
   const words = fitWords(layout, view.room);
   const look = LOOK[words.mood];
   return (
-    <View style={styles.head} aria-live="polite" testID="fit-report">
-      <View style={[styles.square, look.red && styles.squareRed]}>
-        <Icon name={look.icon} tone="onchalk" size={28} />
-      </View>
+    <View
+      style={[styles.head, boxed && [styles.box, look.red && styles.boxRed]]}
+      aria-live="polite"
+      testID="fit-report"
+    >
+      {boxed ? (
+        <Icon name={look.icon} tone={look.red ? 'red' : 'chalk'} size={28} />
+      ) : (
+        <View style={[styles.square, look.red && styles.squareRed]}>
+          <Icon name={look.icon} tone="onchalk" size={28} />
+        </View>
+      )}
       <View style={styles.grow}>
-        <Text kind="rowTitle" level={2} tone={look.red ? 'red' : 'ink'}>
+        <FractionText kind="sheetTitle" level={2} tone={look.red ? 'red' : 'ink'} number={20}>
           {words.fact}
-        </Text>
-        <Text kind="second">{words.detail}</Text>
+        </FractionText>
+        <FractionText kind="second" tone="ink" number={17}>
+          {words.detail}
+        </FractionText>
       </View>
     </View>
   );
 }
 
 /** The whole report: the fact, what to measure next and why, and every reading. */
-export function FitReport({ view }: { readonly view: RoomView }) {
+export function FitReport({ view, tools }: { readonly view: RoomView; readonly tools: RoomTools }) {
   const { layout, plan, mayEdit } = useOpenJob();
   const { room } = view;
   const words = fitWords(layout, room);
@@ -52,9 +67,10 @@ export function FitReport({ view }: { readonly view: RoomView }) {
   return (
     <View style={styles.report}>
       <FitHead view={view} />
-      {words.target && mayEdit && (
+      {words.mood === 'retake' && room.fit?.suspects[0] && <RetakeCard view={view} suspect={room.fit.suspects[0]} />}
+      {words.target && mayEdit && words.mood !== 'retake' && (
         <Button
-          label={`${words.mood === 'retake' ? 'Re-take' : isTaken(layout, words.target) ? 'Check' : 'Tape'} ${lower(targetName(layout, words.target))}`}
+          label={`${words.target.kind === 'corner' ? 'Check' : 'Tape'} ${lower(targetName(layout, words.target))}`}
           look="primary"
           icon="tape"
           wide
@@ -67,6 +83,14 @@ export function FitReport({ view }: { readonly view: RoomView }) {
           <Text kind="second" tone="ink">
             {next.why}
           </Text>
+          {mayEdit && (
+            <Button
+              label={next.kind === 'tie' ? 'Tape this cross' : 'Check this corner'}
+              icon="tape"
+              wide
+              onPress={() => view.open(toTarget(next))}
+            />
+          )}
         </View>
       )}
       <View role="list" aria-label="Readings">
@@ -82,6 +106,10 @@ export function FitReport({ view }: { readonly view: RoomView }) {
         ))}
       </View>
       {room.fit && <JointUncertainty fit={room.fit} />}
+      {mayEdit && (
+        <RoomActs onDraw={() => tools.take({ kind: 'draw' })} onCross={() => tools.take({ kind: 'cross' })} />
+      )}
+      <SiteLevel />
     </View>
   );
 }
@@ -101,6 +129,11 @@ function JointUncertainty({ fit }: { readonly fit: RoomFit }) {
   );
 }
 
+const toTarget = (next: NextMeasurement): Target =>
+  next.kind === 'tie'
+    ? { kind: 'tie', id: null, from: next.from, to: next.to }
+    : { kind: 'corner', between: next.between };
+
 const lower = (text: string): string => text[0]!.toLowerCase() + text.slice(1);
 
 const styles = StyleSheet.create({
@@ -108,6 +141,14 @@ const styles = StyleSheet.create({
   head: { flexDirection: 'row', gap: space.m, alignItems: 'center' },
   square: { width: 48, height: 48, alignItems: 'center', justifyContent: 'center', backgroundColor: color.chalk },
   squareRed: { backgroundColor: color.red },
+  box: { borderWidth: 1.5, borderColor: color.chalk, padding: space.m },
+  boxRed: { borderColor: color.red },
   grow: { flex: 1, minWidth: 0 },
-  next: { padding: space.m, borderLeftWidth: 4, borderLeftColor: color.chalk, backgroundColor: color.chalkT, gap: 2 },
+  next: {
+    padding: space.m,
+    borderLeftWidth: 4,
+    borderLeftColor: color.chalk,
+    backgroundColor: color.chalkT,
+    gap: space.s,
+  },
 });

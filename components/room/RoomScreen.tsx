@@ -1,50 +1,61 @@
-import { useRouter } from 'expo-router';
-import { useRef, useState } from 'react';
+import { useState } from 'react';
 import { StyleSheet, View } from 'react-native';
 
-import { firstTops } from '@/shared/layout/first-tops';
-import type { EditDraft } from '@/shared/layout/apply-edit';
 import { useOpenJob } from '../editor/JobProvider';
 import { JobFrame } from '../shell/JobFrame';
-import { useReachStage } from '../shell/use-reach-stage';
-import { Button } from '../ui/Button';
 import { Inspector } from '../ui/Inspector';
-import { Sheet } from '../ui/Sheet';
-import type { SheetPosition } from '../ui/sheet-drag';
+import { MoreMenu, type MenuItem } from '../ui/Menu';
 import { space } from '../ui/tokens';
+import { useShortcuts } from '../ui/use-shortcuts';
 import { useWide } from '../ui/use-wide';
-import { FitHead, FitReport } from './FitReport';
-import { fitWords } from './fit-words';
-import { ReadingPad } from './ReadingPad';
+import { CornerPicture } from './CornerPicture';
+import { DrawCanvas } from './DrawCanvas';
+import { FitHead } from './FitReport';
+import { KeysDialog } from './KeysDialog';
+import { LayTops } from './LayTops';
+import { PromptBar } from './PromptBar';
 import { RoomCanvas } from './RoomCanvas';
-import { SelectedPanel } from './SelectedPanel';
+import { RoomSheet } from './RoomSheet';
+import { RoomSide } from './RoomSide';
+import { TOOLS } from './room-tools';
 import { ShapeChooser } from './ShapeChooser';
-import { nextTarget } from './tape-walk';
+import { nextTarget, observationOf, targetName } from './tape-walk';
+import { ToolBar } from './ToolBar';
+import { useCornerCheck } from './use-corner-check';
+import { useDraw } from './use-draw';
+import { useRoomTools, type RoomTools } from './use-room-tools';
 import { useRoomView, type RoomView } from './use-room-view';
-
-/** px of the sheet that holds the pad: more for a corner, whose marks are chosen above it. */
-const PAD_HEIGHT = 492;
-const CORNER_PAD_HEIGHT = 640;
 
 /** Job > Room: what was measured, and whether it holds. */
 export function RoomScreen() {
   const wide = useWide();
   const view = useRoomView();
+  const tools = useRoomTools(view);
+  const draw = useDraw();
+  const found = useCornerCheck(view);
   const { layout, mayEdit } = useOpenJob();
   const [covered, setCovered] = useState(0);
   const [firstKey, setFirstKey] = useState<string | undefined>();
-  const subtitle = useSubtitle(view);
-  const empty = layout.room.walls.length === 0;
+  const [keys, setKeys] = useState(false);
+  const check = mayEdit ? found : null;
+  const drawing = tools.tool.kind === 'draw';
+  const empty = layout.room.walls.length === 0 && !drawing;
   const typing = mayEdit ? view.typing : null;
-  const pad = typing && <ReadingPad view={view} target={typing} firstKey={firstKey} />;
-  const canvas = empty ? (
-    <ShapeChooser
-      onChosen={() => {
-        view.open({ kind: 'wall', wall: 'A' });
-      }}
-    />
+  const subtitle = useSubtitle(view, drawing);
+  useRoomKeys(view, tools, () => setKeys(true), setFirstKey);
+
+  const side = <RoomSide view={view} tools={tools} draw={draw} check={check} firstKey={firstKey} />;
+  const chooser = (
+    <ShapeChooser onChosen={() => view.open({ kind: 'wall', wall: 'A' })} onDraw={() => tools.take({ kind: 'draw' })} />
+  );
+  const canvas = drawing ? (
+    <DrawCanvas draw={draw} covered={wide ? 0 : covered} />
+  ) : check && !wide ? (
+    <View style={[styles.fill, { paddingBottom: covered }]}>
+      <CornerPicture check={check} />
+    </View>
   ) : (
-    <RoomCanvas view={view} covered={wide ? 0 : covered} onDigit={setFirstKey} />
+    <RoomCanvas view={view} tools={tools} covered={wide ? 0 : covered} onDigit={setFirstKey} />
   );
   return (
     <JobFrame
@@ -52,110 +63,94 @@ export function RoomScreen() {
       fill
       barHidden={!wide && typing !== null}
       primary={<LayTops view={view} />}
+      actions={
+        empty ? undefined : <MoreMenu label="More" items={moreItems(tools, wide, mayEdit, () => setKeys(true))} />
+      }
       inspector={
         empty ? undefined : (
-          <Inspector label="Readings" foot={typing || view.selected ? <FitHead view={view} /> : undefined}>
+          <Inspector
+            label="Readings"
+            foot={typing || view.selected || drawing ? <FitHead view={view} boxed /> : undefined}
+          >
             <View style={styles.side}>
-              {pad ??
-                (view.selected ? <SelectedPanel view={view} target={view.selected} /> : <FitReport view={view} />)}
+              {check && <CornerPicture check={check} height={220} />}
+              {side}
             </View>
           </Inspector>
         )
       }
     >
-      <View style={styles.fill}>{canvas}</View>
-      {!wide && !empty && <RoomSheet view={view} pad={pad} onCovers={setCovered} />}
+      <View style={styles.fill}>{empty ? chooser : canvas}</View>
+      {!empty && <PromptBar tools={tools} />}
+      {wide && !empty && mayEdit && (
+        <View style={styles.bar}>
+          <ToolBar tool={tools.tool} onTool={tools.take} />
+        </View>
+      )}
+      {!wide && !empty && (
+        <RoomSheet view={view} tools={tools} typing={typing} onCovers={setCovered}>
+          {side}
+        </RoomSheet>
+      )}
+      <KeysDialog open={keys} onClose={() => setKeys(false)} />
     </JobFrame>
   );
 }
 
-function RoomSheet({
-  view,
-  pad,
-  onCovers,
-}: {
-  readonly view: RoomView;
-  readonly pad: React.ReactNode;
-  readonly onCovers: (px: number) => void;
-}) {
-  const [position, setPosition] = useState<SheetPosition>('half');
-  const { layout } = useOpenJob();
-  const red = ['retake', 'unsure', 'broken'].includes(fitWords(layout, view.room).mood);
-  if (pad)
-    return (
-      <Sheet
-        key="pad"
-        label="Type a reading"
-        position="half"
-        half={view.typing?.kind === 'corner' ? CORNER_PAD_HEIGHT : PAD_HEIGHT}
-        onPosition={(next) => next === 'peek' && view.stopTyping()}
-        onClose={view.stopTyping}
-        onCovers={onCovers}
-      >
-        <View style={styles.padded}>{pad}</View>
-      </Sheet>
-    );
-  return (
-    <Sheet
-      key="report"
-      label={view.selected ? 'Selected' : 'Fit report'}
-      position={position}
-      onPosition={setPosition}
-      onClose={view.selected ? () => view.select(null) : undefined}
-      edge={red ? 'red' : 'ink'}
-      onCovers={onCovers}
-      foot={
-        <View style={styles.foot}>
-          <LayTops view={view} wide />
-        </View>
-      }
-    >
-      <View style={styles.padded}>
-        {view.selected ? <SelectedPanel view={view} target={view.selected} /> : <FitReport view={view} />}
-      </View>
-    </Sheet>
-  );
+/** Everything of the tool bar that a phone has no room for, and the keys. */
+function moreItems(tools: RoomTools, wide: boolean, mayEdit: boolean, onKeys: () => void): MenuItem[] {
+  const offered = wide || !mayEdit ? [] : TOOLS.filter(({ tool }) => tool.kind !== 'wall');
+  return [
+    ...offered.map(({ tool, label, icon }): MenuItem => {
+      const words = tool.kind === 'place' ? `Put in: ${label.toLowerCase()}` : TOOL_WORDS[tool.kind];
+      return { key: label, label: words, icon, onPress: () => tools.take(tool) };
+    }),
+    { key: 'keys', label: 'Keys', icon: 'help', onPress: onKeys },
+  ];
 }
 
-/** The way on: lays the first tops where there are none, then goes to them. */
-function LayTops({ view, wide = false }: { readonly view: RoomView; readonly wide?: boolean }) {
-  const router = useRouter();
-  const { job, layout, plan, run, settings, mayEdit } = useOpenJob();
-  const reach = useReachStage();
-  const laid = useRef(false);
-  const ready = view.room.fit !== null && view.room.error === null && view.room.untaped.length === 0;
-  const has = layout.runs.length > 0 || layout.islands.length > 0;
-  const go = () => {
-    if (!has && mayEdit && !laid.current) {
-      laid.current = true;
-      const lengths = new Map(plan.room?.walls.map((wall) => [wall.id, wall.adjusted]));
-      const { runs, cutouts } = firstTops(layout, lengths, settings);
-      const edits: [EditDraft, string][] = [
-        ...runs.map((item): [EditDraft, string] => [{ kind: 'addItem', section: 'runs', item }, `run ${item.id}`]),
-        ...cutouts.map((item): [EditDraft, string] => [{ kind: 'addItem', section: 'cutouts', item }, 'sink cutout']),
-      ];
-      for (const [edit, label] of edits) run(edit, label);
-    }
-    reach('measured');
-    router.navigate(`/jobs/${job.id}/tops` as never);
+const TOOL_WORDS = {
+  wall: 'Tape a wall',
+  corner: 'Check a corner',
+  cross: 'Tape a cross',
+  bow: 'Read how a wall bows',
+  draw: 'Draw the walls',
+} as const;
+
+function useRoomKeys(view: RoomView, tools: RoomTools, onKeys: () => void, onDigit: (key: string) => void): void {
+  const { layout, mayEdit } = useOpenJob();
+  const typed = (key: string) => () => {
+    if (!view.selected) return;
+    onDigit(key);
+    view.open(view.selected);
   };
-  return (
-    <Button
-      label={has ? 'To the tops' : 'Lay the tops'}
-      look={ready ? 'primary' : 'secondary'}
-      iconAfter="next"
-      wide={wide}
-      height={wide ? 56 : 48}
-      disabled={!ready}
-      onPress={go}
-    />
+  const digits = Object.fromEntries([...'0123456789'].map((key) => [key, view.selected ? typed(key) : undefined]));
+  const letters = Object.fromEntries(TOOLS.flatMap(({ key, tool }) => (key ? [[key, () => tools.take(tool)]] : [])));
+  const next = nextTarget(layout, view.room.fit?.next ?? null, view.selected);
+  useShortcuts({ '?': onKeys }, true);
+  useShortcuts(
+    {
+      ...digits,
+      ...letters,
+      n: next ? () => view.open(next) : undefined,
+      Delete: view.base
+        ? () => void tools.remove(`base ${view.base}`)
+        : view.selected?.kind === 'tie'
+          ? () => void tools.remove(observationOf(view.selected!))
+          : undefined,
+      Escape: () => (tools.tool.kind === 'wall' ? view.select(null) : tools.putAway()),
+    },
+    mayEdit && view.typing === null,
   );
 }
 
-function useSubtitle(view: RoomView): string {
-  const { layout } = useOpenJob();
+function useSubtitle(view: RoomView, drawing: boolean): string {
+  const { layout, mayEdit } = useOpenJob();
   const { walls, corners } = layout.room;
+  if (drawing) return 'Room: drawing the walls';
   if (walls.length === 0) return 'Room: no walls yet';
+  if (view.typing?.kind === 'corner' && mayEdit)
+    return `Check ${targetName(layout, view.typing).toLowerCase().replace(/[a-n]\d*-[a-n]\d*$/, (name) => name.toUpperCase())}: two marks, then tape across`; // prettier-ignore
   const taped = walls.filter((wall) => wall.length.length > 0).length;
   const checked = corners.filter((corner) => corner.triangle || corner.angle !== undefined).length;
   if (!nextTarget(layout, null, null)) return 'Room: all readings in';
@@ -164,7 +159,6 @@ function useSubtitle(view: RoomView): string {
 
 const styles = StyleSheet.create({
   fill: { flex: 1, minHeight: 0 },
-  side: { padding: space.l },
-  padded: { paddingHorizontal: space.l, paddingBottom: space.m },
-  foot: { padding: space.m },
+  side: { padding: space.l, gap: space.m },
+  bar: { position: 'absolute', left: 184, right: 20, bottom: 20, flexDirection: 'row' },
 });

@@ -4,12 +4,16 @@ import type { Reading } from '@/geometry/core/layout';
 import { useOpenJob } from '../editor/JobProvider';
 import { CornerBadge } from '../measure/CornerBadge';
 import { Fraction } from '../measure/Fraction';
+import { LengthField } from '../measure/LengthField';
 import { TapeBlade } from '../measure/TapeBlade';
 import { Button } from '../ui/Button';
+import { Icon } from '../ui/Icon';
 import { IconButton } from '../ui/IconButton';
 import { Segmented } from '../ui/Segmented';
 import { Text } from '../ui/Text';
 import { color, space } from '../ui/tokens';
+import { BowPanel } from './BowPanel';
+import { NoteButton } from './NoteButton';
 import { observationOf, targetName, type Target } from './tape-walk';
 import type { RoomView } from './use-room-view';
 import { WallBases } from './WallBases';
@@ -25,14 +29,39 @@ export function SelectedPanel({ view, target }: { readonly view: RoomView; reado
             {targetName(layout, target)}
           </Text>
         </View>
+        {target.kind === 'wall' && <TapedTimes wall={target.wall} />}
         <IconButton icon="close" label="Back to the report" onPress={() => view.select(null)} />
       </View>
       {target.kind === 'wall' && <WallReadings view={view} target={target} />}
       {target.kind === 'corner' && <CornerReadings view={view} target={target} />}
       {target.kind === 'tie' && <TieReading view={view} target={target} />}
       {mayEdit && <TrustChoice target={target} />}
-      {target.kind === 'wall' && <WallBases wall={target.wall} />}
+      {target.kind === 'wall' && <WallShape view={view} wall={target.wall} />}
+      {target.kind === 'wall' && <WallBases view={view} wall={target.wall} />}
+      {mayEdit && <NoteButton target={target} />}
     </View>
+  );
+}
+
+/** How the wall itself is: its bow, and whether it leans. */
+function WallShape({ view, wall: id }: { readonly view: RoomView; readonly wall: string }) {
+  const { layout, run, mayEdit } = useOpenJob();
+  const wall = layout.room.walls.find((w) => w.id === id)!;
+  const name = targetName(layout, { kind: 'wall', wall: id }).toLowerCase();
+  return (
+    <>
+      <BowPanel view={view} wall={wall} />
+      <LengthField
+        label="Out of plumb, in one foot of height"
+        hint="Plus leans away from the room, minus into it."
+        value={wall.outOfPlumb ?? null}
+        step={layout.step}
+        signed
+        disabled={!mayEdit}
+        check={(lean) => (Math.abs(lean) > 6 ? 'A wall does not lean over 6 in in one foot.' : null)}
+        onLength={(outOfPlumb) => run({ kind: 'setPlumb', wall: id, outOfPlumb }, `${name}, out of plumb`)}
+      />
+    </>
   );
 }
 
@@ -62,6 +91,13 @@ function WallReadings({ view, target }: PanelProps<Extract<Target, { kind: 'wall
             <Text kind="label">{`${ordinal(index)} tape${whoWhen(reading)}`}</Text>
           </View>
           <Fraction inches={reading.value} step={layout.step} />
+          {mayEdit && (
+            <IconButton
+              icon="pencil"
+              label={`Replace the ${ordinal(index).toLowerCase()} tape of ${name.toLowerCase()}`}
+              onPress={() => view.open(target, index)}
+            />
+          )}
           {mayEdit && (
             <IconButton
               icon="bin"
@@ -186,6 +222,19 @@ function TrustChoice({ target }: { readonly target: Target }) {
   );
 }
 
+/** "Taped twice" with its tick, as on the blade. */
+function TapedTimes({ wall }: { readonly wall: string }) {
+  const { layout } = useOpenJob();
+  const count = layout.room.walls.find((w) => w.id === wall)?.length.length ?? 0;
+  if (count < 2) return null;
+  return (
+    <View style={styles.chip}>
+      <Icon name="check" size={18} tone="chalk" />
+      <Text kind="label">{count === 2 ? 'Taped twice' : `Taped ${count} times`}</Text>
+    </View>
+  );
+}
+
 const ORDINALS = ['First', 'Second', 'Third', 'Fourth', 'Fifth', 'Sixth'];
 const ordinal = (index: number): string => ORDINALS[index] ?? `${index + 1}th`;
 
@@ -200,6 +249,16 @@ const styles = StyleSheet.create({
   panel: { gap: space.m },
   title: { flexDirection: 'row', alignItems: 'center', gap: space.s },
   grow: { flex: 1, minWidth: 0 },
+  chip: {
+    flexDirection: 'row',
+    alignItems: 'center',
+    gap: 6,
+    minHeight: 36,
+    paddingHorizontal: space.m,
+    borderWidth: 1,
+    borderColor: color.ink,
+    borderRadius: 4,
+  },
   row: {
     flexDirection: 'row',
     alignItems: 'center',

@@ -4,15 +4,26 @@ import Svg, { Polygon, Polyline } from 'react-native-svg';
 import { boundingBox } from '@/geometry/core/polygon';
 import { SHAPE_NAMES, STARTING_SHAPES, startingShape, type StartingShape } from '@/shared/layout/starting-shapes';
 import { useOpenJob } from '../editor/JobProvider';
+import { Button } from '../ui/Button';
 import { Press } from '../ui/Press';
+import { NoPermissionState } from '../ui/StateCard';
 import { Text } from '../ui/Text';
 import { color, radius, space } from '../ui/tokens';
 
 const PICTURE = 72;
 
 /** Rooms to begin with, one tap each. */
-export function ShapeChooser({ onChosen }: { readonly onChosen: () => void }) {
-  const { run } = useOpenJob();
+export function ShapeChooser(props: { readonly onChosen: () => void; readonly onDraw: () => void }) {
+  const { run, mayEdit } = useOpenJob();
+  if (!mayEdit)
+    return (
+      <View style={styles.chooser}>
+        <NoPermissionState
+          title="No walls yet"
+          body="Whoever measures the kitchen draws them: an installer, a designer or the owner. You may look."
+        />
+      </View>
+    );
   return (
     <View style={styles.chooser}>
       <Text kind="sheetTitle" level={2}>
@@ -30,7 +41,7 @@ export function ShapeChooser({ onChosen }: { readonly onChosen: () => void }) {
             testID={`shape-${shape}`}
             style={styles.shape}
             onPress={() => {
-              if (run(startingShape(shape), `shape ${SHAPE_NAMES[shape]}`)) onChosen();
+              if (run(startingShape(shape), `shape ${SHAPE_NAMES[shape]}`)) props.onChosen();
             }}
           >
             <Picture shape={shape} />
@@ -40,6 +51,7 @@ export function ShapeChooser({ onChosen }: { readonly onChosen: () => void }) {
           </Press>
         ))}
       </View>
+      <Button label="Draw it yourself" icon="pencil" height={56} onPress={props.onDraw} />
     </View>
   );
 }

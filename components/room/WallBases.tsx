@@ -1,4 +1,3 @@
-import { useState } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import type { Base, BaseKind } from '@/geometry/core/layout';
@@ -13,29 +12,24 @@ import { Press } from '../ui/Press';
 import { Text } from '../ui/Text';
 import { color, radius, space } from '../ui/tokens';
 import { useToast } from '../ui/ToastProvider';
-import { BASE_KINDS, BASE_LOOK, baseEnd, basePlaceProblem, freePlace } from './base-words';
+import { placeBase } from '../editor/tools/place-tool';
+import { BASE_KINDS, BASE_LOOK, baseEnd, basePlaceProblem, freePlace, onFloor } from './base-words';
+import type { RoomView } from './use-room-view';
 
 /** What stands along a wall: add, type where, take away. */
-export function WallBases({ wall }: { readonly wall: string }) {
+export function WallBases({ view, wall }: { readonly view: RoomView; readonly wall: string }) {
   const { layout, plan, run, mayEdit } = useOpenJob();
   const toast = useToast();
-  const [open, setOpen] = useState<string | null>(null);
+  const { base: open, openBase: setOpen } = view;
   const length = plan.room?.walls.find((w) => w.id === wall)?.adjusted ?? 0;
   const standing = layout.bases.filter((base) => base.wall === wall).sort((a, b) => a.from - b.from);
 
   const add = (kind: BaseKind) => {
-    const look = BASE_LOOK[kind];
-    const width = Math.min(look.width, length);
-    const from = kind === 'window' ? Math.max(0, (length - width) / 2) : freePlace(layout.bases, wall, length, width);
-    if (from === null)
-      return toast({
-        tone: 'failure',
-        text: `No stretch of ${inches(width, layout.step)} is free on this wall. Make something narrower first.`,
-      });
-    const id = freshId(layout.bases);
-    const rounded = Math.round(from * 16) / 16;
-    const base: Base = { id, wall, from: rounded, to: rounded + width, kind, depth: look.depth, access: 'open' };
-    if (run({ kind: 'addItem', section: 'bases', item: base }, look.name.toLowerCase())) setOpen(id);
+    const free = freePlace(layout.bases, wall, length, Math.min(BASE_LOOK[kind].width, length));
+    const at = kind === 'window' ? length / 2 : (free ?? 0) + BASE_LOOK[kind].width / 2;
+    const result = placeBase(layout, kind, { wall, at, length });
+    if ('refusal' in result) toast({ tone: 'failure', text: result.refusal });
+    else if (run(result.edit.edit, result.edit.label)) setOpen(result.id);
   };
 
   return (
@@ -89,12 +83,6 @@ export function WallBases({ wall }: { readonly wall: string }) {
   );
 }
 
-const freshId = (items: readonly { readonly id: string }[]): string => {
-  let n = items.length + 1;
-  while (items.some((item) => item.id === `b${n}`)) n++;
-  return `b${n}`;
-};
-
 function BaseFields({ base, length }: { readonly base: Base; readonly length: number }) {
   const { layout, run } = useOpenJob();
   const say = (value: number) => inches(value, layout.step);
@@ -135,6 +123,16 @@ function BaseFields({ base, length }: { readonly base: Base; readonly length: nu
           value={base.depth}
           step={layout.step}
           onLength={(depth) => change({ depth }, `${say(depth)} deep`)}
+        />
+      )}
+      {onFloor(base) && base.kind !== 'pipe' && base.kind !== 'opening' && (
+        <LengthField
+          label="Shim under it, to come level"
+          value={base.shim ?? null}
+          step={layout.step}
+          hint="Leave it empty where none is needed."
+          check={(shim) => (shim > 6 ? 'Over 6 in is a plinth, not a shim.' : null)}
+          onLength={(shim) => change({ shim }, `shim ${say(shim)}`)}
         />
       )}
       <Checkbox

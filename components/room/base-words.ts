@@ -24,7 +24,7 @@ export const BASE_LOOK: Readonly<Record<BaseKind, BaseLook>> = {
 export const BASE_KINDS = Object.keys(BASE_LOOK) as readonly BaseKind[];
 
 /** Windows hang over what stands on the floor; everything else needs its own stretch of wall. */
-const onFloor = (base: Pick<Base, 'kind'>): boolean => base.kind !== 'window';
+export const onFloor = (base: Pick<Base, 'kind'>): boolean => base.kind !== 'window';
 
 /** The right-hand end of what stands on a wall of this length, inches. */
 export const baseEnd = (base: Pick<Base, 'to'>, wallLength: number): number =>

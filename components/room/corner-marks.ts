@@ -12,11 +12,17 @@ const SIZES = [
 
 export type Marks = readonly [number, number];
 
-/** 3-4-5 marks that fit both walls, longest first; the smallest when not even that fits. */
+/** 3-4-5 marks that fit both walls, longest first, the longer mark on the longer wall; the smallest when not even that fits. */
 export function marksThatFit(left: number, right: number): Marks[] {
-  const fit = SIZES.filter(([a, b]) => a <= left && b <= right);
-  return fit.length > 0 ? [...fit] : [SIZES[SIZES.length - 1]!];
+  const turned = left > right;
+  const fit = SIZES.filter(([short, long]) => short <= Math.min(left, right) && long <= Math.max(left, right));
+  const sizes: readonly Marks[] = fit.length > 0 ? fit : [SIZES[SIZES.length - 1]!];
+  return sizes.map(([short, long]) => (turned ? [long, short] : [short, long]));
 }
+
+/** What the tape reads between the marks when the corner is as drawn, inches. */
+export const squareTape = (a: number, b: number, nominalDeg: number): number =>
+  Math.sqrt(a * a + b * b - 2 * a * b * Math.cos((nominalDeg * Math.PI) / 180));
 
 /** Interior angle at a corner from a triangle, degrees, on the side of 180 that the drawing says; null for an impossible triangle. */
 export function triangleAngle(a: number, b: number, c: number, nominal: number): number | null {

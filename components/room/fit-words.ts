@@ -101,7 +101,7 @@ function suspected(layout: Layout, suspect: Suspect, say: Say): FitWords {
 /** How far off the suspect reads, in its own unit. */
 function offBy(layout: Layout, suspect: Suspect): string {
   const target = targetOf(layout, suspect.observation);
-  const read = target ? readValue(layout, target) : null;
+  const read = target ? readValue(layout, target, suspect.shouldRead) : null;
   if (read === null) return 'something';
   const off = Math.abs(suspect.shouldRead - read.value);
   return read.unit === 'deg' ? `${off.toFixed(1)} degrees` : inches(roughly(off, layout.step), layout.step);
@@ -109,7 +109,7 @@ function offBy(layout: Layout, suspect: Suspect): string {
 
 function shouldRead(layout: Layout, suspect: Suspect): string {
   const target = targetOf(layout, suspect.observation);
-  const read = target ? readValue(layout, target) : null;
+  const read = target ? readValue(layout, target, suspect.shouldRead) : null;
   return read?.unit === 'deg' ? `${suspect.shouldRead.toFixed(1)} degrees` : inches(suspect.shouldRead, layout.step);
 }
 
@@ -117,11 +117,18 @@ function shouldRead(layout: Layout, suspect: Suspect): string {
 const roughly = (off: number, step: Step): number =>
   !step.endsWith('mm') && off >= 0.5 ? roundLength(off, '1/8') : off;
 
-function readValue(layout: Layout, target: Target): { value: number; unit: 'in' | 'deg' } | null {
+/** What was read there; of a wall taped more than once, the reading farthest from what it should be. Degrees for an angle. */
+export function readValue(
+  layout: Layout,
+  target: Target,
+  shouldRead: number,
+): { value: number; unit: 'in' | 'deg' } | null {
   const { walls, corners, ties } = layout.room;
   if (target.kind === 'wall') {
-    const reading = walls.find((w) => w.id === target.wall)?.length.at(-1);
-    return reading ? { value: reading.value, unit: 'in' } : null;
+    const readings = walls.find((w) => w.id === target.wall)?.length ?? [];
+    const off = (value: number) => Math.abs(value - shouldRead);
+    const [worst] = [...readings].sort((a, b) => off(b.value) - off(a.value));
+    return worst ? { value: worst.value, unit: 'in' } : null;
   }
   if (target.kind === 'corner') {
     const corner = corners.find((c) => c.between.join() === target.between.join());

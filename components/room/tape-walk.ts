@@ -74,6 +74,26 @@ export function nextTarget(layout: Layout, next: NextMeasurement | null, after: 
   return round.find((target) => !isTaken(layout, target)) ?? null;
 }
 
+/** Two readings more than needed: one shows that something slipped, two can often say what. */
+export const ENOUGH_SPARE = 2;
+
+/** Readings of walls and corners that fix the room, and how many there are with the ties, ignored ones left out. */
+export function spareAfter(layout: Layout, more = 0): number {
+  const { walls, corners, ties, ignore, closed } = layout.room;
+  const kept = (name: string) => !ignore.includes(name);
+  const lengths = walls.filter((w) => kept(`wall ${w.id}`)).reduce((sum, w) => sum + w.length.length, 0);
+  const angles = corners.filter(
+    (c) => (c.triangle || c.angle !== undefined) && kept(`corner ${c.between.join('-')}`),
+  ).length;
+  const across = ties.filter((t) => kept(`tie ${t.id}`)).length;
+  const unknown = closed ? 2 * walls.length - 3 : 2 * walls.length - 1;
+  return lengths + angles + across + more - unknown;
+}
+
+/** Whether the walk goes on with a cross once every wall and corner is read: a straight wall has nothing to cross. */
+export const wantsCross = (layout: Layout, more = 0): boolean =>
+  layout.room.walls.length > 1 && spareAfter(layout, more) < ENOUGH_SPARE;
+
 const labelOf = (layout: Layout, wall: string): string => {
   const index = layout.room.walls.findIndex((w) => w.id === wall);
   return index < 0 ? wall : wallLabel(index);

@@ -21,8 +21,9 @@ const WORDS: Readonly<Record<Base['kind'], string>> = {
 };
 
 /** Cabinets, appliances, windows and pipes along a wall, dashed: they are there, nobody cuts them. */
-export function drawBase(base: Base, wall: WallFrame): DrawItem[] {
+export function drawBase(base: Base, wall: WallFrame, selected = false): DrawItem[] {
   const frame = new BaseFrame(base, wall);
+  if (selected) return [...frame.handles(), ...drawBase(base, wall)];
   if (base.kind === 'window') return frame.window();
   if (base.kind === 'pipe') return frame.pipe();
   return [...frame.box(), ...frame.inside(), ...frame.label()];
@@ -62,6 +63,17 @@ class BaseFrame {
     const stroke: Stroke = { ink: this.ink(), width: this.blocked ? 1.8 : 1.3, dash: this.blocked ? BLOCKED : DASHED };
     const outline = this.rect(this.from, this.to, 0, this.base.depth);
     return [{ ...this.tag, kind: 'polygon', outline, stroke }];
+  }
+
+  /** What is open for change: a chalk ground and a grip at either edge. */
+  handles(): DrawItem[] {
+    const depth = Math.max(this.base.depth, 2);
+    const grip = (x: number): DrawItem => {
+      return { ...this.tag, kind: 'mark', at: this.at(x, depth / 2), mark: 'dot', size: 16, ink: 'chalk' };
+    };
+    const outline = this.rect(this.from, this.to, 0, depth);
+    const ground: DrawItem = { ...this.tag, kind: 'polygon', outline, fill: 'chalkT', stroke: { ink: 'chalk', width: 3 } }; // prettier-ignore
+    return [ground, grip(this.from), grip(this.to)];
   }
 
   inside(): DrawItem[] {

@@ -13,8 +13,8 @@ export interface WallState {
   readonly taped: boolean;
 }
 
-/** How many times a bow is drawn larger than it is: 5/16 in would not be seen. */
-const BOW_SCALE = 6;
+/** How many times a bow is drawn larger than it is when that is asked for: 5/16 in would not be seen. */
+export const LARGE_BOWS = 12;
 /** px between a wall's body and its blade, and half the blade. */
 const BLADE_OFF = 28;
 const LETTER_IN = 26;
@@ -97,15 +97,24 @@ function nearestFree(wanted: number, length: number, free: (at: number) => boole
   return wanted;
 }
 
-/** The wall's true line, dotted and larger than life, with its worst place in words. */
-export function drawBow(wall: WallFrame, step: Layout['step'], free: (at: number) => boolean): DrawItem[] {
+/**
+ * The wall's true line, dotted, with its worst place in words.
+ *
+ * @param larger - how many times the bow is drawn larger than it is; 1 as measured
+ */
+export function drawBow(
+  wall: WallFrame,
+  step: Layout['step'],
+  free: (at: number) => boolean,
+  larger: number,
+): DrawItem[] {
   const worst = wall.profile.reduce<{ at: number; off: number } | null>(
     (most, station) => (Math.abs(station.off) > Math.abs(most?.off ?? 0) ? station : most),
     null,
   );
   if (!worst) return [];
   const place = (at: number, off: number): Point =>
-    along(along(wall.start, wall.along, at), wall.inward, -off * BOW_SCALE);
+    along(along(wall.start, wall.along, at), wall.inward, -off * larger);
   const tag = { layer: 'readings', id: `bow ${wall.id}` } as const;
   const stations = [...wall.profile].sort((a, b) => a.at - b.at);
   // Words lie level: beside an upright wall they need their own half length more.

@@ -8,13 +8,22 @@ import { alongWall, wallFrames, type RoomWalls } from '../../top/wall-frame';
 import type { DrawItem, Scene } from '../display-list';
 import { drawBase } from './draw-bases';
 import { drawCorner } from './draw-corners';
-import { drawBow, drawWallLines, drawWallReading, type WallState } from './draw-walls';
+import { drawMisfit } from './draw-misfit';
+import { drawBow, drawWallLines, drawWallReading, LARGE_BOWS, type WallState } from './draw-walls';
 import { readable } from './scene-styles';
 import { wallBodies } from './wall-bodies';
 
 /** What is chosen on screen: `wall A`, `corner A-B`, `tie t1`, as readings are named. */
 export interface RoomSceneOptions {
   readonly selected?: string | null;
+  /** Every bow larger than life; otherwise only that of the selected wall is. */
+  readonly largeBows?: boolean;
+  /** Something along a wall that is open for change, by id. */
+  readonly base?: string | null;
+  /** The first mark of a cross that is being chosen. */
+  readonly mark?: Mark | null;
+  /** Readings that contradict each other, where no fit says so itself. */
+  readonly wrong?: readonly string[];
 }
 
 const DASH_DOT = [9, 4, 2, 4];
@@ -48,7 +57,8 @@ class RoomDrawing {
     this.walls = wallFrames(solvedRoom(fit, layout.room));
     // Where several readings explain the disagreement as well, nobody is accused on the drawing.
     const named = fit.suspects.filter((s) => s.orElse.length === 0).map((s) => s.observation);
-    this.retakes = new Set([...named, ...(fit.checkCorner ? [fit.checkCorner] : [])]);
+    const wrong = options.wrong ?? [];
+    this.retakes = new Set([...named, ...(fit.checkCorner ? [fit.checkCorner] : []), ...wrong]);
   }
 
   bounds(): Scene['bounds'] {
@@ -64,8 +74,14 @@ class RoomDrawing {
       ...this.openEnds(),
       ...this.readings(),
       ...this.corners(),
+      ...this.misfits(),
       ...this.notes(),
+      ...this.chosenMark(),
     ];
+  }
+
+  private bowScale(wall: string): number {
+    return this.options.largeBows || this.options.selected === `wall ${wall}` ? LARGE_BOWS : 1;
   }
 
   private stateOf(id: string): WallState {
@@ -95,8 +111,23 @@ class RoomDrawing {
   private bases(): DrawItem[] {
     return this.layout.bases.flatMap((base) => {
       const wall = this.walls.byId.get(base.wall);
-      return wall ? drawBase(base, wall) : [];
+      return wall ? drawBase(base, wall, base.id === this.options.base) : [];
     });
+  }
+
+  /** How far the suspected wall was taped past where it ends, or short of it. */
+  private misfits(): DrawItem[] {
+    return this.fit.suspects.flatMap((suspect) => {
+      const wall = suspect.orElse.length === 0 && this.walls.byId.get(suspect.observation.replace(/^wall /, ''));
+      const taped = wall && this.fit.walls.find((w) => w.id === wall.id)?.taped;
+      if (!wall || taped === null || taped === undefined || taped === false) return [];
+      return drawMisfit(wall, taped - suspect.shouldRead, this.layout.step);
+    });
+  }
+
+  private chosenMark(): DrawItem[] {
+    const at = this.options.mark ? this.markAt(this.options.mark) : null;
+    return at ? [{ layer: 'readings', kind: 'mark', at, mark: 'dot', size: 18, ink: 'chalk' }] : [];
   }
 
   /** A tie that joins the room's two open ends has its blade always; a cross only when it is chosen. */
@@ -161,7 +192,7 @@ class RoomDrawing {
       const standing = this.layout.bases.filter((base) => base.wall === wall.id && base.kind !== 'window');
       const free = (at: number) => !standing.some((b) => at > b.from - 3 && at < alongWall(wall, b.to) + 3);
       return [
-        ...drawBow(wall, this.layout.step, free),
+        ...drawBow(wall, this.layout.step, free, this.bowScale(wall.id)),
         ...drawWallReading(wall, readings, this.stateOf(wall.id), this.layout.step, free),
       ];
     });
