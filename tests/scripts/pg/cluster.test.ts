@@ -12,13 +12,20 @@ import { canListen, processesIn } from '@/scripts/pg/postmaster.mjs';
 
 let home: string;
 
-beforeEach(() => {
+function newHome(): string {
   // The user that runs PostgreSQL for root cannot enter a private TMPDIR of root's.
-  home = mkdtempSync(path.join(process.getuid?.() === 0 ? '/tmp' : os.tmpdir(), 'offsquare-cluster-'));
-  handOver(home);
+  const folder = mkdtempSync(path.join(process.getuid?.() === 0 ? '/tmp' : os.tmpdir(), 'offsquare-cluster-'));
+  handOver(folder);
+  return folder;
+}
+
+beforeAll(() => {
+  home = newHome();
 });
 
-afterEach(() => destroyCluster(home));
+afterEach(() => stopCluster(home));
+
+afterAll(() => destroyCluster(home));
 
 /** Most of these need no disk that is safe against a power cut. */
 const start = () => startCluster(home, { throwaway: true });
@@ -68,11 +75,11 @@ describe('startCluster', () => {
 
   it("starts again after its server was killed, with the killed server's note still there", async () => {
     const { url } = await startCluster(home);
-    await ask(url, 'create table walls as select 96.25::float8 as length');
+    await ask(url, 'create table corners as select 91.5::float8 as angle');
     await killServer();
     const again = await startCluster(home);
     expect(again.startedNow).toBe(true);
-    expect(await ask(again.url, 'select length from walls')).toEqual([{ length: 96.25 }]);
+    expect(await ask(again.url, 'select angle from corners')).toEqual([{ angle: 91.5 }]);
   });
 
   it('is not misled by a note whose number belongs to another program by now', async () => {
@@ -103,11 +110,13 @@ describe('startCluster', () => {
   it('says which version is missing when the data is of one that is not installed', async () => {
     await start();
     await stopCluster(home);
-    writeFileSync(path.join(home, 'data/PG_VERSION'), '9\n');
+    const versionFile = path.join(home, 'data/PG_VERSION');
+    const version = readFileSync(versionFile, 'utf8');
+    writeFileSync(versionFile, '9\n');
     await expect(start()).rejects.toThrow(
       `The data in ${home}/data was written by PostgreSQL 9, which is not installed: install postgresql-9.`,
     );
-    writeFileSync(path.join(home, 'data/PG_VERSION'), '15\n');
+    writeFileSync(versionFile, version);
   });
 });
 
@@ -120,8 +129,11 @@ describe('stopCluster', () => {
   });
 
   it('has nothing to do where nothing runs', async () => {
-    expect(await clusterState(home)).toBe('absent');
     expect(await stopCluster(home)).toBe(false);
+    const empty = newHome();
+    expect(await clusterState(empty)).toBe('absent');
+    expect(await stopCluster(empty)).toBe(false);
+    await destroyCluster(empty);
   });
 });
 
