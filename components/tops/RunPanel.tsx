@@ -1,161 +1,130 @@
 import { StyleSheet, View } from 'react-native';
 
-import type { Cutout, Run, RunEnd } from '@/geometry/core/layout';
+import type { Along } from '@/geometry/core/layout';
 import { inches as say } from '@/geometry/top/sentence';
 import { useOpenJob } from '../editor/JobProvider';
-import { LengthField } from '../measure/LengthField';
 import { Button } from '../ui/Button';
-import { Select } from '../ui/Select';
+import { Checkbox } from '../ui/Checkbox';
+import { Segmented } from '../ui/Segmented';
 import { Text } from '../ui/Text';
-import { color, space } from '../ui/tokens';
-import { topName } from './tops-targets';
+import { space } from '../ui/tokens';
+import { BladeField } from './BladeField';
+import { CutInto } from './CutInto';
+import { endWords } from './EndPanel';
+import { LinkRow } from './LinkRow';
+import { runPlaceProblem, someLength, wallLength } from './length-checks';
+import { inSentence, topName } from './tops-choice';
+import { useItemChange } from './use-item-change';
 
-type EndKind = 'wall' | 'open' | 'appliance' | 'joint';
+export interface TopPanelProps {
+  readonly id: string;
+  /** Chooses something else on the drawing, by its name. */
+  readonly onChoose: (name: string | null) => void;
+}
 
-const END_NAMES: Readonly<Record<EndKind, string>> = {
-  wall: 'At the wall',
-  open: 'Open, past the cabinet',
-  appliance: 'At an appliance',
-  joint: 'Joint with the next run',
-};
-
-/** A run's depth, gap and ends, and what is cut into it. */
-export function RunPanel({ id }: { readonly id: string }) {
-  const { layout, settings, run: apply, mayEdit, plan } = useOpenJob();
+/** A run: depth, place along its wall, ends, and what is cut into it. */
+export function RunPanel({ id, onChoose }: TopPanelProps) {
+  const { layout, run: apply, mayEdit } = useOpenJob();
   const run = layout.runs.find((r) => r.id === id);
-  if (!run) return null;
   const name = topName(layout, id);
-  const change = (fields: Partial<Run>, what: string) =>
-    apply(
-      { kind: 'changeItem', section: 'runs', item: id, change: fields as Record<string, unknown> },
-      `${name}, ${what}`,
-    );
+  const change = useItemChange('runs', id, name);
+  if (!run) return null;
   const { step } = layout;
-  const wall = plan.room?.walls.find((w) => w.id === run.wall)?.adjusted ?? 60;
-  const addSink = () => {
-    const to = run.to === 'end' ? wall : run.to;
-    const sink: Cutout = {
-      id: freshId(layout.cutouts),
-      on: id,
-      kind: 'sink',
-      mount: 'drop-in',
-      centre: Math.round((run.from + to) * 8) / 16,
-      setback: 3,
-      width: 30,
-      depth: Math.max(6, Math.min(18, run.depth - 5)),
-      radius: 0.75,
-    };
-    apply({ kind: 'addItem', section: 'cutouts', item: sink }, 'sink cutout');
-  };
-  if (!mayEdit) return <Text kind="second">{`${name}, ${say(run.depth, step)} deep.`}</Text>;
   return (
     <View style={styles.panel}>
-      <Text kind="rowTitle" level={3}>
-        {name}
-      </Text>
-      <LengthField
-        label="Depth, back to front"
-        value={run.depth}
-        step={step}
-        check={(depth) => (depth > 0 ? null : 'A top has to have some depth.')}
-        onLength={(depth) => change({ depth }, `${say(depth, step)} deep`)}
-      />
-      <LengthField
-        label="Gap to the wall behind"
-        value={run.backGap}
-        step={step}
-        onLength={(backGap) => change({ backGap }, `gap ${say(backGap, step)}`)}
-      />
-      <EndFields
-        title="Left end"
-        end={run.left}
-        defaults={settings}
-        onEnd={(left) => change({ left }, `left end ${left.kind}`)}
-      />
-      <EndFields
-        title="Right end"
-        end={run.right}
-        defaults={settings}
-        onEnd={(right) => change({ right }, `right end ${right.kind}`)}
-      />
-      <Button label="Cut a sink in it" icon="sink" onPress={addSink} />
-      <Button
-        label="Take this run away"
-        look="danger"
-        onPress={() => apply({ kind: 'removeItem', section: 'runs', item: id }, name.toLowerCase())}
-      />
+      <View>
+        <BladeField
+          label="Depth"
+          title={`${name}, depth`}
+          note="back edge to front edge"
+          inches={run.depth}
+          check={someLength('A top’s depth')}
+          onLength={(depth) => change({ depth }, `${say(depth, step)} deep`)}
+        />
+        <BladeField
+          label="Gap behind"
+          title={`${name}, gap behind`}
+          note="to the wall, for movement"
+          inches={run.backGap}
+          onLength={(backGap) => change({ backGap }, `gap ${say(backGap, step)}`)}
+        />
+        <RunPlace id={id} />
+        <LinkRow title="Left end" value={endWords(run.left, step)} onPress={() => onChoose(`end ${id} left`)} />
+        <LinkRow title="Right end" value={endWords(run.right, step)} onPress={() => onChoose(`end ${id} right`)} />
+      </View>
+      {mayEdit && (
+        <Segmented
+          label="Lies on"
+          options={[
+            { value: 'front', label: 'Room side' },
+            { value: 'back', label: 'Far side' },
+          ]}
+          value={run.side ?? 'front'}
+          onChange={(side) => change({ side }, side === 'back' ? 'on the far side' : 'on the room side')}
+          hint="Far side is the other side of a peninsula or a half wall."
+        />
+      )}
+      <CutInto on={id} onChoose={onChoose} />
+      {mayEdit && (
+        <Button
+          label="Take this run away"
+          look="danger"
+          icon="bin"
+          onPress={() => {
+            if (apply({ kind: 'removeItem', section: 'runs', item: id }, inSentence(name))) onChoose(null);
+          }}
+        />
+      )}
     </View>
   );
 }
 
-const freshId = (items: readonly { readonly id: string }[]): string => {
-  let n = items.length + 1;
-  while (items.some((item) => item.id === `c${n}`)) n++;
-  return `c${n}`;
-};
-
-function EndFields({
-  title,
-  end,
-  defaults,
-  onEnd,
-}: {
-  readonly title: string;
-  readonly end: RunEnd;
-  readonly defaults: {
-    readonly wallClearance: number;
-    readonly openOverhang: number;
-    readonly openRadius: number;
-  };
-  readonly onEnd: (end: RunEnd) => void;
-}) {
-  const { layout } = useOpenJob();
+/** Where along its wall a run begins and ends; a wall or a joint decides that by itself. */
+function RunPlace({ id }: { readonly id: string }) {
+  const { layout, plan, mayEdit } = useOpenJob();
+  const run = layout.runs.find((r) => r.id === id);
+  const name = topName(layout, id);
+  const change = useItemChange('runs', id, name);
+  if (!run) return null;
   const { step } = layout;
-  const begin: Readonly<Record<EndKind, RunEnd>> = {
-    wall: { kind: 'wall', clearance: defaults.wallClearance },
-    open: { kind: 'open', overhang: defaults.openOverhang, radius: defaults.openRadius },
-    appliance: { kind: 'appliance', overhang: 0 },
-    joint: { kind: 'joint' },
-  };
+  const length = wallLength(plan, run.wall);
+  const decided = (kind: string) => kind === 'wall' || kind === 'joint';
+  const setTo = (to: Along) => change({ to }, to === 'end' ? 'to the end of its wall' : `to ${say(to, step)}`);
+  if (decided(run.left.kind) && decided(run.right.kind))
+    return <Text kind="small">It goes from one corner of its wall to the other.</Text>;
   return (
-    <View style={styles.end}>
-      <Select
-        label={title}
-        options={(Object.keys(END_NAMES) as EndKind[]).map((value) => ({ value, label: END_NAMES[value] }))}
-        value={end.kind === 'waterfall' ? null : end.kind}
-        placeholder="Waterfall"
-        onChange={(kind) => onEnd(begin[kind])}
-      />
-      {end.kind === 'wall' && (
-        <LengthField
-          label={`${title}: clearance`}
-          value={end.clearance}
-          step={step}
-          onLength={(clearance) => onEnd({ ...end, clearance })}
+    <>
+      {!decided(run.left.kind) && (
+        <BladeField
+          label="Begins at"
+          title={`${name}, begins at`}
+          note="from the wall’s left end"
+          inches={run.from}
+          check={(from) => runPlaceProblem(run, { from }, plan, layout)}
+          onLength={(from) => change({ from }, `from ${say(from, step)}`)}
         />
       )}
-      {(end.kind === 'open' || end.kind === 'appliance') && (
-        <LengthField
-          label={`${title}: overhang${end.kind === 'appliance' ? ' (minus for a gap)' : ''}`}
-          value={end.overhang}
-          step={step}
-          signed
-          onLength={(overhang) => onEnd({ ...end, overhang })}
-        />
+      {!decided(run.right.kind) && (
+        <>
+          <BladeField
+            label="Ends at"
+            title={`${name}, ends at`}
+            note="from the wall’s left end"
+            inches={run.to === 'end' ? length : run.to}
+            check={(to) => runPlaceProblem(run, { to }, plan, layout)}
+            onLength={setTo}
+          />
+          {mayEdit && length !== null && (
+            <Checkbox
+              label="To the end of the wall"
+              checked={run.to === 'end'}
+              onChange={(whole) => setTo(whole ? 'end' : Math.floor(length * 16) / 16)}
+            />
+          )}
+        </>
       )}
-      {end.kind === 'open' && (
-        <LengthField
-          label={`${title}: corner radius`}
-          value={end.radius}
-          step={step}
-          onLength={(radius) => onEnd({ ...end, radius })}
-        />
-      )}
-    </View>
+    </>
   );
 }
 
-const styles = StyleSheet.create({
-  panel: { gap: space.m },
-  end: { gap: space.s, paddingTop: space.s, borderTopWidth: 1, borderTopColor: color.line },
-});
+const styles = StyleSheet.create({ panel: { gap: space.m } });

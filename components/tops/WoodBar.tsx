@@ -1,32 +1,105 @@
 import { StyleSheet, View } from 'react-native';
+import { Svg } from 'react-native-svg';
 
+import type { Scene } from '@/geometry/scene/display-list';
+import { SPECIES } from '@/geometry/wood/species';
+import { PaintSvg } from '../canvas/paint-svg';
 import { useOpenJob } from '../editor/JobProvider';
 import { Fraction } from '../measure/Fraction';
 import { planTotals } from '../slabs/slab-words';
+import { Press } from '../ui/Press';
 import { Select } from '../ui/Select';
 import { Text } from '../ui/Text';
 import { color, radius, space } from '../ui/tokens';
+import { useRadioKeys } from '../ui/use-radio-keys';
 
-/** The wood of the tops; only species that slabs or rack pieces are listed in can be cut. */
+/** Woods with a figure of their own on screen; all others stand in the list. */
+const SWATCHES = ['hard maple', 'black walnut', 'cherry', 'white oak', 'beech'] as const;
+
+/** px */
+const SWATCH = { width: 48, height: 28 };
+const PX_PER_INCH = 4;
+
+const named = (species: string): string => `${species.charAt(0).toUpperCase()}${species.slice(1)}`;
+
+/** The wood of the tops: five swatches, and every other wood the tables know in a list. */
 export function WoodBar() {
-  const { layout, run, mayEdit, plan } = useOpenJob();
-  const listed = [...layout.stock.slabs, ...layout.stock.rack].flatMap((slab) => (slab.species ? [slab.species] : []));
-  const species = [...new Set([layout.material.species, ...listed])];
+  const { layout, run, mayEdit } = useOpenJob();
+  const { species } = layout.material;
+  const choose = (name: string) => {
+    if (name !== species) run({ kind: 'setMaterial', value: { species: name } }, `wood ${name}`);
+  };
+  const chosen = SWATCHES.findIndex((name) => name === species);
+  const keys = useRadioKeys(
+    SWATCHES.length,
+    chosen,
+    (i) => choose(SWATCHES[i]!),
+    () => !mayEdit,
+  );
+  const others = [...new Set([...SPECIES.map((s) => s.key), species])].filter(
+    (name) => !SWATCHES.some((s) => s === name),
+  );
   return (
     <View style={styles.bar}>
-      <View style={styles.wood}>
+      <Text kind="label">Wood</Text>
+      <View role="radiogroup" aria-label="Wood" {...keys.group} style={styles.swatches}>
+        {SWATCHES.map((name, i) => (
+          <Press
+            key={name}
+            role="radio"
+            aria-checked={i === chosen}
+            aria-label={named(name)}
+            tabIndex={keys.tabIndex(i)}
+            disabled={!mayEdit}
+            onPress={() => choose(name)}
+            style={styles.press}
+          >
+            <View style={[styles.swatch, i === chosen && styles.chosen]}>
+              <Swatch species={name} />
+            </View>
+          </Press>
+        ))}
+      </View>
+      <View style={styles.others}>
         <Select
-          label="Wood"
+          label="Another wood"
           labelHidden
-          options={species.map((name) => ({ value: name, label: name[0]!.toUpperCase() + name.slice(1) }))}
-          value={layout.material.species}
+          options={others.map((name) => ({ value: name, label: named(name) }))}
+          value={chosen >= 0 ? null : species}
+          placeholder={chosen >= 0 ? named(species) : 'Another wood'}
           disabled={!mayEdit}
-          onChange={(name) => run({ kind: 'setMaterial', value: { species: name } }, `wood ${name}`)}
+          onChange={choose}
         />
       </View>
-      <Text kind="label">Visible seam, all</Text>
-      <Fraction inches={planTotals(plan, layout).visibleSeam} step={layout.step} bold size={18} />
     </View>
+  );
+}
+
+/** What all joints and seams show together. */
+export function VisibleSeam() {
+  const { layout, plan } = useOpenJob();
+  return (
+    <View style={styles.bar}>
+      <Text kind="label">Visible seam, all</Text>
+      <Fraction inches={planTotals(plan, layout).visibleSeam} step={layout.step} bold size={20} />
+    </View>
+  );
+}
+
+function Swatch({ species }: { readonly species: string }) {
+  const [w, h] = [SWATCH.width / PX_PER_INCH, SWATCH.height / PX_PER_INCH];
+  const outline = [[0, -h], [w, -h], [w, 0], [0, 0]] as const; // prettier-ignore
+  const scene: Scene = {
+    bounds: { minX: 0, minY: -h, maxX: w, maxY: 0 },
+    items: [
+      { layer: 'staves', kind: 'staves', outline, along: [1, 0], origin: [0, -h], width: 1.75, species, seed: species },
+      { layer: 'staves', kind: 'polygon', outline, stroke: { ink: 'ink', width: 2 } },
+    ],
+  };
+  return (
+    <Svg width={SWATCH.width} height={SWATCH.height} aria-hidden>
+      <PaintSvg scene={scene} pxPerInch={PX_PER_INCH} />
+    </Svg>
   );
 }
 
@@ -35,13 +108,19 @@ const styles = StyleSheet.create({
     flexDirection: 'row',
     flexWrap: 'wrap',
     alignItems: 'center',
-    gap: space.m,
+    columnGap: space.m,
+    rowGap: space.xs,
+    minHeight: 56,
     paddingHorizontal: space.m,
-    paddingVertical: 6,
+    paddingVertical: space.xs,
     backgroundColor: color.card,
     borderWidth: 1,
     borderColor: color.line,
     borderRadius: radius.card,
   },
-  wood: { width: 180 },
+  swatches: { flexDirection: 'row', flexWrap: 'wrap' },
+  press: { minWidth: 58, minHeight: 44, alignItems: 'center', justifyContent: 'center' },
+  swatch: { borderWidth: 3, borderColor: 'transparent', padding: 1 },
+  chosen: { borderColor: color.chalk },
+  others: { width: 168 },
 });

@@ -82,6 +82,9 @@ export interface TextPlace {
   readonly frame?: Ink;
 }
 
+/** What a side of something in a picture of the room is made of. */
+export type Surface = 'wood' | 'wall' | 'floor' | 'cabinet' | 'kick' | 'steel' | 'basin' | 'glass' | 'hob';
+
 /** What a drawing item belongs to, for selection, layers and export. */
 export interface Tag {
   readonly layer: Layer;
@@ -138,6 +141,25 @@ export type DrawItem = Tag &
         readonly width: number;
         readonly species: string;
         readonly seed: string;
+      }
+    /** Wood seen at a slant: boards in their tones (0 to 4) with their figure, clipped to an outline less its holes. */
+    | {
+        readonly kind: 'boards';
+        readonly outline: Polygon;
+        readonly holes?: readonly Polygon[];
+        readonly boards: readonly { readonly outline: Polygon; readonly tone: number }[];
+        readonly figure: readonly (readonly Point[])[];
+        readonly species: string;
+      }
+    /** A flat side of something that stands in the room; `light` 0 in the shade to 1 in full light. */
+    | {
+        readonly kind: 'facet';
+        readonly outline: Polygon;
+        readonly holes?: readonly Polygon[];
+        readonly surface: Surface;
+        readonly light: number;
+        /** Of surface 'wood'. */
+        readonly species?: string;
       }
     /** Line or dot pattern clipped to the outline: waste strokes, face-down dots, grain dashes. */
     | {

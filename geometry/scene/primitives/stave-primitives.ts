@@ -19,9 +19,10 @@ type Staves = Extract<DrawItem, { kind: 'staves' }>;
 
 /** Under this many px per inch the figure of the wood is left out. */
 const FIGURE_FROM = 2;
-const TONES = 5;
+/** Tones a species has; `WoodLook.tones`. */
+export const TONES = 5;
 /** A stretch of stave that gets at most one mark of figure, inches. */
-const CELL = 7;
+export const CELL = 7;
 
 /** Wood: strips in five tones along the grain, clipped to the piece, with its figure where it can be seen. */
 export function stavePrimitives(staves: Staves, view: View): Primitive[] {
@@ -113,7 +114,7 @@ class GrainFrame {
 }
 
 /** One to four tones on: never the same twice in a row. */
-function nextTone(tone: number, seed: string, index: number): number {
+export function nextTone(tone: number, seed: string, index: number): number {
   return (tone + 1 + Math.floor(chance(seed, index, 1) * (TONES - 1))) % TONES;
 }
 

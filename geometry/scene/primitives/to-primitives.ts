@@ -14,6 +14,7 @@ import {
   type Primitive,
   type View,
 } from './primitive';
+import { boardPrimitives, facetPrimitives } from './picture-primitives';
 import { stavePrimitives } from './stave-primitives';
 import { textPrimitives } from './text-primitives';
 
@@ -41,6 +42,10 @@ export function toPrimitives(item: DrawItem, view: View): Primitive[] {
       return polygonPrimitives(item, view);
     case 'staves':
       return stavePrimitives(item, view);
+    case 'boards':
+      return boardPrimitives(item, view);
+    case 'facet':
+      return facetPrimitives(item, view);
     case 'hatch':
       return hatchPrimitives(item, view);
     case 'text':

@@ -22,6 +22,8 @@ export interface RoomSceneOptions {
   readonly base?: string | null;
   /** The first mark of a cross that is being chosen. */
   readonly mark?: Mark | null;
+  /** A cross that is about to be taped. */
+  readonly cross?: { readonly from: Mark; readonly to: Mark } | null;
   /** Readings that contradict each other, where no fit says so itself. */
   readonly wrong?: readonly string[];
 }
@@ -77,6 +79,7 @@ class RoomDrawing {
       ...this.misfits(),
       ...this.notes(),
       ...this.chosenMark(),
+      ...this.pendingCross(),
     ];
   }
 
@@ -123,6 +126,32 @@ class RoomDrawing {
       if (!wall || taped === null || taped === undefined || taped === false) return [];
       return drawMisfit(wall, taped - suspect.shouldRead, this.layout.step);
     });
+  }
+
+  private pendingCross(): DrawItem[] {
+    const { cross } = this.options;
+    const from = cross && this.markAt(cross.from);
+    const to = cross && this.markAt(cross.to);
+    if (!from || !to) return [];
+    const ends = [from, to].map((at): DrawItem => {
+      return { layer: 'readings', kind: 'mark', at, mark: 'dot', size: 16, ink: 'chalk' };
+    });
+    const { turn, flipped } = readable(subtract(to, from));
+    const at: Point = [(from[0] + to[0]) / 2, (from[1] + to[1]) / 2];
+    return [
+      { layer: 'readings', kind: 'line', from, to, stroke: { ink: 'chalk', width: 3, dash: DASH_DOT } },
+      ...ends,
+      {
+        layer: 'readings',
+        kind: 'blade',
+        at,
+        inches: null,
+        step: this.layout.step,
+        turn,
+        state: 'empty',
+        ...(flipped ? { hookRight: true } : {}),
+      },
+    ];
   }
 
   private chosenMark(): DrawItem[] {

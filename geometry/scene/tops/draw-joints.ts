@@ -16,14 +16,16 @@ const HANDLE_OFF = 52;
 const HANDLE = 46;
 
 /** The line of a joint, from its back corner to its front corner. */
-export function drawJoint(joint: Joint, layout: Layout): DrawItem {
+export function drawJoint(joint: Joint, layout: Layout, selected = false): DrawItem {
   return {
     layer: 'joints',
     id: joint.between.join('-'),
     kind: 'line',
     from: joint.from,
     to: joint.to,
-    stroke: { ink: 'ink', width: 3.2, casing: woodLook(layout.material.species).dark },
+    stroke: selected
+      ? { ink: 'chalk', width: 5, casing: true }
+      : { ink: 'ink', width: 3.2, casing: woodLook(layout.material.species).dark },
   };
 }
 

@@ -8,6 +8,7 @@ import type { DrawItem, Scene } from '../display-list';
 import { drawBase } from '../room/draw-bases';
 import { text } from '../room/scene-styles';
 import { outward, wallBodies, WALL_THICKNESS } from '../room/wall-bodies';
+import { runEnds, type OpenRunEnd } from './run-ends';
 import { drawConnectors, drawJoint, drawJointSize, drawSeam, drawSeamHandle, seamName } from './draw-joints';
 import { drawCutout, drawLetter, drawOutline, drawSizes, drawWood } from './draw-pieces';
 
@@ -21,8 +22,10 @@ export interface TopsLayers {
 
 export interface TopsSceneOptions {
   readonly layers?: Partial<TopsLayers>;
-  /** `piece Q`, `seam R-S`, `cutout c1`. */
+  /** `piece Q`, `joint 1-2`, `seam R-S`, `cutout c1`, `end 1 left`, or all of a run or an island: `top 1`. */
   readonly selected?: string | null;
+  /** Letters of pieces to light besides what is selected. */
+  readonly lit?: readonly string[];
   /** Seams can be slid: each has its handle and a blade with what stays visible. */
   readonly handles?: boolean;
 }
@@ -35,15 +38,21 @@ const SEEN = new Set(['range', 'opening']);
 export function topsScene(plan: Plan, layout: Layout, options: TopsSceneOptions = {}): Scene {
   const layers = { ...LAYERS, ...options.layers };
   const chosen = (name: string) => options.selected === name;
+  const lit = new Set(options.lit);
+  const lights = (piece: Plan['pieces'][number]) =>
+    chosen(`piece ${piece.letter}`) || chosen(`top ${piece.on}`) || lit.has(piece.letter);
   const { pieces, cutouts, joints, seams } = plan;
   const items: DrawItem[] = [
     ...(layers.walls ? surroundings(plan, layout) : []),
     ...pieces.map((piece) => drawWood(piece, layout, layers.grain)),
     ...cutouts.flatMap((cutout) => drawCutout(cutout, layout, chosen(`cutout ${cutout.id}`))),
     ...pieces.map((piece) => drawOutline(piece, layout, false)),
-    ...joints.map((joint) => drawJoint(joint, layout)),
+    ...joints.map((joint) => drawJoint(joint, layout, chosen(`joint ${joint.between.join('-')}`))),
     ...seams.flatMap((seam) => drawSeam(seam, cutouts)),
-    ...pieces.filter((piece) => chosen(`piece ${piece.letter}`)).map((piece) => drawOutline(piece, layout, true)),
+    ...pieces.filter(lights).map((piece) => drawOutline(piece, layout, true)),
+    ...runEnds(plan)
+      .filter((end) => chosen(`end ${end.run} ${end.side}`))
+      .map(drawRunEnd),
     ...(layers.hardware ? joints.flatMap(drawConnectors) : []),
     ...pieces.flatMap((piece) => drawLetter(piece, layers.grain && !layers.sizes)),
     ...(layers.sizes ? pieces.flatMap((piece) => drawSizes(piece, layout)) : []),
@@ -60,6 +69,16 @@ export function topsScene(plan: Plan, layout: Layout, options: TopsSceneOptions 
     alt: pieces.length > 0 ? `Tops from above: pieces ${letters}.` : 'No tops yet.',
   };
 }
+
+/** The end that is chosen, on its run. */
+const drawRunEnd = ({ run, side, from, to }: OpenRunEnd): DrawItem => ({
+  layer: 'tops',
+  id: `${run} ${side}`,
+  kind: 'line',
+  from,
+  to,
+  stroke: { ink: 'chalk', width: 6, casing: true },
+});
 
 function boundsOf(plan: Plan, layout: Layout, layers: TopsLayers): Scene['bounds'] {
   const points = plan.pieces.flatMap((piece) => [...piece.outline]);
