@@ -69,15 +69,23 @@ function greeting(config: Config, signIns: readonly DemoSignIn[]): string {
   return lines.join('\n');
 }
 
+/** System error and SQLSTATE of a full disk. */
 const FULL_DISK = ['ENOSPC', '53100'];
+const INSUFFICIENT_PRIVILEGE = '42501';
 
 /** One sentence for what a person can put right; anything else with its stack. */
 function told(error: unknown): unknown {
   if (error instanceof ConfigError || error instanceof ListenError || error instanceof DatabaseUnreachableError) {
     return error.message;
   }
-  if (FULL_DISK.includes((error as { code?: string }).code ?? '')) {
+  const { code = '' } = error as { code?: string };
+  if (FULL_DISK.includes(code)) {
     return 'The disk that holds the database is full: free some space there, then run the same command again.';
+  }
+  if (code === INSUFFICIENT_PRIVILEGE) {
+    // knex puts the whole statement before the server's own words.
+    const reason = (error as Error).message.split(' - ').at(-1);
+    return `The user in DATABASE_URL may not set the database up (${reason}): give it the database and the right to create roles.`;
   }
   return error;
 }

@@ -26,9 +26,9 @@ export function connect(databaseUrl: string, poolSize = 10): Knex {
   });
 }
 
-/** A failed connection is thrown as well as printed; the caller says it better. */
+/** A failed connection and a failed migration are thrown as well as printed; the caller says it better. */
 function warnOnce(message: string): void {
-  if (!message.startsWith('Acquire connection error')) console.warn(message);
+  if (!/^(Acquire connection error|migration fail|migration file)/.test(message)) console.warn(message);
 }
 
 /** pg gives these two as text, since they may hold more than a double can. Here they never do, and a price must not be added as text. */
