@@ -23,7 +23,7 @@ export function CornerPicture({ check, height }: { readonly check: CornerCheck; 
   const angleDeg = (check.live === null ? null : triangleAngle(a, b, check.live, nominal)) ?? nominal;
   const scene = useMemo(
     () => cornerScene({ labels: check.labels, a, b, c: check.live, angleDeg, bearing, step: layout.step }),
-    [check.labels, a, b, check.live, angleDeg, bearing, layout.step],  
+    [check.labels, a, b, check.live, angleDeg, bearing, layout.step],
   );
   const view = fitView(scene.bounds, size, INSETS);
   return (

@@ -32,7 +32,7 @@ export function DrawCanvas({ draw, covered }: { readonly draw: Draw; readonly co
   const page = useMemo(() => pageFor(draw.sketch), [draw.sketch]);
   const targets = useMemo(() => drawTargets(draw.sketch, layout.step), [draw.sketch, layout.step]);
   const edge = wide ? 72 : 40;
-  const canvas = useViewport(page, { top: edge, left: edge, right: edge, bottom: edge + covered });
+  const canvas = useViewport(page, { top: edge, left: edge, right: edge, bottom: (wide ? 128 : edge) + covered });
   const reach = REACH / canvas.view.scale;
   const sendDrag = (kind: 'drag' | 'drop') => (drag: CanvasDrag) =>
     draw.send({ kind, target: drag.target, from: drag.from, to: drag.to, on: null, reach });

@@ -46,7 +46,7 @@ export function FitHead({ view, boxed = false }: { readonly view: RoomView; read
         </View>
       )}
       <View style={styles.grow}>
-        <FractionText kind="sheetTitle" level={2} tone={look.red ? 'red' : 'ink'} number={20}>
+        <FractionText kind="sheetTitle" level={2} tone={look.red ? 'red' : 'ink'} number={20} bold>
           {words.fact}
         </FractionText>
         <FractionText kind="second" tone="ink" number={17}>

@@ -16,7 +16,6 @@ export interface PadStripProps {
 
 /** One line over the pad: how it is read, and Skip. */
 export function PadStrip({ label, options = [], value, onChange, onSkip }: PadStripProps) {
-  if (options.length === 0 && !onSkip) return null;
   return (
     <View style={styles.strip}>
       {options.length > 0 ? (

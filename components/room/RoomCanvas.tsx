@@ -39,9 +39,10 @@ export function RoomCanvas({ view, tools, covered, onDigit }: RoomCanvasProps) {
   const { base, largeBows } = view;
   const mark = tools.cross.from;
   const wrong = useWrong(view);
+  const pending = view.typing?.kind === 'tie' && view.typing.id === null ? view.typing : null;
   const scene = useMemo(
-    () => roomScene(plan, layout, { selected, base, largeBows, mark, wrong }),
-    [plan, layout, selected, base, largeBows, mark, wrong],
+    () => roomScene(plan, layout, { selected, base, largeBows, mark, wrong, cross: pending }),
+    [plan, layout, selected, base, largeBows, mark, wrong, pending],
   );
   const all = useMemo(() => roomTargets(plan, layout, scene, base), [plan, layout, scene, base]);
   const targets = useMemo(() => targetsFor(all, tools.tool.kind, mayEdit), [all, tools.tool.kind, mayEdit]);

@@ -149,8 +149,7 @@ function useSubtitle(view: RoomView, drawing: boolean): string {
   const { walls, corners } = layout.room;
   if (drawing) return 'Room: drawing the walls';
   if (walls.length === 0) return 'Room: no walls yet';
-  if (view.typing?.kind === 'corner' && mayEdit)
-    return `Check ${targetName(layout, view.typing).toLowerCase().replace(/[a-n]\d*-[a-n]\d*$/, (name) => name.toUpperCase())}: two marks, then tape across`; // prettier-ignore
+  if (view.typing?.kind === 'corner' && mayEdit) return `${targetName(layout, view.typing)}: two marks, then across`;
   const taped = walls.filter((wall) => wall.length.length > 0).length;
   const checked = corners.filter((corner) => corner.triangle || corner.angle !== undefined).length;
   if (!nextTarget(layout, null, null)) return 'Room: all readings in';
