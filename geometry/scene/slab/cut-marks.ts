@@ -90,9 +90,11 @@ export function madeEnd(slab: PlacedSlab, cut: NestCrosscut, side: 'left' | 'rig
   const piece = pieceAt(slab, side === 'left' ? cut.left : cut.right);
   if (!piece) return null;
   const line = lineOf(cut, side);
-  const low = reach(piece, side, cut.yFront);
-  const high = reach(piece, side, cut.yBack);
-  return Math.abs(low - line.bottom) < SAME && Math.abs(high - line.top) < SAME ? piece : null;
+  // A lane may be ripped again after this cut: the piece's end is as high as the piece, not as the lane.
+  const { minY, maxY } = boundingBox(piece.outline);
+  const slope = (line.top - line.bottom) / (cut.yBack - cut.yFront);
+  const meets = (y: number) => Math.abs(reach(piece, side, y) - (line.bottom + slope * (y - cut.yFront))) < SAME;
+  return meets(Math.max(cut.yFront, minY)) && meets(Math.min(cut.yBack, maxY)) ? piece : null;
 }
 
 /** Where the piece ends on its side of a cut, at the lower or the upper edge of its lane. */

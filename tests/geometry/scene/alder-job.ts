@@ -97,6 +97,16 @@ export const stripsJob = (): Job =>
     ],
   });
 
+/** Only the piece beside the range, from a whole slab: most of it stays as an offcut for the rack. */
+export const shortJob = (): Job =>
+  planJob({
+    ...ALDER,
+    runs: ALDER.runs.slice(0, 1),
+    cutouts: [],
+    joints: [],
+    stock: { ...ALDER.stock, rack: [] },
+  });
+
 export const HEAD: SheetHead = {
   jobNumber: '0142',
   jobName: 'Scullery at Alder Lane',

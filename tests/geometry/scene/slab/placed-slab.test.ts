@@ -4,7 +4,7 @@ import { area, boundingBox } from '@/geometry/core/polygon';
 import type { Plan } from '@/geometry/plan/types';
 import { placeSlab } from '@/geometry/scene/slab/placed-slab';
 
-import { alderJob, sharedMiterJob } from '../alder-job';
+import { alderJob, stripsJob, sharedMiterJob } from '../alder-job';
 
 const job = alderJob();
 
@@ -52,7 +52,8 @@ describe('placeSlab', () => {
   });
 
   it('numbers slabs of one kind and names a rack piece', () => {
-    const names = job.plan.nest!.slabs.map((_, i) => placeSlab(job.plan, job.layout, i).name);
+    const { plan, layout } = stripsJob();
+    const names = plan.nest!.slabs.map((_, i) => placeSlab(plan, layout, i).name);
     expect(names).toContain('rack 0207');
     expect(names).toContain('slab HM-96 no. 1');
     expect(names).toContain('slab HM-96 no. 2');

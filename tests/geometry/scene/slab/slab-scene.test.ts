@@ -2,7 +2,7 @@ import type { DrawItem, Scene } from '@/geometry/scene/display-list';
 import { slabScene } from '@/geometry/scene/slab/slab-scene';
 import { contains } from '@/geometry/core/polygon';
 
-import { alderJob, sharedMiterJob } from '../alder-job';
+import { alderJob, shortJob, sharedMiterJob } from '../alder-job';
 
 const of = <K extends DrawItem['kind']>(scene: Scene, kind: K, layer: DrawItem['layer']) =>
   scene.items.filter((item): item is Extract<DrawItem, { kind: K }> => item.kind === kind && item.layer === layer);
@@ -36,7 +36,7 @@ describe('slabScene', () => {
   });
 
   it('boxes the size of an offcut that goes to the rack', () => {
-    const job = alderJob();
+    const job = shortJob();
     const index = job.plan.nest!.slabs.findIndex((slab) => slab.offcuts.some((offcut) => offcut.keep));
     const kept = job.plan.nest!.slabs[index]!.offcuts.find((offcut) => offcut.keep)!;
     const [size] = of(slabScene(job.plan, job.layout, index), 'length', 'offcuts');
