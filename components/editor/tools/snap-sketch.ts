@@ -37,12 +37,12 @@ export function snapCorner(to: Point, anchors: readonly SnapAnchor[]): Snapped {
     const [a, b] = held.map(({ anchor, bearing }) => ({ origin: anchor.at, direction: direction(bearing) }));
     const crossing = intersect(a!, b!);
     // Two nearly parallel walls cross far away, where nobody drew.
-    if (crossing && distance(crossing, to) < distance(to, anchors[0]!.at)) return { at: crossing, snapped: 2 };
+    if (crossing && distance(crossing, to) < distance(to, anchors[0]!.at)) return { at: clean(crossing), snapped: 2 };
   }
   const [first] = held;
   if (!first) return { at: [tidy(to[0]), tidy(to[1])], snapped: 0 };
   const reach = Math.max(TIDY, tidy(distance(first.anchor.at, to)));
-  return { at: along(first.anchor.at, direction(first.bearing), reach), snapped: 1 };
+  return { at: clean(along(first.anchor.at, direction(first.bearing), reach)), snapped: 1 };
 }
 
 /** The bearing nearest to the drawn one that is square or at 45, or null when none is near. */
@@ -56,5 +56,8 @@ function caught({ at, bearing }: SnapAnchor, to: Point): number | null {
 }
 
 const direction = (bearing: number): Point => [Math.cos(bearing), Math.sin(bearing)];
+
+/** Takes the dust of sines and cosines off: a square wall then lies exactly square. */
+const clean = ([x, y]: Point): Point => [Math.round(x * 1e6) / 1e6, Math.round(y * 1e6) / 1e6];
 
 const tidy = (inches: number): number => Math.round(inches / TIDY) * TIDY;
