@@ -28,7 +28,7 @@ export interface RoomCanvasProps {
 
 /** px kept free for blades, badges and bars. */
 const WIDE_EDGES = { top: 96, left: 96, right: 96, bottom: 116 };
-const PHONE_EDGES = { top: 78, left: 70, right: 70, bottom: 26 };
+const PHONE_EDGES = { top: 78, left: 84, right: 84, bottom: 26 };
 
 /** The room to scale, its readings on it. What a tap does is up to the tool in hand. */
 export function RoomCanvas({ view, tools, covered, onDigit }: RoomCanvasProps) {
@@ -41,8 +41,8 @@ export function RoomCanvas({ view, tools, covered, onDigit }: RoomCanvasProps) {
   const wrong = useWrong(view);
   const pending = view.typing?.kind === 'tie' && view.typing.id === null ? view.typing : null;
   const scene = useMemo(
-    () => roomScene(plan, layout, { selected, base, largeBows, mark, wrong, cross: pending }),
-    [plan, layout, selected, base, largeBows, mark, wrong, pending],
+    () => roomScene(plan, layout, { selected, base, largeBows, mark, wrong, cross: pending, plain: !wide }),
+    [plan, layout, selected, base, largeBows, mark, wrong, pending, wide],
   );
   const all = useMemo(() => roomTargets(plan, layout, scene, base), [plan, layout, scene, base]);
   const targets = useMemo(() => targetsFor(all, tools.tool.kind, mayEdit), [all, tools.tool.kind, mayEdit]);

@@ -102,12 +102,19 @@ function moreItems(tools: RoomTools, wide: boolean, mayEdit: boolean, onKeys: ()
   const offered = wide || !mayEdit ? [] : TOOLS.filter(({ tool }) => tool.kind !== 'wall');
   return [
     ...offered.map(({ tool, label, icon }): MenuItem => {
-      const words = tool.kind === 'place' ? `Put in: ${label.toLowerCase()}` : TOOL_WORDS[tool.kind];
+      const words = tool.kind === 'place' ? (PLACE_WORDS[label] ?? label) : TOOL_WORDS[tool.kind];
       return { key: label, label: words, icon, onPress: () => tools.take(tool) };
     }),
     { key: 'keys', label: 'Keys', icon: 'help', onPress: onKeys },
   ];
 }
+
+const PLACE_WORDS: Readonly<Record<string, string>> = {
+  Sink: 'Put in a sink base',
+  Gap: 'Leave a gap for a range',
+  Window: 'Put in a window',
+  'No access': 'Corner base with no access',
+};
 
 const TOOL_WORDS = {
   wall: 'Tape a wall',

@@ -15,7 +15,7 @@ import type { RoomView } from './use-room-view';
 /** px of the sheet that holds the pad and its one line above. */
 const PAD_HEIGHT = 536;
 /** px while walls are drawn: the page above is what matters. */
-const DRAW_HEIGHT = 300;
+const DRAW_HEIGHT = 264;
 
 export interface RoomSheetProps {
   readonly view: RoomView;
@@ -70,12 +70,14 @@ export function RoomSheet({ view, tools, typing, onCovers, children }: RoomSheet
       edge={red ? 'red' : 'ink'}
       onCovers={onCovers}
       foot={
-        <View style={styles.foot}>
-          {mayEdit && !view.selected && <NoteButton target={null} />}
-          <View style={styles.grow}>
-            <LayTops view={view} wide />
+        view.selected ? undefined : (
+          <View style={styles.foot}>
+            {mayEdit && <NoteButton target={null} />}
+            <View style={styles.grow}>
+              <LayTops view={view} wide />
+            </View>
           </View>
-        </View>
+        )
       }
     >
       {content}

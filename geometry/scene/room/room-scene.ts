@@ -18,6 +18,8 @@ export interface RoomSceneOptions {
   readonly selected?: string | null;
   /** Every bow larger than life; otherwise only that of the selected wall is. */
   readonly largeBows?: boolean;
+  /** A small screen: no words at what stands along the walls, bows named only on the selected wall. */
+  readonly plain?: boolean;
   /** Something along a wall that is open for change, by id. */
   readonly base?: string | null;
   /** The first mark of a cross that is being chosen. */
@@ -114,7 +116,11 @@ class RoomDrawing {
   private bases(): DrawItem[] {
     return this.layout.bases.flatMap((base) => {
       const wall = this.walls.byId.get(base.wall);
-      return wall ? drawBase(base, wall, base.id === this.options.base) : [];
+      return wall
+        ? drawBase(base, wall, base.id === this.options.base).filter(
+            (item) => !this.options.plain || item.kind !== 'runs',
+          )
+        : [];
     });
   }
 
@@ -221,7 +227,9 @@ class RoomDrawing {
       const standing = this.layout.bases.filter((base) => base.wall === wall.id && base.kind !== 'window');
       const free = (at: number) => !standing.some((b) => at > b.from - 3 && at < alongWall(wall, b.to) + 3);
       return [
-        ...drawBow(wall, this.layout.step, free, this.bowScale(wall.id)),
+        ...drawBow(wall, this.layout.step, free, this.bowScale(wall.id)).filter(
+          (item) => item.kind !== 'runs' || !this.options.plain || this.stateOf(wall.id).selected,
+        ),
         ...drawWallReading(wall, readings, this.stateOf(wall.id), this.layout.step, free),
       ];
     });
