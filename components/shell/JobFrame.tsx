@@ -51,7 +51,9 @@ export function JobFrame({ subtitle, primary, actions, undo = true, ...page }: J
         <>
           <SaveState />
           {showUndo && <IconButton icon="undo" label="Undo" disabled={!canUndo} onPress={undoLast} />}
-          {showUndo && (wide || canRedo) && <IconButton icon="redo" label="Redo" disabled={!canRedo} onPress={redoLast} />}
+          {showUndo && (wide || canRedo) && (
+            <IconButton icon="redo" label="Redo" disabled={!canRedo} onPress={redoLast} />
+          )}
           {actions}
           {wide && primary}
         </>
