@@ -11,7 +11,7 @@ import { triangleAngle } from './corner-marks';
 import type { CornerCheck } from './use-corner-check';
 
 /** px around the corner for blades and letters. */
-const INSETS = { top: 64, right: 64, bottom: 20, left: 56 };
+const INSETS = { top: 62, right: 72, bottom: 16, left: 76 };
 
 /** The corner as it lies in the room, its two marks and the tape between them. */
 export function CornerPicture({ check, height }: { readonly check: CornerCheck; readonly height?: number }) {

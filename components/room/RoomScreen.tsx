@@ -70,10 +70,12 @@ export function RoomScreen() {
         empty ? undefined : (
           <Inspector
             label="Readings"
-            foot={typing || view.selected || drawing ? <FitHead view={view} boxed /> : undefined}
+            foot={
+              (typing && !check) || (view.selected && !typing) || drawing ? <FitHead view={view} boxed /> : undefined
+            }
           >
             <View style={styles.side}>
-              {check && <CornerPicture check={check} height={220} />}
+              {check && <CornerPicture check={check} height={200} />}
               {side}
             </View>
           </Inspector>
@@ -165,6 +167,6 @@ function useSubtitle(view: RoomView, drawing: boolean): string {
 
 const styles = StyleSheet.create({
   fill: { flex: 1, minHeight: 0 },
-  side: { padding: space.l, gap: space.m },
+  side: { gap: space.m },
   bar: { position: 'absolute', left: 184, right: 20, bottom: 20, flexDirection: 'row' },
 });

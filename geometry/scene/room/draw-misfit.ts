@@ -32,7 +32,7 @@ export function drawMisfit(wall: WallFrame, off: number, step: Layout['step']): 
       ...tag,
       kind: 'runs',
       at: end,
-      shift: [wall.along[0] * 24 - wall.inward[0] * 34, wall.along[1] * 24 - wall.inward[1] * 34],
+      shift: [wall.along[0] * 20 + wall.inward[0] * 26, wall.along[1] * 20 + wall.inward[1] * 26],
       runs: [{ inches: rough, step, unit: true, style: text.alarmNumber }, { text: off > 0 ? ' over' : ' short' }],
       style: text.alarm,
       anchor: 'middle',
