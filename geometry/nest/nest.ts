@@ -1,13 +1,15 @@
+import { cheapestMix } from './bound/cheapest-mix';
 import { normalise } from './model/normalise';
 import type { Problem } from './model/problem';
 import { problem as report } from './model/validate';
 import { assemble } from './plan/assemble';
+import { chosen, evidenceFor, priceTags } from './plan/certificate';
 import type { FoundPlan } from './search/mix-search';
-import { search } from './search/search';
+import { search, type SearchResult } from './search/search';
 import type { NestError, NestInstance, NestOptions, NestPlan } from './types';
 
 /** Units of work when the caller sets no limit: some ten seconds on a small machine. */
-const DEFAULT_WORK = 10_000_000;
+const DEFAULT_WORK = 5_000_000;
 
 /**
  * Lays the parts on the cheapest set of slabs, with the saw cuts that free them and a lower bound on what any plan costs.
@@ -22,7 +24,7 @@ export function nest(instance: NestInstance, options: NestOptions = {}): NestPla
   const result = search(problem, {
     stop: options.stop ?? (() => false),
     workLimit: options.workLimit ?? DEFAULT_WORK,
-    onBetter: (plan, lower) => options.onBetter?.(finished(problem, plan, lower, 0), lower),
+    onBetter: (plan, soFar) => options.onBetter?.(finished(problem, plan, soFar, false), soFar.lower),
   });
   if (!result.plan)
     return report(
@@ -30,21 +32,36 @@ export function nest(instance: NestInstance, options: NestOptions = {}): NestPla
       ['stock'],
       'There are not enough slabs for all parts: add stock or raise a count.',
     );
-  return finished(problem, result.plan, result.lower, result.work);
+  return finished(problem, result.plan, result, options.evidence ?? false);
 }
 
-function finished(problem: Problem, { patterns, picked, cost }: FoundPlan, lower: number, work: number): NestPlan {
+function finished(problem: Problem, plan: FoundPlan, result: SearchResult, withEvidence: boolean): NestPlan {
+  const { patterns, picked, cost } = plan;
+  const { lower, learnt, work } = result;
+  const values = learnt.cuts.findLast((cut) => cut.proof)?.proof?.value;
+  const copies = [problem.fixed, ...picked.map((o, c) => problem.choices[c]!.options[o]!)].flatMap((o) => o.copies);
+  const tags = values ? priceTags(problem, values, copies) : [];
+  const byArea = areaSuffices(problem, result);
+  const evidence = withEvidence ? { evidence: evidenceFor(problem, lower, learnt) } : {};
   return {
     instance: problem.instance.id,
     slabs: assemble(problem, patterns, picked),
-    choices: picked.flatMap((o, c) => problem.choices[c]!.options[o]!.picks),
+    choices: chosen(problem, picked),
     cost,
     lowerBound: lower,
     gap: cost === lower ? 0 : (cost - lower) / lower,
     proved: cost === lower,
-    provedScope: 'class',
-    certificate: { kind: 'area' },
-    priceTags: [],
+    provedScope: byArea ? 'any' : 'class',
+    certificate: byArea ? { kind: 'area' } : { kind: 'duals', values: tags, ...evidence },
+    priceTags: tags,
     work,
   };
+}
+
+/** The areas of parts and slabs alone prove the bound: it then holds for every plan, not only for those of the class. */
+function areaSuffices(problem: Problem, { learnt, lower }: SearchResult): boolean {
+  const area = learnt.cuts.filter((cut) => cut.proof === null);
+  const prices = problem.stock.map((s) => s.price);
+  const counts = problem.stock.map((s) => s.count);
+  return cheapestMix({ prices, counts, cuts: area, tooSmall: [] }, lower, 20_000).kind === 'none';
 }

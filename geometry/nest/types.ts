@@ -157,13 +157,44 @@ export interface NestPriceTag {
   readonly cents: number;
 }
 
+/** A value in cents for one copy of a part, or for the parts of a group that are cut together. */
+export interface NestValue {
+  readonly parts: readonly string[];
+  readonly cents: number;
+}
+
 /**
- * Evidence for `lowerBound` from which a checker recomputes it without trusting the search. 'area': no more than the
- * areas of parts and slabs are needed. 'duals': a value in cents for one of each part (a group's members share theirs
- * equally); no pattern of the class on a slab may be worth more than the slab's price after the scaling of the bound.
+ * Values of all parts. A slab can hold no more than its best pattern is worth, so the slabs bought must be worth all parts
+ * together. In a ripped section a part may lie in one lane only: each list of `penalties` says what a part loses for every
+ * lane it lies in and brings back once for each copy; under any of them the best lanes side by side are a bound for the section.
+ */
+export interface NestValuation {
+  readonly values: readonly NestValue[];
+  readonly penalties: readonly (readonly NestValue[])[];
+}
+
+/** Slabs that cannot hold the parts: no choice of rows, each short of the best by no more than these values leave, covers them. */
+export interface NestSmallMix extends NestValuation {
+  readonly slabs: readonly { readonly stock: string; readonly count: number }[];
+  readonly choices: readonly NestChosen[];
+}
+
+/**
+ * All that is needed to work `lowerBound` out again without trusting the search: the cheapest whole slabs that are worth all
+ * parts under every valuation and by area, and are none of the mixes that are too small.
+ */
+export interface NestEvidence {
+  readonly valuations: readonly NestValuation[];
+  readonly tooSmall: readonly NestSmallMix[];
+}
+
+/**
+ * What `lowerBound` rests on. 'area': the areas of parts and slabs alone. 'duals': values in cents for one of each part (a
+ * group's members share theirs equally), and, when asked for, the whole evidence.
  */
 export type NestCertificate =
-  { readonly kind: 'area' } | { readonly kind: 'duals'; readonly values: readonly NestPriceTag[] };
+  | { readonly kind: 'area' }
+  | { readonly kind: 'duals'; readonly values: readonly NestPriceTag[]; readonly evidence?: NestEvidence };
 
 export interface NestPlan {
   readonly instance: string;
@@ -204,27 +235,13 @@ export interface NestError {
   };
 }
 
-/** A mixed integer program: minimise cost x, every row within its limits, 0 <= x <= upper. */
-export interface MilpProblem {
-  readonly cost: readonly number[];
-  readonly upper: readonly number[];
-  readonly integer: readonly boolean[];
-  readonly rows: readonly {
-    readonly terms: readonly (readonly [column: number, factor: number])[];
-    readonly lower: number;
-    readonly upper: number;
-  }[];
-}
-
-/** Solves a program within `seconds`; null when it found nothing. The answer is checked again by the caller, never trusted. */
-export type MilpSolver = (problem: MilpProblem, seconds: number) => { readonly x: readonly number[] } | null;
-
 export interface NestOptions {
   /** Asked now and then; true ends the search with the best plan so far. */
   readonly stop?: () => boolean;
   /** Most units of counted work; the search ends the same way on every machine. */
   readonly workLimit?: number;
-  readonly milp?: MilpSolver;
+  /** Puts the whole evidence for the bound into the plan's certificate. */
+  readonly evidence?: boolean;
   /** Told of every better plan as it is found, with the lower bound known then. */
   readonly onBetter?: (plan: NestPlan, lowerBound: number) => void;
 }

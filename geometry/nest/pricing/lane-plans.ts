@@ -1,6 +1,5 @@
 import type { Problem } from '../model/problem';
 import { FIT, SAME_SIZE } from '../model/tolerance';
-import { LinearProgram } from '../lp/simplex';
 import type { DepthRows } from '../row/depth-rows';
 
 /** More ways than this to fill the depth with lanes are not listed; the bound then takes lanes by their share of the depth. */
@@ -11,7 +10,7 @@ export interface LanePlans {
   readonly depths: readonly number[];
   /** Fullest numbers of lanes of each depth that fit side by side; null when there are too many to list. */
   readonly sets: readonly (readonly number[])[] | null;
-  /** Share of the section that a lane of each depth takes, so that the shares of any lanes side by side sum to 1 at most. */
+  /** Share of the depth that a lane of each depth takes with its kerf: the shares of lanes side by side sum to 1 at most. */
   readonly share: readonly number[];
 }
 
@@ -46,49 +45,13 @@ export function lanePlans(problem: Problem, rows: DepthRows): LanePlans {
       rows.depth,
     );
   const fullest = sets.filter((a) => !sets.some((b) => b !== a && b.every((n, d) => n >= a[d]!)));
-  const share = tooMany
-    ? depths.map((d) => (d + kerf) / (rows.depth + kerf + FIT))
-    : fairShares(
-        depths,
-        fullest,
-        depths.map((d) => lengthAt(problem, rows, d)),
-      );
+  const share = depths.map((d) => (d + kerf) / (rows.depth + kerf + FIT));
   return { depths, sets: tooMany ? null : fullest, share };
 }
 
 function distinct(depths: readonly number[]): number[] {
   const sorted = [...depths].sort((a, b) => a - b);
   return sorted.filter((d, i) => i === 0 || d - sorted[i - 1]! > SAME_SIZE);
-}
-
-const lengthAt = (problem: Problem, rows: DepthRows, depth: number): number =>
-  rows.shallow.reduce((sum, i) => {
-    const item = problem.items[i]!;
-    return Math.abs(item.depth - depth) <= SAME_SIZE ? sum + item.box : sum;
-  }, 1);
-
-/** The shares that count the most for these lengths: no set of lanes sums to more than 1, and a deeper lane has no smaller share. */
-function fairShares(
-  depths: readonly number[],
-  sets: readonly (readonly number[])[],
-  weights: readonly number[],
-): number[] {
-  const rows = [...sets.map(() => 1), ...depths.slice(1).map(() => 0)];
-  const program = new LinearProgram(rows.map((rhs) => ({ sense: '<=', rhs, penalty: 0 })));
-  depths.forEach((_, d) => {
-    const entries: [number, number][] = sets.flatMap((set, r): [number, number][] =>
-      set[d]! > 0 ? [[r, set[d]!]] : [],
-    );
-    if (d > 0) entries.push([sets.length + d - 1, -1]);
-    if (d < depths.length - 1) entries.push([sets.length + d, 1]);
-    program.addColumn(
-      -weights[d]!,
-      entries.map((e) => e[0]),
-      entries.map((e) => e[1]),
-    );
-  });
-  // Shaved so that rounding in the program can never let a set sum to more than 1.
-  return program.solve().x.map((s) => s * (1 - 1e-9));
 }
 
 /** The most that lanes side by side can be worth together, when a lane of each depth is worth so much. */

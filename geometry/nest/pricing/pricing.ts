@@ -17,6 +17,8 @@ export interface Priced {
   /** By stock entry: no pattern of the class is worth more. */
   readonly worth: readonly number[];
   readonly rows: readonly PricedRow[];
+  /** Penalties of shallow items that prove the worth: see `SectionValues`. */
+  readonly penalties: readonly (readonly number[])[];
 }
 
 export interface Pricing {
@@ -55,14 +57,16 @@ export function createPricing(problem: Problem, rowsAt: (depth: number) => Depth
   function price(value: readonly number[], demand: readonly number[], known: readonly number[], nodes: number): Priced {
     const worth = problem.stock.map(() => 0);
     const found: PricedRow[] = [];
+    const penalties: (readonly number[])[] = [];
     for (const group of groups) {
       const best = group.best({ value, demand, conflict }, KEEP, known, nodes);
       group.stock.forEach((stock, i) => {
         worth[stock.index] = best[i]!.bound;
         best[i]!.rows.forEach((row) => found.push({ ...row, stock }));
       });
+      penalties.push(...group.sections.penalties());
     }
-    return { worth, rows: found };
+    return { worth, rows: found, penalties };
   }
 
   function all(

@@ -6,9 +6,8 @@ import { bestLaneSet, lanePlans, type LanePlans } from './lane-plans';
 import { rowSizes, type RowSizes } from './row-sizes';
 
 /**
- * Upper bounds on what a section can hold. The quick one is a table by length: the lesser of lanes valued apart (each item
- * once in a lane, but perhaps in several lanes) and of all lanes as one long lane (each item once). The exact one is what
- * the relaxed section is worth.
+ * Upper bounds on what a section can hold. The quick one is a table by length in which lanes are valued apart: each item once
+ * in a lane, but perhaps in several lanes. The sharp one is what the relaxed section is worth.
  */
 export interface SectionValues {
   readonly plans: LanePlans;
@@ -18,6 +17,8 @@ export interface SectionValues {
   most(room: number): number;
   /** The sharper bound; not sharper than needed to be at or under `enough`. */
   exact(room: number, enough: number): number;
+  /** Penalties that prove every sharper bound given since the last update. */
+  penalties(): (readonly number[])[];
   /** The relaxed section of this length for the values of the last update. */
   relaxedAt(room: number): RelaxedSection;
 }
@@ -48,9 +49,8 @@ export function createSectionValues(
     const items = rows.shallow.filter((i) => lane.shapes[i]);
     return { items, sizes: rowSizes(lane, items, problem.kerf) };
   });
-  const together = joinLanes(problem, rows, plans, kinds);
   const values = new Float64Array(cells);
-  const longest = Math.max(together.ends, 0, ...kinds.map((k) => k.sizes.ends));
+  const longest = Math.max(0, ...kinds.map((k) => k.sizes.ends));
   const table = new Float64Array(cells + Math.ceil((longest + FIT) / cell) + 2);
   const byLane = kinds.map(() => new Float64Array(cells));
   const relaxer = createSectionRelaxer(plans, rowsAt, rows.shallow);
@@ -59,12 +59,9 @@ export function createSectionValues(
   let current: { value: readonly number[]; demand: readonly number[] } = { value: [], demand: [] };
 
   function update(value: readonly number[], demand: readonly number[]): void {
-    values.fill(0);
     known.length = 0;
     current = { value, demand };
     if (kinds.length === 0) return;
-    fillTable(table, rows.shallow, together.size, value, demand, cell);
-    readTable(table, values, together.ends, cell);
     kinds.forEach(({ items, sizes }, k) => {
       fillTable(table, items, sizes.size, value, demand, cell);
       readTable(table, byLane[k]!, sizes.ends, cell);
@@ -96,23 +93,7 @@ export function createSectionValues(
     return found?.relaxed ?? relaxer.relax(room, current.value, current.demand);
   }
 
-  return { plans, relaxer, update, most, exact, relaxedAt };
-}
-
-/** Each item's least size in any lane it may lie in, times the share of the section that its lane takes. */
-function joinLanes(
-  problem: Problem,
-  rows: DepthRows,
-  plans: LanePlans,
-  kinds: readonly LaneKind[],
-): Pick<RowSizes, 'size' | 'ends'> {
-  const size = problem.items.map(() => Infinity);
-  kinds.forEach(({ items, sizes }) => items.forEach((i) => (size[i] = Math.min(size[i]!, sizes.size[i]!))));
-  for (const i of rows.shallow) {
-    const lane = plans.depths.findIndex((d) => d >= problem.items[i]!.depth - FIT);
-    size[i]! *= plans.share[lane]!;
-  }
-  return { size, ends: Math.max(0, ...kinds.map((k) => k.sizes.ends)) };
+  return { plans, relaxer, update, most, exact, penalties: () => known.map((k) => k.relaxed.penalty), relaxedAt };
 }
 
 /** Best total value of items, each at most `demand` times, by cells of room; sizes are rounded down, so the bound holds. */
@@ -146,11 +127,11 @@ function readTable(table: Float64Array, out: Float64Array, ends: number, cell: n
   }
 }
 
-/** Lowers `values` to what the best lanes side by side are worth. */
+/** What the best lanes side by side are worth, by cells of room. */
 function addLanes(plans: LanePlans, byLane: readonly Float64Array[], values: Float64Array): void {
   const at = byLane.map(() => 0);
   for (let q = 0; q < values.length; q++) {
     for (let k = 0; k < at.length; k++) at[k] = byLane[k]![q]!;
-    values[q] = Math.min(values[q]!, bestLaneSet(plans, at));
+    values[q] = bestLaneSet(plans, at);
   }
 }

@@ -20,12 +20,28 @@ export interface SearchContext {
   readonly spend: (units: number) => boolean;
 }
 
-/** The inequality on what is bought that these item values prove: a slab is worth no more than its best pattern. */
-export function mixCut(problem: Problem, value: readonly number[], worth: readonly number[]): MixCut {
+/** What a pricing of patterns under some item values proves. */
+export interface Proof {
+  /** By item, cents. */
+  readonly value: readonly number[];
+  /** By stock entry: no pattern of the class is worth more. */
+  readonly worth: readonly number[];
+  /** Penalties of shallow items that the worth rests on. */
+  readonly penalties: readonly (readonly number[])[];
+}
+
+/** A cut with what proves it; null when areas alone do. */
+export interface ProvenCut extends MixCut {
+  readonly proof: Proof | null;
+}
+
+/** The inequality on what is bought that item values prove: a slab is worth no more than its best pattern. */
+export function provenCut(problem: Problem, { value, worth, penalties }: Proof): ProvenCut {
   const need = (needs: readonly number[]): number => needs.reduce((sum, n, i) => sum + n * value[i]!, 0);
   return {
     worth,
     need: need(problem.fixed.need),
     optionNeed: problem.choices.map(({ options }) => options.map((o) => need(o.need))),
+    proof: { value, worth, penalties },
   };
 }

@@ -1,5 +1,5 @@
 import { isWithin, worthOf, type Column } from './column';
-import type { SearchContext } from './context';
+import type { Proof, SearchContext } from './context';
 import { createMaster, type MasterAnswer, type MasterGoal } from './master';
 
 /** How much of the best duals so far is mixed into those that are priced: pure duals of a young program swing wildly. */
@@ -9,14 +9,12 @@ const ROW_NODES = 60_000;
 /** A column must save this share of the program's objective to be worth adding. */
 const WORTHWHILE = 1e-7;
 
-export interface Generation {
+export interface Generation extends Proof {
   readonly answer: MasterAnswer;
   /** Columns that the last program uses, the most used first. */
   readonly used: readonly Column[];
-  /** Best lower bound met, and the values it came from with the worth of each slab under them. */
+  /** Best lower bound met; the proof is what it came from. */
   readonly bound: number;
-  readonly value: readonly number[];
-  readonly worth: readonly number[];
   /** False when work ran out first. */
   readonly finished: boolean;
 }
@@ -45,16 +43,21 @@ export function generateColumns(
   pool.list.forEach((column) => goal.counts[column.stock]! > 0 && add(column));
   let answer = master.solve();
   let stable = first;
-  let best = { bound: -Infinity, value: first, worth: [] as readonly number[] };
+  let best: Proof & { readonly bound: number } = { bound: -Infinity, value: first, worth: [], penalties: [] };
   let smoothing = SMOOTHING;
   const finish = (finished: boolean): Generation => ({ answer, used: usedColumns(added, answer.x), ...best, finished });
   for (;;) {
     const before = pricing.work();
     const value = answer.value.map((v, i) => smoothing * stable[i]! + (1 - smoothing) * v);
-    const { worth, rows } = pricing.price(value, context.most, knownWorth(context, pool.list, value), ROW_NODES);
+    const { worth, rows, penalties } = pricing.price(
+      value,
+      context.most,
+      knownWorth(context, pool.list, value),
+      ROW_NODES,
+    );
     const bound = boundOf(value, worth);
     if (bound > best.bound) {
-      best = { bound, value, worth };
+      best = { bound, value, worth, penalties };
       stable = value;
     }
     const columns = rows.flatMap((row) => pricing.relaxed(row, value, context.most) ?? []);

@@ -1,10 +1,9 @@
-import { cheapestMix, type Mix, type MixCut } from '../bound/cheapest-mix';
+import { cheapestMix, type Mix } from '../bound/cheapest-mix';
 import { demandOf } from '../model/problem';
 import { FIT } from '../model/tolerance';
 import type { Pattern } from '../plan/pattern';
 import type { PricedRow } from '../pricing/pricing';
-import type { SearchContext } from './context';
-import { mixCut } from './context';
+import { provenCut, type Proof, type ProvenCut, type SearchContext } from './context';
 import { coverExactly } from './cover-exactly';
 import { dive, realiseUsed } from './dive';
 import { lengthLeft, makePattern } from './make-pattern';
@@ -21,6 +20,11 @@ export interface FoundPlan {
   readonly cost: number;
 }
 
+/** A mix shown by exhaustion to be too small, with the values under which the rows were listed. */
+export interface SmallMix extends Mix {
+  readonly proof: Proof;
+}
+
 export type MixStep =
   | { readonly kind: 'found'; readonly plan: FoundPlan }
   /** A mix was shown too small, or put aside. */
@@ -29,14 +33,18 @@ export type MixStep =
   | { readonly kind: 'done' }
   | { readonly kind: 'out of work' };
 
+/** What the search has learnt so far; a mix search adds to it. */
+export interface Learnt {
+  readonly cuts: ProvenCut[];
+  readonly tooSmall: SmallMix[];
+}
+
 export interface MixSearch {
-  readonly cuts: MixCut[];
   /** Looks at the cheapest mix of slabs that nothing speaks against. */
   step(below: number, nodeLimit: number): MixStep;
   /** No plan of the class costs less. */
   lower(): number;
-  /** Mixes shown by exhaustion to be too small, and those put aside undecided. */
-  readonly tooSmall: readonly Mix[];
+  /** Mixes put aside. */
   readonly undecided: readonly Mix[];
   /** Looks at the undecided mixes again, the cheapest first. */
   reopen(): void;
@@ -48,14 +56,12 @@ export interface MixSearch {
  */
 export function createMixSearch(
   context: SearchContext,
-  firstCuts: readonly MixCut[],
+  { cuts, tooSmall }: Learnt,
   firstValues: readonly number[],
 ): MixSearch {
   const { problem } = context;
   const prices = problem.stock.map((s) => s.price);
   const counts = problem.stock.map((s) => s.count);
-  const cuts = [...firstCuts];
-  const tooSmall: Mix[] = [];
   const undecided: Mix[] = [];
   let next = 0;
 
@@ -70,12 +76,12 @@ export function createMixSearch(
     const { mix } = answer;
     const relaxed = relaxMix(context, mix, firstValues);
     if (relaxed.holds === 'no') {
-      cuts.push(mixCut(problem, relaxed.value, relaxed.worth));
+      cuts.push(provenCut(problem, relaxed));
       return { kind: 'moved' };
     }
     if (relaxed.holds === 'unknown') return { kind: 'out of work' };
     const plan = pack(mix, relaxed, nodeLimit);
-    if (plan === 'none') tooSmall.push(mix);
+    if (plan === 'none') tooSmall.push({ ...mix, proof: relaxed });
     else if (plan === 'unknown') undecided.push(mix);
     else return { kind: 'found', plan };
     return context.spend(0) ? { kind: 'out of work' } : { kind: 'moved' };
@@ -146,10 +152,8 @@ export function createMixSearch(
   }
 
   return {
-    cuts,
     step,
     lower: () => Math.min(next, ...undecided.map((m) => m.cost)),
-    tooSmall,
     undecided,
     reopen: () => void (undecided.length = 0),
   };

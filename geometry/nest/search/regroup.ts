@@ -2,7 +2,7 @@ import { areaCut } from '../bound/area-cut';
 import type { Problem } from '../model/problem';
 import { patternItems, type Pattern } from '../plan/pattern';
 import { createColumnPool, makeColumn, type Column, type RealColumn } from './column';
-import { mixCut, type SearchContext } from './context';
+import { provenCut, type SearchContext } from './context';
 import { createMixSearch } from './mix-search';
 import { MET, relax } from './relax';
 
@@ -41,7 +41,8 @@ export function recut(
   const part: SearchContext = { ...context, problem, relaxed, real, most };
   const first = relax(part, values, MET);
   if (!first.finished || first.bound >= cost - 1e-6) return null;
-  const search = createMixSearch(part, [areaCut(problem), mixCut(problem, first.value, first.worth)], first.value);
+  const learnt = { cuts: [{ ...areaCut(problem), proof: null }, provenCut(problem, first)], tooSmall: [] };
+  const search = createMixSearch(part, learnt, first.value);
   for (let n = 0; n < GROUP_STEPS; n++) {
     const step = search.step(cost, GROUP_NODES);
     if (step.kind === 'found') return [...step.plan.patterns];

@@ -1,7 +1,7 @@
 import type { Mix } from '../bound/cheapest-mix';
 import { coverOrder, fractionalCover } from '../bound/cover-bound';
 import { demandOf } from '../model/problem';
-import { mixCut, type SearchContext } from './context';
+import { provenCut, type SearchContext } from './context';
 import { generateColumns, type Generation } from './generate-columns';
 
 /** Bound and objective this share apart have met. */
@@ -32,7 +32,7 @@ export function relax(context: SearchContext, first: readonly number[], apart: n
     { demand: problem.fixed.need, withChoices: true, counts, cost: prices, penalty: penalties(context) },
     first,
     (value, worth) => {
-      const cut = mixCut(problem, value, worth);
+      const cut = provenCut(problem, { value, worth, penalties: [] });
       const need = cut.need + cut.optionNeed.reduce((sum, o) => sum + Math.min(...o), 0);
       return fractionalCover(coverOrder(cut.worth, prices, order), need, 0, prices, counts);
     },

@@ -1,15 +1,15 @@
 import { areaCut } from '../bound/area-cut';
-import { cheapestMix, type MixCut } from '../bound/cheapest-mix';
+import { cheapestMix } from '../bound/cheapest-mix';
 import { demandOf, type Problem } from '../model/problem';
 import type { Pattern } from '../plan/pattern';
 import { createPricing } from '../pricing/pricing';
 import { createDepthRows } from '../row/depth-rows';
 import { createColumnPool, makeColumn, type Column, type RealColumn } from './column';
-import { mixCut, type SearchContext } from './context';
+import { provenCut, type ProvenCut, type SearchContext } from './context';
 import { dive, realiseUsed } from './dive';
 import type { Generation } from './generate-columns';
 import { greedy } from './greedy';
-import { createMixSearch, type FoundPlan, type MixSearch } from './mix-search';
+import { createMixSearch, type FoundPlan, type Learnt, type MixSearch } from './mix-search';
 import { createLaneTools } from './pack-sections';
 import { groupsOf, recut } from './regroup';
 import { areaValues, MET, relax } from './relax';
@@ -25,15 +25,15 @@ const GROUPS_PER_ROUND = 12;
 export interface SearchResult {
   readonly plan: FoundPlan | null;
   readonly lower: number;
-  /** Inequalities that prove the bound. */
-  readonly cuts: readonly MixCut[];
+  /** Inequalities and exhausted mixes that prove the bound. */
+  readonly learnt: Learnt;
   readonly work: number;
 }
 
 export interface SearchLimits {
   readonly stop: () => boolean;
   readonly workLimit: number;
-  readonly onBetter: (plan: FoundPlan, lower: number) => void;
+  readonly onBetter: (plan: FoundPlan, soFar: SearchResult) => void;
 }
 
 /** Looks for the cheapest plan of the class until it is proved, or until the limits say stop. */
@@ -45,32 +45,27 @@ export function search(problem: Problem, limits: SearchLimits): SearchResult {
     if (patterns) state.offer(patterns, picked);
     if (context.spend(1)) break;
   }
-  const area = areaCut(problem);
-  state.raise(boundOf(problem, [area], state.below()));
-  if (state.done() || context.spend(0)) return state.result([area]);
-  const cuts = [area];
-  const learn = ({ value, worth }: Generation): void => {
-    cuts.push(mixCut(problem, value, worth));
-    state.raise(boundOf(problem, cuts, state.below()));
+  const learn = (...cuts: ProvenCut[]): boolean => {
+    state.learnt.cuts.push(...cuts);
+    state.raise(boundOf(problem, state.learnt.cuts, state.below()));
+    return state.done() || context.spend(0);
   };
+  if (learn()) return state.result();
   const rough = relax(context, areaValues(context), ROUGH);
-  learn(rough);
-  if (state.done() || !rough.finished) return state.result(cuts);
-  plunge(state, cuts, rough);
+  if (learn(provenCut(problem, rough))) return state.result();
+  plunge(state, rough);
   const first = relax(context, rough.value, MET);
-  learn(first);
-  if (state.done() || !first.finished) return state.result(cuts);
-  const mixes = createMixSearch(context, cuts, first.value);
-  improve(state, mixes, first.value);
-  return state.result(mixes.cuts);
+  if (!learn(provenCut(problem, first)))
+    improve(state, createMixSearch(context, state.learnt, first.value), first.value);
+  return state.result();
 }
 
 /** A first good plan, by diving from the relaxation with the options of the cheapest mix. */
-function plunge({ context, below, offer }: State, cuts: readonly MixCut[], first: Generation): void {
+function plunge({ context, learnt, below, offer }: State, first: Generation): void {
   const { problem } = context;
   const prices = problem.stock.map((s) => s.price);
   const counts = problem.stock.map((s) => s.count);
-  const answer = cheapestMix({ prices, counts, cuts, tooSmall: [] }, below(), MIX_NODES);
+  const answer = cheapestMix({ prices, counts, ...learnt }, below(), MIX_NODES);
   if (answer.kind !== 'mix') return;
   const { picked } = answer.mix;
   const demand = demandOf(problem, picked);
@@ -134,7 +129,8 @@ interface State {
   readonly done: () => boolean;
   readonly raise: (bound: number) => void;
   readonly offer: (patterns: readonly Pattern[], picked: readonly number[]) => void;
-  readonly result: (cuts: readonly MixCut[]) => SearchResult;
+  readonly learnt: Learnt;
+  readonly result: () => SearchResult;
 }
 
 function createState(problem: Problem, { stop, workLimit, onBetter }: SearchLimits): State {
@@ -155,7 +151,9 @@ function createState(problem: Problem, { stop, workLimit, onBetter }: SearchLimi
       return work >= workLimit || stop();
     },
   };
+  const learnt: Learnt = { cuts: [{ ...areaCut(problem), proof: null }], tooSmall: [] };
   const below = (): number => best?.cost ?? Infinity;
+  const result = (): SearchResult => ({ plan: best, lower, learnt, work });
   return {
     context,
     plan: () => best,
@@ -171,9 +169,10 @@ function createState(problem: Problem, { stop, workLimit, onBetter }: SearchLimi
       }
       if (cost >= below()) return;
       best = { patterns, picked, cost };
-      onBetter(best, lower);
+      onBetter(best, result());
     },
-    result: (cuts) => ({ plan: best, lower, cuts, work }),
+    learnt,
+    result,
   };
 }
 
@@ -181,7 +180,7 @@ function createState(problem: Problem, { stop, workLimit, onBetter }: SearchLimi
 const mostOf = (problem: Problem, i: number): number =>
   problem.choices.reduce((sum, c) => sum + Math.max(...c.options.map((o) => o.need[i]!)), problem.fixed.need[i]!);
 
-function boundOf(problem: Problem, cuts: readonly MixCut[], below: number): number {
+function boundOf(problem: Problem, cuts: readonly ProvenCut[], below: number): number {
   const prices = problem.stock.map((s) => s.price);
   const counts = problem.stock.map((s) => s.count);
   const answer = cheapestMix({ prices, counts, cuts, tooSmall: [] }, below, MIX_NODES);
