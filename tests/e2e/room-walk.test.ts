@@ -148,3 +148,32 @@ describe('a shop hand', () => {
     await page.context().close();
   });
 });
+
+describe('readings that contradict each other', () => {
+  it('are kept when they are given twice; the drawing stays, and the report names the corner', async () => {
+    const page = await phoneOf('installer');
+    await newRoom(page, 'Wash house on Anchor Row');
+    const hand = new Hand(page);
+    await hand.tap(page.getByTestId('shape-U'));
+    await hand.read(98);
+    await hand.pad('Mark to mark');
+    await hand.read(99);
+    await page.getByText(/Press Next once more to keep it as it is/).waitFor();
+    await hand.tap(page.getByRole('button', { name: /^Next:/ }));
+    for (const [title, reading] of [
+      ['Wall B', 148],
+      ['Mark to mark', 60],
+      ['Wall C', 86],
+    ] as const) {
+      await hand.pad(title);
+      await hand.read(reading);
+    }
+    await page.getByRole('heading', { name: 'These readings do not fit together' }).waitFor();
+    await report(page)
+      .getByText(/corner A-B/i)
+      .waitFor();
+    const plan = page.getByRole('group', { name: 'Plan of the room' });
+    await plan.getByRole('button', { name: 'Wall B, 148 inches' }).waitFor();
+    await page.context().close();
+  });
+});
