@@ -2,7 +2,7 @@ import type { DrawItem, Scene } from '@/geometry/scene/display-list';
 import { slabScene } from '@/geometry/scene/slab/slab-scene';
 import { contains } from '@/geometry/core/polygon';
 
-import { alderJob, shortJob, sharedMiterJob } from '../alder-job';
+import { shortJob, sharedMiterJob } from '../alder-job';
 
 const of = <K extends DrawItem['kind']>(scene: Scene, kind: K, layer: DrawItem['layer']) =>
   scene.items.filter((item): item is Extract<DrawItem, { kind: K }> => item.kind === kind && item.layer === layer);
