@@ -1,17 +1,13 @@
-import type { Option, Problem, Stock } from '../model/problem';
+import type { Option, Problem } from '../model/problem';
 import type { DepthRows } from '../row/depth-rows';
 import { makePattern } from '../search/make-pattern';
 import { makeColumn, relaxedColumn, type Column, type RealColumn } from '../search/column';
 import { bestSection } from './best-section';
 import { createDepthPricing, type DepthPricing } from './depth-pricing';
-import type { RowCandidate } from './search-rows';
+import type { PricedRow } from './priced-row';
 
 /** Rows kept for each slab when new columns are wanted. */
 const KEEP = 3;
-
-export interface PricedRow extends RowCandidate {
-  readonly stock: Stock;
-}
 
 export interface Priced {
   /** By stock entry: no pattern of the class is worth more. */

@@ -1,4 +1,4 @@
-import type { PricedRow } from '../pricing/pricing';
+import type { PricedRow } from '../pricing/priced-row';
 import { patternItems, type Pattern } from '../plan/pattern';
 
 /** A pattern as the linear program sees it. */
