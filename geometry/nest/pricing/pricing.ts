@@ -6,6 +6,8 @@ import { bestSection } from './best-section';
 import { createDepthPricing, type DepthPricing } from './depth-pricing';
 import type { PricedRow } from './priced-row';
 
+export type { PricedRow } from './priced-row';
+
 /** Rows kept for each slab when new columns are wanted. */
 const KEEP = 3;
 
