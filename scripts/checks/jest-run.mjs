@@ -20,7 +20,7 @@ export async function runJest(root, args) {
     const { code } = await run(
       process.execPath,
       [jest, '--maxWorkers=2', '--json', `--outputFile=${results}`, ...args],
-      { cwd: root, env: { ...process.env, NODE_ENV: 'test' }, show: 'errors' },
+      { cwd: root, env: { ...process.env, NODE_ENV: 'test' }, show: true },
     );
     return countResults(existsSync(results) ? readFileSync(results, 'utf8') : null, code);
   } finally {

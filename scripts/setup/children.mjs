@@ -24,20 +24,19 @@ let stoppedBy = null;
  *
  * @param {string} command
  * @param {readonly string[]} args
- * @param {{cwd?: string, env?: NodeJS.ProcessEnv, show?: 'all' | 'errors', onOutput?: (text: string) => void}} [options]
- *   `show` lets it write to the terminal, or only what it writes to standard error, where Jest reports; otherwise its
- *   output is collected, and passed to `onOutput` as it comes
+ * @param {{cwd?: string, env?: NodeJS.ProcessEnv, show?: boolean, onOutput?: (text: string) => void}} [options]
+ *   `show` lets it write to the terminal; otherwise its output is collected, and passed to `onOutput` as it comes
  * @returns {Promise<Ended>}
  * @throws {Interrupted} when the person stops us while it runs
  */
-export function run(command, args, { cwd, env = process.env, show, onOutput } = {}) {
+export function run(command, args, { cwd, env = process.env, show = false, onOutput } = {}) {
   if (stoppedBy) return Promise.reject(new Interrupted(stoppedBy));
   return new Promise((resolve, reject) => {
     const child = spawn(command, args, {
       cwd,
       env,
       detached: true,
-      stdio: show ? ['ignore', show === 'all' ? 'inherit' : 'ignore', 'inherit'] : ['ignore', 'pipe', 'pipe'],
+      stdio: show ? ['ignore', 'inherit', 'inherit'] : ['ignore', 'pipe', 'pipe'],
     });
     running.add(child);
     let output = '';

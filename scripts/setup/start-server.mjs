@@ -62,7 +62,7 @@ async function serve(root, environment) {
   checkStopped();
   if (webAppIsStale(root)) {
     // A wrong setting is better told now than after the minute that the build takes.
-    const check = await run(process.execPath, [...SERVER, '--check'], { cwd: root, env: environment, show: 'all' });
+    const check = await run(process.execPath, [...SERVER, '--check'], { cwd: root, env: environment, show: true });
     if (check.code !== 0) return check.code;
     await buildWebApp(root);
   }
