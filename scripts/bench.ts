@@ -6,12 +6,19 @@ import { parseArgs } from 'node:util';
 import type { BenchRow } from './bench/bench-row';
 import { rows as bytes } from './bench/bytes';
 import { rows as liveChain } from './bench/live-chain';
+import { rows as nest } from './bench/nest';
 import { rows as room } from './bench/room';
 import { rows as sheet } from './bench/sheet';
 import { benchTable } from './bench/table';
 
 /** What can be measured, in the order of the table. */
-const PARTS: Readonly<Record<string, () => Promise<BenchRow[]>>> = { 'live-chain': liveChain, room, sheet, bytes };
+const PARTS: Readonly<Record<string, () => Promise<BenchRow[]>>> = {
+  'live-chain': liveChain,
+  room,
+  nest,
+  sheet,
+  bytes,
+};
 
 const USE = `Use: npm run bench -- [--json FILE] [--only ${Object.keys(PARTS).join(',')}]`;
 

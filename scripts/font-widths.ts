@@ -9,11 +9,11 @@ import PDFDocument from 'pdfkit';
 const ROOT = path.join(__dirname, '..');
 
 const FONTS = {
-  labelSemibold: ['BarlowCondensed_600SemiBold', []],
-  labelBold: ['BarlowCondensed_700Bold', []],
-  labelExtrabold: ['BarlowCondensed_800ExtraBold', []],
-  bodyRegular: ['AtkinsonHyperlegibleNext_400Regular', ['tnum']],
-  bodyBold: ['AtkinsonHyperlegibleNext_700Bold', ['tnum']],
+  labelSemibold: ['BarlowCondensed-SemiBold', []],
+  labelBold: ['BarlowCondensed-Bold', []],
+  labelExtrabold: ['BarlowCondensed-ExtraBold', []],
+  bodyRegular: ['AtkinsonHyperlegibleNext-Regular', ['tnum']],
+  bodyBold: ['AtkinsonHyperlegibleNext-Bold', ['tnum']],
 } as const;
 
 const ascii = Array.from({ length: 95 }, (_, i) => String.fromCharCode(32 + i));

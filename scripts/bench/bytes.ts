@@ -34,7 +34,7 @@ export async function rows(): Promise<BenchRow[]> {
 }
 
 const signInStands = (page: Page) => page.getByLabel('Password').waitFor();
-const emptyStands = (page: Page) => page.waitForFunction(() => document.getElementById('root')!.childElementCount > 0);
+const emptyStands = (page: Page) => page.getByText('empty').waitFor();
 
 const row = (name: string, value: number, empty: number): BenchRow => ({
   name,

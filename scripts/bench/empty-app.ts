@@ -16,7 +16,8 @@ const FILES: Readonly<Record<string, string>> = {
       plugins: ['expo-router'],
     },
   }),
-  'app/index.tsx': 'export default function Empty() {\n  return null;\n}\n',
+  // One word, so that there is something to wait for.
+  'app/index.tsx': `import { Text } from 'react-native';\n\nexport default function Empty() {\n  return <Text>empty</Text>;\n}\n`,
 };
 
 /**
@@ -38,7 +39,15 @@ export async function withEmptyApp<T>(root: string, measure: (folder: string) =>
       [path.join(root, 'node_modules/expo/bin/cli'), 'export', '-p', 'web', '--output-dir', folder],
       {
         cwd: place,
-        env: { ...process.env, NODE_ENV: 'production', CI: '1', EXPO_NO_TELEMETRY: '1', EXPO_OFFLINE: '1' },
+        // A cache of its own: the bundler keeps the place of the routes in what it cached for this checkout.
+        env: {
+          ...process.env,
+          TMPDIR: place,
+          NODE_ENV: 'production',
+          CI: '1',
+          EXPO_NO_TELEMETRY: '1',
+          EXPO_OFFLINE: '1',
+        },
       },
     );
     if (code !== 0) throw new Error(`The empty app could not be exported:\n${output.trim().slice(-2000)}`);

@@ -137,11 +137,11 @@ function trace(doc: Doc, path: Path): void {
 }
 
 const FONTS: readonly (readonly [string, string])[] = [
-  ['labelSemibold', 'BarlowCondensed_600SemiBold'],
-  ['labelBold', 'BarlowCondensed_700Bold'],
-  ['labelExtrabold', 'BarlowCondensed_800ExtraBold'],
-  ['bodyRegular', 'AtkinsonHyperlegibleNext_400Regular'],
-  ['bodyBold', 'AtkinsonHyperlegibleNext_700Bold'],
+  ['labelSemibold', 'BarlowCondensed-SemiBold'],
+  ['labelBold', 'BarlowCondensed-Bold'],
+  ['labelExtrabold', 'BarlowCondensed-ExtraBold'],
+  ['bodyRegular', 'AtkinsonHyperlegibleNext-Regular'],
+  ['bodyBold', 'AtkinsonHyperlegibleNext-Bold'],
 ];
 
 function paintBare(pages: readonly Operator[][]): NodeJS.ReadableStream {

@@ -6,11 +6,11 @@ import type { FontName } from '@/geometry/scene/text-width';
 const FOLDER = path.join(__dirname, '../../assets/fonts');
 
 const FILES: Readonly<Record<FontName, string>> = {
-  labelSemibold: 'BarlowCondensed_600SemiBold.ttf',
-  labelBold: 'BarlowCondensed_700Bold.ttf',
-  labelExtrabold: 'BarlowCondensed_800ExtraBold.ttf',
-  bodyRegular: 'AtkinsonHyperlegibleNext_400Regular.ttf',
-  bodyBold: 'AtkinsonHyperlegibleNext_700Bold.ttf',
+  labelSemibold: 'BarlowCondensed-SemiBold.ttf',
+  labelBold: 'BarlowCondensed-Bold.ttf',
+  labelExtrabold: 'BarlowCondensed-ExtraBold.ttf',
+  bodyRegular: 'AtkinsonHyperlegibleNext-Regular.ttf',
+  bodyBold: 'AtkinsonHyperlegibleNext-Bold.ttf',
 };
 
 export const FONT_NAMES = Object.keys(FILES) as readonly FontName[];

@@ -6,11 +6,11 @@ import { fontOf, textWidth } from '@/geometry/scene/text-width';
 
 /** The fonts themselves, read by the font engine under pdfkit: nothing of this comes from the tables. */
 const FILES = {
-  labelSemibold: 'BarlowCondensed_600SemiBold',
-  labelBold: 'BarlowCondensed_700Bold',
-  labelExtrabold: 'BarlowCondensed_800ExtraBold',
-  bodyRegular: 'AtkinsonHyperlegibleNext_400Regular',
-  bodyBold: 'AtkinsonHyperlegibleNext_700Bold',
+  labelSemibold: 'BarlowCondensed-SemiBold',
+  labelBold: 'BarlowCondensed-Bold',
+  labelExtrabold: 'BarlowCondensed-ExtraBold',
+  bodyRegular: 'AtkinsonHyperlegibleNext-Regular',
+  bodyBold: 'AtkinsonHyperlegibleNext-Bold',
 } as const;
 
 const doc = new PDFDocument({ autoFirstPage: false });
