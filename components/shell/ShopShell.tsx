@@ -3,7 +3,7 @@ import { useEffect, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import { startSession } from '../api/client';
-import { useMay, useSession } from '../api/use-session';
+import { useSession } from '../api/use-session';
 import { AppShell } from '../ui/AppShell';
 import { Logo } from '../ui/Logo';
 import type { NavItem } from '../ui/nav-item';
@@ -15,7 +15,6 @@ export function ShopShell({ children }: { readonly children: ReactNode }) {
   const router = useRouter();
   const path = usePathname();
   const { status } = useSession();
-  const items = useSections(path);
 
   useEffect(() => {
     if (status === 'starting') void startSession();
@@ -26,24 +25,19 @@ export function ShopShell({ children }: { readonly children: ReactNode }) {
 
   if (status !== 'in') return <Opening />;
   return (
-    <AppShell sections={items} onNavigate={(href) => router.navigate(href as never)}>
+    <AppShell sections={sections(path)} onNavigate={(href) => router.navigate(href as never)}>
       {children}
     </AppShell>
   );
 }
 
-function useSections(path: string): NavItem[] {
-  const seesStock = useMay('stock.see');
-  const seesRack = useMay('rack.see');
-  const all: (NavItem & { readonly shown: boolean })[] = [
-    { key: 'jobs', label: 'Jobs', icon: 'jobs', href: '/jobs', shown: true },
-    { key: 'stock', label: 'Stock', icon: 'stock', href: '/stock', shown: seesStock },
-    { key: 'rack', label: 'Rack', icon: 'rack', href: '/rack', shown: seesRack },
-    { key: 'account', label: 'Account', icon: 'person', href: '/account', shown: true },
+/** Sections of the shop that have a page. */
+function sections(path: string): NavItem[] {
+  const all: NavItem[] = [
+    { key: 'jobs', label: 'Jobs', icon: 'jobs', href: '/jobs' },
+    { key: 'account', label: 'Account', icon: 'person', href: '/account' },
   ];
-  return all
-    .filter(({ shown }) => shown)
-    .map(({ shown: _shown, ...item }) => ({ ...item, current: path.startsWith(item.href) }));
+  return all.map((item) => ({ ...item, current: path.startsWith(item.href) }));
 }
 
 function Opening() {
