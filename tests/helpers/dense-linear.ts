@@ -1,6 +1,6 @@
 /** Plain dense linear algebra for test references, so that they share no matrix code with what they check. */
 
-/** Least-squares solution of rows * x = right by Householder reflections. */
+/** Least-squares solution of rows * x = right by Householder transformations. */
 export function householderSolve(rows: readonly (readonly number[])[], right: readonly number[]): number[] {
   const a = rows.map((row) => [...row]);
   const b = [...right];
