@@ -2,7 +2,9 @@ import type { ProfileStation } from './types';
 
 /** The stations in the order along the wall. */
 export function inOrder(profile: readonly ProfileStation[]): readonly ProfileStation[] {
-  return [...profile].sort((a, b) => a.at - b.at);
+  // Most profiles are written down in order, and this runs while a finger drags.
+  const ordered = profile.every((station, i) => i === 0 || station.at >= profile[i - 1]!.at);
+  return ordered ? profile : [...profile].sort((a, b) => a.at - b.at);
 }
 
 /**

@@ -5,7 +5,7 @@ import { STRAIGHT_WITHIN, type JointEnd, type RunLines } from './corner-joint';
 import { degrees, inches } from './sentence';
 import type { LayProblem } from './types';
 import { alongWall, footOn, interiorAngle, type RoomWalls, type WallFrame } from './wall-frame';
-import { highestBump } from './wall-profile';
+import { highestBump } from '../room/profile';
 
 export type EndSide = 'left' | 'right';
 

@@ -4,7 +4,7 @@ import type { RunLines } from './corner-joint';
 import { inches } from './sentence';
 import type { LayProblem } from './types';
 import { alongWall, type RoomWalls, type WallFrame } from './wall-frame';
-import { highestBump } from './wall-profile';
+import { highestBump } from '../room/profile';
 
 /** Slack of the tape before a run counts as longer than its wall, inches. */
 const WALL_SLACK = 1 / 16;

@@ -2,7 +2,7 @@ import type { Run } from '../core/layout';
 import { standoffOf } from './run-lines';
 import type { LaidRun } from './types';
 import type { WallFrame } from './wall-frame';
-import { inOrder, offsetAt } from './wall-profile';
+import { inOrder, offsetAt } from '../room/profile';
 
 /** One place behind a top, inches along the wall from its left end. */
 export interface ScribeStation {

@@ -1,6 +1,6 @@
 import type { LaidRun } from '../top/types';
 import type { WallFrame } from '../top/wall-frame';
-import { highestBump, inOrder, offsetAt } from '../top/wall-profile';
+import { highestBump, inOrder, offsetAt } from '../room/profile';
 
 /** Gap behind a run, inches, and where it is widest, inches along the wall. */
 export interface BackGaps {

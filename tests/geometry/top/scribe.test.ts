@@ -1,6 +1,6 @@
 import { layRuns } from '@/geometry/top/lay-runs';
 import { scribeRun } from '@/geometry/top/scribe';
-import { highestBump, offsetAt } from '@/geometry/top/wall-profile';
+import { highestBump, offsetAt } from '@/geometry/room/profile';
 import { layout, room, run } from '../../helpers/tops-builder';
 
 const profile = [
