@@ -1,4 +1,5 @@
 import type { Layout, RackPiece, StockSlab } from '../core/layout';
+import type { Polygon } from '../core/point';
 import type { NestInstance, NestPart, NestSlab } from '../nest/types';
 import { convexHull } from '../top/convex-hull';
 import type { Piece } from '../top/types';
@@ -34,7 +35,8 @@ export function nestInstanceOf(layout: Layout, pieces: readonly Piece[]): NestIn
     parts: parts.map((piece) => partOf(piece, stock.turn, mayTurnOver)),
     ...(stock.grainMatch && { groups: groupsOf(parts) }),
   };
-  return { id: fingerprint(JSON.stringify(body)), ...body };
+  const rounded = { ...body, parts: body.parts.map((part) => ({ ...part, outline: roundedRing(part.outline) })) };
+  return { id: fingerprint(JSON.stringify(rounded)), ...body };
 }
 
 function slabOf(slab: StockSlab | RackPiece, count: number | null, price: number): NestSlab {
@@ -69,6 +71,17 @@ function groupsOf(pieces: readonly Piece[]): { id: string; parts: string[] }[] {
     byRun.set(piece.on, [...(byRun.get(piece.on) ?? []), piece.letter]);
   }
   return [...byRun].filter(([, parts]) => parts.length > 1).map(([id, parts]) => ({ id, parts }));
+}
+
+/** Engines of browsers and servers differ in the last bits of a sine: far below any saw, inches. */
+const FINGERPRINT_STEP = 1e-5;
+
+/** The outline on a coarse grid, from its leftmost lowest corner on: the same text on every machine. */
+function roundedRing(outline: Polygon): readonly (readonly number[])[] {
+  const grid = outline.map((point) => point.map((value) => Math.round(value / FINGERPRINT_STEP)));
+  const before = (a: readonly number[], b: readonly number[]) => a[0]! - b[0]! || a[1]! - b[1]!;
+  const first = grid.reduce((least, point, i) => (before(point, grid[least]!) < 0 ? i : least), 0);
+  return [...grid.slice(first), ...grid.slice(0, first)];
 }
 
 /** 64-bit FNV-1a of a text, in hex: enough to tell two nests apart, not a defence against anybody. */

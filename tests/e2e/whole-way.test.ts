@@ -177,6 +177,20 @@ it('goes from tape readings to a cut sheet on a phone, and the sheet says what t
   for (const page of numbers) expect(page.length).toBeGreaterThan(10);
   expect(pdfText(plan.sheets[0]!).map(sawNumbers)).toEqual(numbers);
   expect(readFileSync(fromApp).subarray(0, 5).toString()).toBe('%PDF-');
+
+  // The server works the plan out again by itself before it freezes what this browser found.
+  await page.getByRole('button', { name: 'Freeze revision 1' }).tap();
+  await page.getByRole('button', { name: 'Sign off revision 1' }).tap();
+  await page.getByText('Revision 1, signed off by').first().waitFor();
+  const [signed] = await Promise.all([
+    page.waitForEvent('download'),
+    page.getByRole('button', { name: 'Download' }).tap(),
+  ]);
+  const final = path.join(folder, 'signed.pdf');
+  await signed.saveAs(final);
+  const signedPages = pdfText(final);
+  expect(signedPages.map(sawNumbers)).toEqual(numbers);
+  expect(signedPages.join('')).not.toContain('DRAFT');
 });
 
 const taped16 = (inches: number): number => Math.round(inches * 16) / 16;
