@@ -103,7 +103,8 @@ const styles = StyleSheet.create({
     zIndex: 300,
     pointerEvents: 'box-none',
   },
-  fixed: webStyle({ position: 'fixed', bottom: 'calc(96px + env(safe-area-inset-bottom, 0px))' }),
+  // Above the primary buttons at the foot of a phone and the steps under them.
+  fixed: webStyle({ position: 'fixed', bottom: 'calc(160px + env(safe-area-inset-bottom, 0px))' }),
   toast: {
     flexDirection: 'row',
     alignItems: 'center',
