@@ -5,7 +5,8 @@ import { problem as report } from './model/validate';
 import { assemble } from './plan/assemble';
 import { chosen, evidenceFor, priceTags } from './plan/certificate';
 import type { FoundPlan } from './search/mix-search';
-import { search, type SearchResult } from './search/search';
+import { search } from './search/search';
+import type { SearchResult } from './search/search-state';
 import type { NestError, NestInstance, NestOptions, NestPlan } from './types';
 
 /** Units of work when the caller sets no limit: some ten seconds on a small machine. */

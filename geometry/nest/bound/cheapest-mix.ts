@@ -26,6 +26,8 @@ export interface MixProgram {
   readonly cuts: readonly MixCut[];
   /** Mixes shown not to hold all parts: with the same options at least one slab more of some entry is needed. */
   readonly tooSmall: readonly Pick<Mix, 'slabs' | 'picked'>[];
+  /** Only mixes that cost at least this, cents; 0 when left out. */
+  readonly atLeast?: number;
 }
 
 export type MixAnswer =
@@ -34,7 +36,19 @@ export type MixAnswer =
   /** Out of work: no mix costs less than `bound`. */
   | { readonly kind: 'limit'; readonly bound: number };
 
+/** Share of a cut's need that counts as nothing. */
 const DONE = 1e-9;
+
+/** The same cut with amounts as shares of the most that can be needed: amounts in cents may be of any size. */
+function toShares({ worth, need, optionNeed }: MixCut): MixCut {
+  const most = need + optionNeed.reduce((sum, o) => sum + Math.max(...o), 0);
+  const scale = most > 0 ? 1 / most : 1;
+  return {
+    worth: worth.map((w) => w * scale),
+    need: need * scale,
+    optionNeed: optionNeed.map((o) => o.map((n) => n * scale)),
+  };
+}
 
 /**
  * The cheapest whole numbers of slabs (and option of each choice) that satisfy every cut, by branch and bound.
@@ -42,7 +56,8 @@ const DONE = 1e-9;
  * @param below - only mixes cheaper than this are looked for, cents
  */
 export function cheapestMix(program: MixProgram, below: number, nodeLimit: number): MixAnswer {
-  const { prices, counts, cuts, tooSmall } = program;
+  const { prices, counts, tooSmall, atLeast = 0 } = program;
+  const cuts = program.cuts.map(toShares);
   const choices = cuts[0]!.optionNeed;
   const step = commonStep(prices);
   const order = stockOrder(prices, cuts[0]!.worth);
@@ -74,6 +89,7 @@ export function cheapestMix(program: MixProgram, below: number, nodeLimit: numbe
       if (need[k]! > DONE && worth[s]! > 0) most = Math.max(most, Math.ceil(need[k]! / worth[s]! - 1e-12));
     });
     for (const m of tooSmall) most = Math.max(most, m.slabs[s]! + 1);
+    if (atLeast > 0 && prices[s]! > 0) most = Math.max(most, Math.ceil(atLeast / prices[s]!));
     return Math.min(most, counts[s]!);
   }
 
@@ -84,7 +100,7 @@ export function cheapestMix(program: MixProgram, below: number, nodeLimit: numbe
       open = Math.min(open, total);
       return;
     }
-    if (need.every((n) => n <= DONE) && !stillTooSmall()) {
+    if (spent >= atLeast && need.every((n) => n <= DONE) && !stillTooSmall()) {
       best = { cost: spent, slabs: [...slabs], picked: [...picked] };
       bestCost = spent;
       return;

@@ -37,13 +37,13 @@ export function fractionalCover(
 ): number {
   let rest = need;
   let cost = 0;
-  if (rest <= 1e-9) return 0;
+  if (rest <= 0) return 0;
   for (const { s, worth, depth: place } of cover.entries) {
     if (place < depth) continue;
-    const used = Math.min(counts[s]!, rest / worth);
-    cost += used * prices[s]!;
-    rest -= used * worth;
-    if (rest <= 1e-9) return cost;
+    // Said by the counts, not by what rounding leaves of `rest`.
+    if (rest <= counts[s]! * worth) return cost + (rest / worth) * prices[s]!;
+    cost += counts[s]! * prices[s]!;
+    rest -= counts[s]! * worth;
   }
   return Infinity;
 }

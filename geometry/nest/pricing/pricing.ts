@@ -30,7 +30,7 @@ export interface Pricing {
     above: readonly number[],
     most: number,
     nodes: number,
-  ): PricedRow[] | null;
+  ): Pick<Priced, 'rows' | 'penalties'> | null;
   /** The row, of the last pricing, beside its relaxed section: lanes may be used in fractions. */
   relaxed(row: PricedRow, value: readonly number[], demand: readonly number[]): Column | null;
   /** The row beside a section that exists. */
@@ -73,14 +73,16 @@ export function createPricing(problem: Problem, rowsAt: (depth: number) => Depth
     above: readonly number[],
     most: number,
     nodes: number,
-  ): PricedRow[] | null {
+  ): Pick<Priced, 'rows' | 'penalties'> | null {
     const found: PricedRow[] = [];
+    const penalties: (readonly number[])[] = [];
     for (const group of groups) {
       const lists = group.all({ value, demand, conflict }, above, most - found.length, nodes);
       if (!lists) return null;
       group.stock.forEach((stock, i) => lists[i]!.forEach((row) => found.push({ ...row, stock })));
+      penalties.push(...group.sections.penalties());
     }
-    return found;
+    return { rows: found, penalties };
   }
 
   /** Copies of shallow items that may lie beside a row. */

@@ -2,7 +2,7 @@ import { cheapestMix, type Mix } from '../bound/cheapest-mix';
 import { demandOf } from '../model/problem';
 import { FIT } from '../model/tolerance';
 import type { Pattern } from '../plan/pattern';
-import type { PricedRow } from '../pricing/pricing';
+import type { PricedRow } from '../pricing/priced-row';
 import { provenCut, type Proof, type ProvenCut, type SearchContext } from './context';
 import { coverExactly } from './cover-exactly';
 import { dive, realiseUsed } from './dive';
@@ -29,9 +29,10 @@ export type MixStep =
   | { readonly kind: 'found'; readonly plan: FoundPlan }
   /** A mix was shown too small, or put aside. */
   | { readonly kind: 'moved' }
-  /** No mix cheaper than asked for is left to look at. */
+  /** No such mix is left to look at. */
   | { readonly kind: 'done' }
-  | { readonly kind: 'out of work' };
+  /** There are too many mixes to go through, or work ran out. */
+  | { readonly kind: 'lost' };
 
 /** What the search has learnt so far; a mix search adds to it. */
 export interface Learnt {
@@ -40,8 +41,14 @@ export interface Learnt {
 }
 
 export interface MixSearch {
-  /** Looks at the cheapest mix of slabs that nothing speaks against. */
-  step(below: number, nodeLimit: number): MixStep;
+  /**
+   * Looks at the cheapest mix of slabs that nothing speaks against.
+   *
+   * @param below - cents; only cheaper mixes
+   * @param atLeast - cents; only mixes that cost as much
+   * @param effort - units of work after which a mix is put aside undecided
+   */
+  step(below: number, atLeast: number, effort: number): MixStep;
   /** No plan of the class costs less. */
   lower(): number;
   /** Mixes put aside. */
@@ -65,13 +72,11 @@ export function createMixSearch(
   const undecided: Mix[] = [];
   let next = 0;
 
-  function step(below: number, nodeLimit: number): MixStep {
-    const answer = cheapestMix({ prices, counts, cuts, tooSmall: [...tooSmall, ...undecided] }, below, MIX_NODES);
-    if (answer.kind === 'limit') {
-      next = answer.bound;
-      return { kind: 'out of work' };
-    }
-    next = answer.kind === 'mix' ? answer.mix.cost : below;
+  function step(below: number, atLeast: number, effort: number): MixStep {
+    const aside = [...tooSmall, ...undecided];
+    const answer = cheapestMix({ prices, counts, cuts, tooSmall: aside, atLeast }, below, MIX_NODES);
+    if (answer.kind === 'limit') return { kind: 'lost' };
+    if (atLeast === 0) next = answer.kind === 'mix' ? answer.mix.cost : below;
     if (answer.kind === 'none') return { kind: 'done' };
     const { mix } = answer;
     const relaxed = relaxMix(context, mix, firstValues);
@@ -79,15 +84,19 @@ export function createMixSearch(
       cuts.push(provenCut(problem, relaxed));
       return { kind: 'moved' };
     }
-    if (relaxed.holds === 'unknown') return { kind: 'out of work' };
-    const plan = pack(mix, relaxed, nodeLimit);
-    if (plan === 'none') tooSmall.push({ ...mix, proof: relaxed });
-    else if (plan === 'unknown') undecided.push(mix);
-    else return { kind: 'found', plan };
-    return context.spend(0) ? { kind: 'out of work' } : { kind: 'moved' };
+    if (relaxed.holds === 'unknown') return { kind: 'lost' };
+    const plan = pack(mix, relaxed, effort);
+    if (plan === 'unknown') undecided.push(mix);
+    else if (plan !== 'too small') return { kind: 'found', plan };
+    return { kind: 'moved' };
   }
 
-  function pack(mix: Mix, relaxed: MixRelaxation, nodeLimit: number): FoundPlan | 'none' | 'unknown' {
+  function pack(mix: Mix, relaxed: MixRelaxation, effort: number): FoundPlan | 'too small' | 'unknown' {
+    let used = 0;
+    const spend = (units: number): boolean => {
+      used += units;
+      return context.spend(units) || used > effort;
+    };
     const demand = demandOf(problem, mix.picked);
     const perfect = prices.map((price, s) => Math.max(price, relaxed.worth[s]!));
     const tolerance = 1e-6 * (mix.cost + 1);
@@ -99,8 +108,8 @@ export function createMixSearch(
       const patterns = dived.map((c) => c.pattern);
       return { patterns, picked: mix.picked, cost: patterns.reduce((sum, p) => sum + prices[p.stock]!, 0) };
     }
-    const rows = context.pricing.all(relaxed.value, demand, above, MOST_ROWS, 20 * nodeLimit);
-    if (!rows) return 'unknown';
+    const listed = context.pricing.all(relaxed.value, demand, above, MOST_ROWS, effort);
+    if (!listed) return 'unknown';
     const depths = new Set(problem.stock.filter((s) => mix.slabs[s.index]! > 0).map((s) => s.depth));
     const onlyInRows = problem.items
       .filter((item) => demand[item.index]! > 0 && [...depths].every((d) => item.depth >= d - FIT))
@@ -108,18 +117,21 @@ export function createMixSearch(
     let plan: FoundPlan | null = null;
     const cover = coverExactly(
       problem,
-      rows,
-      { demand, slabs: mix.slabs, perfect, slack, nodeLimit },
+      listed.rows,
+      { demand, slabs: mix.slabs, perfect, slack },
       onlyInRows,
       (chosen, left, slabs) => {
-        const patterns = finish(chosen, left, slabs);
+        const patterns = finish(chosen, left, slabs, spend);
         if (patterns === 'impossible' || patterns === 'unknown') return patterns;
         plan = { patterns, picked: mix.picked, cost: patterns.reduce((sum, p) => sum + prices[p.stock]!, 0) };
         return 'packed';
       },
+      spend,
     );
-    context.spend(cover.nodes);
-    return plan ?? (cover.kind === 'none' ? 'none' : 'unknown');
+    if (plan) return plan;
+    if (cover.kind !== 'none') return 'unknown';
+    tooSmall.push({ ...mix, proof: { ...relaxed, penalties: [...relaxed.penalties, ...listed.penalties] } });
+    return 'too small';
   }
 
   /** Sections for what does not lie in a row, beside the rows and on the slabs not yet used. */
@@ -127,6 +139,7 @@ export function createMixSearch(
     chosen: readonly PricedRow[],
     left: readonly number[],
     slabs: readonly number[],
+    spend: (units: number) => boolean,
   ): Pattern[] | 'impossible' | 'unknown' {
     const empty = problem.stock.flatMap((stock) =>
       new Array<PricedRow>(slabs[stock.index]!).fill({ stock, items: [], value: 0, room: stock.usable }),
@@ -139,7 +152,7 @@ export function createMixSearch(
           ? lengthLeft(row.stock, context.rowsAt(row.stock.depth), row.items, problem.kerf)
           : row.stock.usable,
     }));
-    const sections = packSections(problem, context.rowsAt, context.lanesAt, rooms, left, context.spend);
+    const sections = packSections(problem, context.rowsAt, context.lanesAt, rooms, left, spend);
     if (!sections) return 'unknown';
     const patterns: Pattern[] = [];
     for (const [r, row] of all.entries()) {

@@ -6,8 +6,8 @@ import { provenCut, type SearchContext } from './context';
 import { createMixSearch } from './mix-search';
 import { MET, relax } from './relax';
 
-/** Nodes spent on one mix of a few slabs, and mixes looked at before the group is left as it is. */
-const GROUP_NODES = 1500;
+/** Work spent on one mix of a few slabs, and mixes looked at before the group is left as it is. */
+const GROUP_EFFORT = 3000;
 const GROUP_STEPS = 8;
 
 /**
@@ -44,7 +44,7 @@ export function recut(
   const learnt = { cuts: [{ ...areaCut(problem), proof: null }, provenCut(problem, first)], tooSmall: [] };
   const search = createMixSearch(part, learnt, first.value);
   for (let n = 0; n < GROUP_STEPS; n++) {
-    const step = search.step(cost, GROUP_NODES);
+    const step = search.step(cost, 0, GROUP_EFFORT);
     if (step.kind === 'found') return [...step.plan.patterns];
     if (step.kind !== 'moved') return null;
   }
@@ -62,7 +62,7 @@ function groupProblem(problem: Problem, others: readonly Pattern[], own: readonl
   return { ...problem, fixed: { copies: [], need, picks: [] }, choices: [], stock };
 }
 
-/** Groups of slabs to cut again, in a fixed order that looks random: every slab leads in turn, with two to `most` others. */
+/** Groups of slabs to cut again, in a fixed order that looks random: every slab leads in turn, with one to `most` - 1 others. */
 export function* groupsOf(slabs: number, most: number): Generator<number[]> {
   let state = 12345;
   const draw = (n: number): number => {

@@ -128,7 +128,7 @@ function slabSearches(
   });
 }
 
-function worthOfSlabs(...args: Parameters<typeof slabSearches>): number[] | null {
+export function worthOfSlabs(...args: Parameters<typeof slabSearches>): number[] | null {
   const worths = slabSearches(...args).map(mostWorth);
   return worths.every((w) => w !== null) ? worths : null;
 }

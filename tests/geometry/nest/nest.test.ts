@@ -2,6 +2,7 @@ import { nest } from '@/geometry/nest/nest';
 import type { NestInstance, NestPlan } from '@/geometry/nest/types';
 import { mixedInstance, rectangle, uInstance } from '@/scripts/bench/nest-instances';
 import { createRandom } from '@/scripts/bench/random';
+import { checkBound } from '@/shared/nest-check/bound/check-bound';
 import { checkPlan } from '@/shared/nest-check/check-plan';
 
 function planOf(instance: NestInstance, workLimit?: number): NestPlan {
@@ -92,6 +93,14 @@ describe('nest', () => {
   it('gives the same plan of the same instance and limit', () => {
     const instance = mixedInstance(5, 10, 6, 2);
     expect(planOf(instance, 200_000)).toEqual(planOf(instance, 200_000));
+  });
+
+  it('says that there are not enough slabs, and checks bounds of short and plentiful stock', () => {
+    const short = bins(96, [60, 50, 40, 30]);
+    const one = { ...short, stock: [{ ...short.stock[0]!, count: 1 }] };
+    expect(nest(one)).toMatchObject({ error: { code: 'not_enough_stock' } });
+    for (const instance of [short, uInstance(2), mixedInstance(1, 8, 0, 0)])
+      expect(checkBound(instance, planOf(instance))).toEqual([]);
   });
 
   it('says which part fits no slab', () => {
