@@ -99,8 +99,10 @@ describe('nest', () => {
     const short = bins(96, [60, 50, 40, 30]);
     const one = { ...short, stock: [{ ...short.stock[0]!, count: 1 }] };
     expect(nest(one)).toMatchObject({ error: { code: 'not_enough_stock' } });
-    for (const instance of [short, uInstance(2), mixedInstance(1, 8, 0, 0)])
-      expect(checkBound(instance, planOf(instance))).toEqual([]);
+    for (const instance of [short, uInstance(2), mixedInstance(1, 8, 0, 0)]) {
+      const plan = nest(instance, { evidence: true });
+      expect('error' in plan ? plan.error : checkBound(instance, plan)).toEqual([]);
+    }
   });
 
   it('says which part fits no slab', () => {
