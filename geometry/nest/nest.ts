@@ -1,6 +1,6 @@
 import { cheapestMix } from './bound/cheapest-mix';
 import { normalise } from './model/normalise';
-import type { Problem } from './model/problem';
+import type { Copy, Problem } from './model/problem';
 import { problem as report } from './model/validate';
 import { assemble } from './plan/assemble';
 import { chosen, evidenceFor, priceTags } from './plan/certificate';
@@ -39,9 +39,9 @@ export function nest(instance: NestInstance, options: NestOptions = {}): NestPla
 function finished(problem: Problem, plan: FoundPlan, result: SearchResult, withEvidence: boolean): NestPlan {
   const { patterns, picked, cost } = plan;
   const { lower, learnt, work } = result;
-  const values = learnt.cuts.findLast((cut) => cut.proof)?.proof?.value;
   const copies = [problem.fixed, ...picked.map((o, c) => problem.choices[c]!.options[o]!)].flatMap((o) => o.copies);
-  const tags = values ? priceTags(problem, values, copies) : [];
+  const duals = learnt.cuts.findLast((cut) => cut.proof)?.proof?.value;
+  const tags = priceTags(problem, duals ?? areaShares(problem, copies, cost), copies);
   const byArea = areaSuffices(problem, result);
   const evidence = withEvidence ? { evidence: evidenceFor(problem, lower, learnt) } : {};
   return {
@@ -57,6 +57,12 @@ function finished(problem: Problem, plan: FoundPlan, result: SearchResult, withE
     priceTags: tags,
     work,
   };
+}
+
+/** Where nothing finer is known, each part costs its share of the area cut. */
+function areaShares({ items }: Problem, copies: readonly Copy[], cost: number): number[] {
+  const total = copies.reduce((sum, { item }) => sum + items[item]!.area, 0);
+  return items.map((item) => (cost * item.area) / (total || 1));
 }
 
 /** The areas of parts and slabs alone prove the bound: it then holds for every plan, not only for those of the class. */

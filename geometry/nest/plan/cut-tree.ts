@@ -1,8 +1,9 @@
 import { movedEnds } from '../row/row-gaps';
-import type { Item, Member, Problem } from '../model/problem';
+import type { Item, Member, Problem, Stock } from '../model/problem';
 import { SAME_SIZE } from '../model/tolerance';
 import { isFullDepth } from '../row/item-shapes';
-import { rowPositions, type Stretch } from '../row/row-positions';
+import { roomyGap } from '../row/kerf';
+import { rowPositions, type Band, type Stretch } from '../row/row-positions';
 import { isSection, type Lane, type Pattern, type Slot } from './pattern';
 
 /** A line across a row: x at the row's mid-depth and slope dx/dy. */
@@ -55,10 +56,20 @@ export function cutTree(problem: Problem, pattern: Pattern): RowNode | null {
   });
   const stretches = pattern.slots.map((slot) => stretchOf(problem, slot, stock.depth));
   const band = { from: stock.trim, to: stock.slab.length - stock.trim, depth: stock.depth };
-  const starts = rowPositions(stretches, band, problem.kerf, stock.slab.defects);
+  const starts = startsOf(problem, stock, stretches, band);
   if (!starts) return null;
   const edges = { from: 0, to: stock.slab.length, y: 0, depth: stock.depth };
   return build.row(edges, pattern.slots, stretches, starts);
+}
+
+/** As tight as can be where an offcut worth keeping is left; with room for fewer cuts where none is. */
+function startsOf(problem: Problem, { slab }: Stock, stretches: readonly Stretch[], band: Band): number[] | null {
+  const tight = rowPositions(stretches, band, problem.kerf, slab.defects);
+  if (!tight || slab.defects?.length) return tight;
+  const last = stretches[stretches.length - 1]!;
+  const end = tight[tight.length - 1]! + last.mid + Math.abs(last.right) * (band.depth / 2);
+  if (band.to - end - problem.kerf >= problem.instance.reuseMin) return tight;
+  return rowPositions(stretches, band, problem.kerf, [], roomyGap) ?? tight;
 }
 
 /** How long a slot is in a row of this depth, and its ends. */

@@ -21,3 +21,12 @@ export function flattestBetween(a: number, b: number): number {
   if (a <= 0 && b <= 0) return Math.max(a, b);
   return 0;
 }
+
+/**
+ * The same distance when the cut between the two shall also make one of the ends: two cuts then free both parts, where a
+ * square cut between ends that lean to different sides needs two more.
+ */
+export function roomyGap(right: number, left: number, halfDepth: number, kerf: number): number {
+  const flatter = Math.min(Math.abs(right), Math.abs(left));
+  return Math.abs(left - right) * halfDepth + kerfAlong(kerf, flatter);
+}

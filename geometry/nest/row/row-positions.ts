@@ -19,6 +19,7 @@ export interface Band {
 /**
  * x at mid-depth of each stretch's start when all lie as far left as order, kerf and defects allow.
  *
+ * @param gap - `endGap` for the shortest row, `roomyGap` for one with fewer cuts
  * @returns null when the last one does not end within the band
  */
 export function rowPositions(
@@ -26,13 +27,14 @@ export function rowPositions(
   band: Band,
   kerf: number,
   defects: readonly NestDefect[] = [],
+  gap: typeof endGap = endGap,
 ): number[] | null {
   const half = band.depth / 2;
   const starts: number[] = [];
   let end: number | null = null;
   let slope = 0;
   for (const s of stretches) {
-    const least: number = end === null ? band.from + Math.abs(s.left) * half : end + endGap(slope, s.left, half, kerf);
+    const least: number = end === null ? band.from + Math.abs(s.left) * half : end + gap(slope, s.left, half, kerf);
     const start = passDefects(least, s, half, defects);
     starts.push(start);
     end = start + s.mid;

@@ -36,6 +36,8 @@ export interface SearchState {
   readonly spent: () => number;
   readonly raise: (bound: number) => void;
   readonly offer: (patterns: readonly Pattern[], picked: readonly number[]) => void;
+  /** Puts other patterns for the same parts at no higher cost in the best plan's place. */
+  readonly replace: (patterns: readonly Pattern[]) => void;
   readonly learnt: Learnt;
   readonly result: () => SearchResult;
 }
@@ -84,6 +86,9 @@ export function createState(problem: Problem, { stop, workLimit, onBetter }: Sea
       if (cost >= below()) return;
       best = { patterns, picked, cost };
       onBetter(best, result());
+    },
+    replace(patterns) {
+      if (best) best = { ...best, patterns };
     },
     learnt,
     result,

@@ -5,6 +5,7 @@ import { dive, realiseUsed } from './dive';
 import type { Generation } from './generate-columns';
 import { greedy } from './greedy';
 import { improve } from './improve';
+import { lengthenOffcut } from './longest-offcut';
 import { areaValues, MET, relax } from './relax';
 import {
   boundOf,
@@ -17,6 +18,9 @@ import {
 
 /** Bound and objective this share apart are near enough for a first dive. */
 const ROUGH = 0.02;
+
+/** Work that looking for a longer offcut may always take. */
+const LEAST_POLISH = 20_000;
 
 /** Looks for the cheapest plan of the class until it is proved, or until the limits say stop. */
 export function search(problem: Problem, limits: SearchLimits): SearchResult {
@@ -32,13 +36,25 @@ export function search(problem: Problem, limits: SearchLimits): SearchResult {
     state.raise(boundOf(problem, state.learnt.cuts, state.below()));
     return state.done() || context.spend(0);
   };
-  if (learn()) return state.result();
-  const rough = relax(context, areaValues(context), ROUGH);
-  if (learn(provenCut(problem, rough))) return state.result();
-  plunge(state, rough);
-  const first = relax(context, rough.value, MET);
-  if (!learn(provenCut(problem, first))) improve(state, first.value);
+  if (!learn()) {
+    const rough = relax(context, areaValues(context), ROUGH);
+    if (!learn(provenCut(problem, rough))) {
+      plunge(state, rough);
+      const first = relax(context, rough.value, MET);
+      if (!learn(provenCut(problem, first))) improve(state, first.value);
+    }
+  }
+  polish(state);
   return state.result();
+}
+
+/** The longest offcut at the price found, with no more work than the price took. */
+function polish(state: SearchState): void {
+  const plan = state.plan();
+  const end = 2 * state.spent() + LEAST_POLISH;
+  const spend = (units: number): boolean => state.context.spend(units) || state.spent() > end;
+  const longer = plan && !spend(0) && lengthenOffcut({ ...state.context, spend }, plan.patterns);
+  if (longer) state.replace(longer);
 }
 
 /** A first good plan, by diving from the relaxation with the options of the cheapest mix. */

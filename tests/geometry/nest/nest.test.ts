@@ -1,148 +1,220 @@
 import { nest } from '@/geometry/nest/nest';
-import type { NestInstance, NestPlan } from '@/geometry/nest/types';
-import { mixedInstance, rectangle, uInstance } from '@/scripts/bench/nest-instances';
-import { createRandom } from '@/scripts/bench/random';
+import { mixedInstance } from '@/scripts/bench/nest-instances';
 import { checkBound } from '@/shared/nest-check/bound/check-bound';
 import { checkPlan } from '@/shared/nest-check/check-plan';
+import { instance, planOf, rectangle, run, slab, trapezoid } from '@/tests/helpers/nest-builder';
 
-function planOf(instance: NestInstance, workLimit?: number): NestPlan {
-  const plan = nest(instance, workLimit === undefined ? {} : { workLimit });
-  if ('error' in plan) throw new Error(plan.error.message);
-  return plan;
-}
+const long = (id: string, length: number, price: number) => slab({ id, length, price });
 
-/** One slab length, square runs of full depth, no kerf and no trim: bin packing in one dimension. */
-function bins(capacity: number, lengths: readonly number[]): NestInstance {
-  return {
-    id: `bins-${capacity}-${lengths.join('-')}`,
-    kerf: 0,
-    trim: 0,
-    reuseMin: 18,
-    stock: [{ id: 'bin', length: capacity, depth: 25, price: 100, count: null }],
-    parts: lengths.map((length, i) => ({ id: `p${i}`, outline: rectangle(length, 25) })),
-  };
-}
-
-/** Fewest bins by trying every way: each length into every open bin or a new one. */
-function fewestBins(capacity: number, lengths: readonly number[]): number {
-  let best = lengths.length;
-  const put = (i: number, rooms: number[]): void => {
-    if (rooms.length >= best) return;
-    if (i === lengths.length) {
-      best = rooms.length;
-      return;
-    }
-    for (let bin = 0; bin < rooms.length; bin++) {
-      if (rooms[bin]! < lengths[i]!) continue;
-      rooms[bin]! -= lengths[i]!;
-      put(i + 1, rooms);
-      rooms[bin]! += lengths[i]!;
-    }
-    rooms.push(capacity - lengths[i]!);
-    put(i + 1, rooms);
-    rooms.pop();
-  };
-  put(0, []);
-  return best;
-}
-
-describe('nest', () => {
-  it('packs Falkenauer triplets, made afresh by his rule, into n / 3 bins and proves it', () => {
-    // E. Falkenauer, 1996: triplets that fill a bin of 1000 exactly (ranges from memory); thirds of n are optimal.
-    for (const seed of [1, 2, 3]) {
-      const random = createRandom(seed);
-      const lengths = Array.from({ length: 5 }, () => {
-        const a = random.whole(380, 490);
-        const b = random.whole(Math.ceil((1000 - a) / 2), 1000 - a - 250);
-        return [a, b, 1000 - a - b];
-      }).flat();
-      const plan = planOf(bins(1000, lengths));
-      expect(plan.slabs).toHaveLength(5);
-      expect(plan).toMatchObject({ proved: true, lowerBound: 500 });
-    }
+describe('nest: rows and kerfs', () => {
+  it('lays 47 1/2 and 47 3/8 in on one 96 in slab: 1/2 + 47 1/2 + 1/8 + 47 3/8 + 1/2 is 96 exactly', () => {
+    const plan = planOf(instance({ parts: [run('A', 47.5), run('B', 47.375)] }));
+    expect(plan.slabs).toHaveLength(1);
+    expect(plan.proved).toBe(true);
   });
 
-  it('never says proved of more slabs than an exhaustive search needs (120 tiny cases)', () => {
-    const random = createRandom(7);
-    let proved = 0;
-    for (let n = 0; n < 120; n++) {
-      const lengths = Array.from({ length: random.whole(2, 7) }, () => random.whole(20, 95));
-      const plan = planOf(bins(120, lengths));
-      const fewest = fewestBins(120, lengths);
-      expect(plan.lowerBound).toBeLessThanOrEqual(fewest * 100);
-      expect(plan.cost).toBeGreaterThanOrEqual(fewest * 100);
-      if (!plan.proved) continue;
-      proved++;
-      expect(plan.slabs).toHaveLength(fewest);
-    }
-    expect(proved).toBeGreaterThan(100);
+  it('needs two slabs when one of them is 1/64 in longer', () => {
+    const plan = planOf(instance({ parts: [run('A', 47.5), run('B', 47.375 + 1 / 64)] }));
+    expect([plan.slabs.length, plan.proved]).toEqual([2, true]);
   });
 
-  it.each([
-    ['a U of three', [1, 2, 3, 4, 5, 6].map(uInstance)],
-    ['eight runs', [1, 2, 3].map((seed) => mixedInstance(seed, 8, 0, 0))],
-    ['runs, strips and offcuts with defects', [1, 2, 3].map((seed) => mixedInstance(seed, 6, 5, 4))],
-  ])('gives plans of %s that the independent checker holds true, with the bound worked out again', (_what, all) => {
-    for (const instance of all) {
-      const plan = planOf(instance);
-      expect(checkPlan(instance, plan)).toEqual([]);
-      expect(plan.proved).toBe(plan.cost === plan.lowerBound);
-    }
+  it('makes both ends of a 45 degree pair with one cut when one part may be turned over', () => {
+    const parts = [
+      { id: 'P', outline: trapezoid(40, 0, 1) },
+      { id: 'Q', outline: trapezoid(40, -1, 0) },
+    ];
+    const plan = planOf(instance({ parts, stock: [long('S96', 96, 100), long('S120', 120, 130)] }));
+    expect(plan.slabs.map((s) => s.stock)).toEqual(['S96']);
+    const shared = plan.slabs[0]!.cuts.filter((c) => c.shared);
+    // Square to a cut at 45 degrees the kerf is 1/8, along the slab 1/8 x sqrt 2.
+    expect(shared).toHaveLength(1);
+    expect(Math.abs(shared[0]!.angle - 90)).toBeCloseTo(45, 9);
+    expect(shared[0]!.kind === 'crosscut' && shared[0]!.frontFar - shared[0]!.front).toBeCloseTo(0.125 * Math.SQRT2, 9);
   });
 
-  it('gives the same plan of the same instance and limit', () => {
-    const instance = mixedInstance(5, 10, 6, 2);
-    expect(planOf(instance, 200_000)).toEqual(planOf(instance, 200_000));
-  });
-
-  it('says that there are not enough slabs, and checks bounds of short and plentiful stock', () => {
-    const short = bins(96, [60, 50, 40, 30]);
-    const one = { ...short, stock: [{ ...short.stock[0]!, count: 1 }] };
-    expect(nest(one)).toMatchObject({ error: { code: 'not_enough_stock' } });
-    for (const instance of [short, uInstance(2), mixedInstance(1, 8, 0, 0)]) {
-      const plan = nest(instance, { evidence: true });
-      expect('error' in plan ? plan.error : checkBound(instance, plan)).toEqual([]);
-    }
-  });
-
-  it('says which part fits no slab', () => {
-    const result = nest(bins(96, [40, 130]));
-    expect(result).toMatchObject({ error: { code: 'part_fits_no_slab' } });
-    if ('error' in result) expect(result.error.message).toMatch(/p1/);
+  it('loses the square of the depth at that corner when turning over is forbidden', () => {
+    const parts = [
+      { id: 'P', outline: trapezoid(40, 0, 1), turnOver: false },
+      { id: 'Q', outline: trapezoid(40, -1, 0), turnOver: false },
+    ];
+    const given = instance({ parts, stock: [long('S96', 96, 100), long('S107', 107, 130)] });
+    // Mid-lengths 80, half a depth at each end that leans: 80 + 25 + 1/8, and the trims, is 106 1/8.
+    expect(planOf(given).slabs.map((s) => s.stock)).toEqual(['S107']);
   });
 });
 
-describe('the independent checker', () => {
-  const instance = uInstance(3);
-  const plan = planOf(instance);
-  const first = plan.slabs[0]!;
-  const withFirst = (change: Partial<(typeof plan.slabs)[number]>): NestPlan => ({
-    ...plan,
-    slabs: [{ ...first, ...change }, ...plan.slabs.slice(1)],
+describe('nest: stock', () => {
+  it('takes the rack piece that costs nothing before it buys a slab', () => {
+    const rack = slab({ id: 'R', length: 41, price: 0, count: 1, trim: 0 });
+    const plan = planOf(instance({ parts: [run('A', 40)], stock: [slab(), rack] }));
+    expect([plan.slabs[0]!.stock, plan.cost, plan.proved]).toEqual(['R', 0, true]);
   });
-  const moved = (by: { x?: number; y?: number }) =>
-    withFirst({
-      parts: first.parts.map((part, i) =>
-        i === 0 ? { ...part, x: part.x + (by.x ?? 0), y: part.y + (by.y ?? 0) } : part,
-      ),
+
+  it('keeps a part clear of a defect: 38 in of a 41 in piece with 3 in of crack, not 38 1/8', () => {
+    const rack = slab({ id: 'R', length: 41, price: 0, count: 1, trim: 0, defects: [{ x: 0, y: 0, w: 3, h: 25 }] });
+    const stock = [slab(), rack];
+    expect(planOf(instance({ parts: [run('A', 38)], stock })).slabs[0]!.stock).toBe('R');
+    expect(planOf(instance({ parts: [run('A', 38.125)], stock })).slabs[0]!.stock).toBe('S96');
+  });
+
+  it('lets a slanted end lie beside a defect in one corner', () => {
+    const knot = { x: 0, y: 20, w: 5, h: 5 };
+    const rack = slab({ id: 'R', length: 62, price: 0, count: 1, trim: 0, defects: [knot] });
+    // Its left end leans from 25 in at the front to 0 at the back, or the other way round once turned over.
+    const given = instance({ parts: [{ id: 'A', outline: trapezoid(49, 1, 0) }], stock: [slab(), rack] });
+    const plan = planOf(given);
+    expect(plan.slabs[0]!.stock).toBe('R');
+    expect(checkPlan(given, plan)).toEqual([]);
+  });
+
+  it('cuts a 39 in deep island from the deeper slab and the runs from the usual one', () => {
+    const stock = [slab(), slab({ id: 'deep', depth: 40, price: 70_000 })];
+    const parts = [run('A', 90), { id: 'I', outline: rectangle(72, 39) }];
+    const given = instance({ parts, stock });
+    const plan = planOf(given);
+    expect(plan.slabs.map((s) => s.stock).sort()).toEqual(['S96', 'deep']);
+    expect(checkPlan(given, plan)).toEqual([]);
+  });
+
+  it('rips six 4 in strips side by side from one 25 in slab: 6 x 4 + 5 x 1/8 is 24 5/8', () => {
+    const strips = { id: 's', count: 6, outline: rectangle(90, 4) };
+    const plan = planOf(instance({ parts: [strips] }));
+    expect([plan.slabs.length, plan.proved]).toEqual([1, true]);
+    expect(plan.slabs[0]!.cuts.filter((c) => c.kind === 'rip')).toHaveLength(6);
+    expect(planOf(instance({ parts: [{ ...strips, count: 7 }] })).slabs).toHaveLength(2);
+  });
+
+  it('needs fewer slabs for two jobs together than for each alone', () => {
+    const one = [run('A', 60), run('B', 60)];
+    const other = [run('C', 34), run('D', 34)];
+    const alone = [one, other].map((parts) => planOf(instance({ parts })).slabs.length);
+    expect(alone).toEqual([2, 1]);
+    expect(planOf(instance({ parts: [...one, ...other] })).slabs).toHaveLength(2);
+  });
+});
+
+describe('nest: groups and choices', () => {
+  const three = [run('A', 20), run('B', 30), run('C', 25)];
+
+  it('lays a group next to each other in its order, none turned over', () => {
+    const given = instance({ parts: [...three, run('D', 15)], groups: [{ id: 'g', parts: ['C', 'A', 'B'] }] });
+    const plan = planOf(given);
+    expect(checkPlan(given, plan)).toEqual([]);
+    const order = [...plan.slabs[0]!.parts]
+      .sort((a, b) => a.x - b.x)
+      .map((p) => p.id)
+      .join('');
+    expect(order).toMatch(/CAB|BAC/);
+  });
+
+  it('keeps two mirror-image ends apart in a group that without it would share a cut', () => {
+    const parts = [
+      { id: 'P', outline: trapezoid(40, 0, 1) },
+      { id: 'Q', outline: trapezoid(40, -1, 0) },
+    ];
+    const stock = [long('S96', 96, 100), long('S107', 107, 130)];
+    const plan = planOf(instance({ parts, stock, groups: [{ id: 'g', parts: ['P', 'Q'] }] }));
+    expect(plan.slabs.map((s) => s.stock)).toEqual(['S107']);
+  });
+
+  it('cuts the option that needs the cheaper slabs, and only that', () => {
+    const parts = [run('A', 80), run('B', 46), run('C', 34), run('D', 48), run('E', 60)];
+    const choices = [{ id: 'seam', options: [['A'], ['B', 'C']] }];
+    const plan = planOf(instance({ parts, choices }));
+    // 46 + 48 and 34 + 60 fill two slabs; with the 80 in part it takes three.
+    expect(plan.slabs.flatMap((s) => s.parts.map((p) => p.id)).sort()).toEqual(['B', 'C', 'D', 'E']);
+    expect([plan.slabs.length, plan.choices, plan.proved]).toEqual([2, [{ id: 'seam', option: 1 }], true]);
+  });
+
+  it('ties a group to those of its parts that are cut', () => {
+    const choices = [{ id: 'seam', options: [['A'], ['B']] }];
+    const groups = [{ id: 'g', parts: ['A', 'B', 'C'] }];
+    const given = instance({ parts: three, choices, groups });
+    const plan = planOf(given);
+    expect([...checkPlan(given, plan), ...checkBound(given, plan)]).toEqual([]);
+    expect(plan.slabs.flatMap((s) => s.parts)).toHaveLength(2);
+  });
+});
+
+describe('nest: what is left over', () => {
+  it('leaves one offcut of 38 3/8 in rather than two short ones', () => {
+    const parts = [run('A', 56.5), run('B', 50), run('C', 44)];
+    const given = instance({ parts });
+    const plan = planOf(given);
+    const kept = plan.slabs.flatMap((s) => s.offcuts.filter((o) => o.keep)).map((o) => o.length);
+    // B and C fill one slab; A leaves 96 - 1 - 56 1/2 - 1/8.
+    expect(kept).toEqual([expect.closeTo(38.375, 9)]);
+  });
+
+  it('parts two ends that lean to different sides by two cuts where there is room, and not by three', () => {
+    const parts = [
+      { id: 'P', outline: trapezoid(30, 0, 0.3), turn: false, turnOver: false },
+      { id: 'Q', outline: trapezoid(30, -0.4, 0), turn: false, turnOver: false },
+    ];
+    const [only] = planOf(instance({ parts, stock: [slab({ length: 80 })] })).slabs;
+    expect(only!.cuts.filter((c) => c.kind === 'crosscut' && Math.abs(c.angle - 90) > 0.1)).toHaveLength(2);
+    expect(only!.cuts).toHaveLength(4);
+  });
+});
+
+describe('nest: the search', () => {
+  it('gives the same plan for the same instance and work limit', () => {
+    for (const limit of [3_000, 60_000]) {
+      const [a, b] = [1, 2].map(() => JSON.stringify(nest(mixedInstance(3, 10, 10, 2), { workLimit: limit })));
+      expect(a).toBe(b);
+    }
+  });
+
+  it('gives a valid plan at once when told to stop before it begins', () => {
+    const given = mixedInstance(4, 20, 40, 0);
+    const plan = nest(given, { stop: () => true });
+    expect('error' in plan ? plan.error : checkPlan(given, plan)).toEqual([]);
+  });
+
+  it('tells of ever cheaper plans, each of them valid', () => {
+    const given = mixedInstance(1, 12, 4, 0);
+    const costs: number[] = [];
+    planOf(given);
+    nest(given, {
+      workLimit: 100_000,
+      onBetter: (plan, lower) => {
+        costs.push(plan.cost);
+        expect(checkPlan(given, plan)).toEqual([]);
+        expect(lower).toBeLessThanOrEqual(plan.cost);
+      },
     });
-
-  it('finds nothing wrong with a true plan', () => {
-    expect(checkPlan(instance, plan)).toEqual([]);
+    expect(costs.length).toBeGreaterThan(1);
+    expect(costs).toEqual([...costs].sort((a, b) => b - a));
   });
 
-  it.each([
-    ['a part moved into the trim', () => moved({ x: -0.3 })],
-    ['a part that sticks out at the back', () => moved({ y: 1 })],
-    ['a part that is missing', () => withFirst({ parts: first.parts.slice(1) })],
-    ['a part that is laid twice', () => withFirst({ parts: [...first.parts, first.parts[0]!] })],
-    ['a part nobody asked for', () => withFirst({ parts: [{ ...first.parts[0]!, id: 'X' }, ...first.parts.slice(1)] })],
-    ['a slab nobody sells', () => withFirst({ stock: 'no such slab' })],
-    ['a plan without its saw cuts', () => withFirst({ cuts: [] })],
-    ['a cost that does not add up', () => ({ ...plan, cost: plan.cost - 100 })],
-    ['a bound above what its evidence gives', () => ({ ...plan, lowerBound: plan.lowerBound + 10_000 })],
-    ['a proof where cost and bound differ', () => ({ ...plan, lowerBound: plan.lowerBound - 100, proved: true })],
-  ])('refuses %s', (_what, broken) => {
-    expect(checkPlan(instance, broken()).length).toBeGreaterThan(0);
+  it('proves 20 runs, and the proof stands when it is worked out again', () => {
+    for (const seed of [11, 12]) {
+      const given = mixedInstance(seed, 20, 0, 0);
+      const plan = planOf(given);
+      expect([seed, plan.proved]).toEqual([seed, true]);
+      expect([...checkPlan(given, plan), ...checkBound(given, plan)]).toEqual([]);
+    }
+  });
+
+  it('proves runs with strips and offcuts, and the proof stands', () => {
+    for (const seed of [21, 22]) {
+      const given = mixedInstance(seed, 10, 6, 4);
+      const plan = planOf(given);
+      expect([seed, plan.proved]).toEqual([seed, true]);
+      expect([...checkPlan(given, plan), ...checkBound(given, plan)]).toEqual([]);
+    }
+  });
+
+  it('prices a part at what it costs in slabs: two to a slab are half a slab each', () => {
+    const plan = planOf(instance({ parts: [{ ...run('A', 46), count: 4 }] }));
+    expect(plan.priceTags).toEqual([{ id: 'A', cents: expect.closeTo(18_950, 3) }]);
+  });
+
+  it('proves nothing beyond areas about a part that is no trapezoid', () => {
+    const clipped = { id: 'I', outline: [[0, 0], [40, 0], [40, 25], [8, 25], [0, 17]] as const }; // prettier-ignore
+    const given = instance({ parts: [clipped, run('A', 60)] });
+    const plan = planOf(given);
+    expect([plan.provedScope, plan.certificate.kind]).toEqual(['any', 'area']);
+    expect(checkPlan(given, plan)).toEqual([]);
   });
 });
