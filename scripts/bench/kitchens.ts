@@ -1,6 +1,6 @@
 import type { Layout } from '@/geometry/core/layout';
 import { parseJobFile } from '@/shared/layout/parse-job-file';
-import { createRandom, type Random } from './random';
+import { createDraw, type Draw } from './draw';
 
 /**
  * Kitchens for the bench, made from a seed by these rules alone.
@@ -37,7 +37,7 @@ const ONE_PIECE = 142;
 
 /** The job file of a kitchen of this size. */
 export function kitchenFile(seed: number, { pieces, walls }: KitchenSize): Record<string, unknown> {
-  const random = createRandom(seed);
+  const random = createDraw(seed);
   const drawn = drawnRing(walls);
   const stands = drawn.map(([x, y], i): Point => (i === 0 ? [x, y] : [x + off(random), y + off(random)]));
   const ids = drawn.map((_, i) => `w${i + 1}`);
@@ -135,7 +135,7 @@ function cutoutsOf(lengths: readonly number[]): { run: number; kind: 'sink' | 'c
   });
 }
 
-function readings(random: Random, stands: readonly Point[], drawn: readonly Point[], ids: readonly string[]) {
+function readings(random: Draw, stands: readonly Point[], drawn: readonly Point[], ids: readonly string[]) {
   const n = ids.length;
   const at = (points: readonly Point[], i: number): Point => points[(i + n) % n]!;
   const taped = (length: number) => Math.round((length + random.between(-1 / 16, 1 / 16)) * 16) / 16;
@@ -154,7 +154,7 @@ function readings(random: Random, stands: readonly Point[], drawn: readonly Poin
   return { walls, corners, ties };
 }
 
-const off = (random: Random): number => random.between(-1.5, 1.5);
+const off = (random: Draw): number => random.between(-1.5, 1.5);
 const distance = (p: Point, q: Point): number => Math.hypot(q[0] - p[0], q[1] - p[1]);
 
 /** Interior angle at q of a ring walked with the room on the right-hand side, radians. */
