@@ -1,9 +1,13 @@
 import { useEffect, useRef } from 'react';
 
 /**
- * Back closes a sheet or dialog before it leaves the page. Each open layer puts one entry with the page's own address and
- * the router's own state on the browser's history; going back takes it off again and closes the layer. To the router
- * such a step leads from a page to itself.
+ * Back closes a sheet or dialog before it leaves the page. Each open layer stands on an entry of the browser's history that
+ * has the page's own address and the router's own state; going back from it closes the layer. To the router such a step
+ * leads from a page to itself.
+ *
+ * A layer that closes by itself leaves its entry where it is: a step back taken by the program arrives a moment later, and
+ * would undo a navigation made meanwhile. The entry serves the next layer of the page; where none comes, the step from it
+ * to the page under it, which shows nothing, goes on to the page before.
  */
 interface Layer {
   readonly close: () => void;
@@ -13,14 +17,15 @@ const layers: Layer[] = [];
 
 let listening = false;
 
-/** When this module itself asked for steps back, ms; null once they have come. */
-let steppingSince: number | null = null;
+/** The entry that the last layer or step left us on. */
+let last: EntryState = {};
 
-/** ms that a layer's entry is left standing after it closed, so that a navigation that follows at once is not undone. */
-const GRACE = 60;
-
-/** ms after which steps asked for have been overtaken by a navigation and will not come. */
-const OVERTAKEN = 500;
+interface EntryState {
+  /** Layers that this entry and those of the page under it stand for. */
+  readonly layer?: number;
+  /** The router's name of the page's entry, which the entries of layers repeat. */
+  readonly id?: string;
+}
 
 /** While `open`, Back calls `onClose`. */
 export function useBackCloses(open: boolean, onClose: () => void): void {
@@ -42,45 +47,34 @@ function pushLayer(layer: Layer): void {
     listening = true;
   }
   layers.push(layer);
-  if (!isStepping()) pushMissing();
+  pushMissing();
 }
 
 function dropLayer(layer: Layer): void {
   const index = layers.indexOf(layer);
-  if (index < 0) return;
-  layers.splice(index, 1);
-  setTimeout(clearStale, GRACE);
+  if (index >= 0) layers.splice(index, 1);
 }
 
-/** An entry left over from a layer that closed just now serves again; only what is missing is added. */
+/** An entry left over from a layer that closed serves again; only what is missing is added. */
 function pushMissing(): void {
-  for (let depth = depthHere() + 1; depth <= layers.length; depth++) {
-    window.history.pushState({ ...stateHere(), layer: depth }, '');
+  for (let depth = depthOf(here()) + 1; depth <= layers.length; depth++) {
+    window.history.pushState({ ...here(), layer: depth }, '');
   }
-}
-
-/** Takes entries of closed layers off, unless a navigation has come on top meanwhile. */
-function clearStale(): void {
-  const stale = depthHere() - layers.length;
-  if (stale <= 0) return;
-  steppingSince = Date.now();
-  window.history.go(-stale);
+  last = here();
 }
 
 function onPopState(): void {
-  if (isStepping()) {
-    steppingSince = null;
-    // A layer may have opened while the steps were on their way.
-    pushMissing();
+  const from = last;
+  last = here();
+  const depth = depthOf(last);
+  if (layers.length > depth) {
+    for (const layer of layers.splice(depth).reverse()) layer.close();
     return;
   }
-  for (const layer of layers.splice(depthHere()).reverse()) layer.close();
-  // Back or forward onto the entry of a layer that is long closed: go on to the page under it.
-  clearStale();
+  const back = from.id === last.id && depth < depthOf(from);
+  if (back && layers.length < depthOf(from)) window.history.go(layers.length - depth - 1);
 }
 
-const isStepping = (): boolean => steppingSince !== null && Date.now() - steppingSince < OVERTAKEN;
+const here = (): EntryState => (window.history.state as EntryState | null) ?? {};
 
-const stateHere = (): { readonly layer?: number } => (window.history.state as { readonly layer?: number } | null) ?? {};
-
-const depthHere = (): number => stateHere().layer ?? 0;
+const depthOf = ({ layer }: EntryState): number => layer ?? 0;

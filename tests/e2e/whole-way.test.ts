@@ -89,19 +89,10 @@ async function tapDrawing(name: RegExp): Promise<void> {
   await page.touchscreen.tap(box.x + box.width / 2, box.y + box.height / 2);
 }
 
-/**
- * Taps a button that leads to another page. A panel that has just closed takes its own step of the browser's history
- * back, which may come after the tap and undo it: then it is tapped again, as a person would.
- */
+/** Taps a button that leads to another page. */
 async function tapTo(name: RegExp, address: RegExp): Promise<void> {
-  for (let tries = 1; ; tries++) {
-    await page.getByRole('button', { name }).tap();
-    try {
-      return await page.waitForURL(address, { timeout: 8000 });
-    } catch (error) {
-      if (tries === 3) throw error;
-    }
-  }
+  await page.getByRole('button', { name }).tap();
+  await page.waitForURL(address);
 }
 
 it('goes from tape readings to a cut sheet on a phone, and the sheet says what the plan command says', async () => {

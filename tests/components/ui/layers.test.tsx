@@ -60,13 +60,28 @@ describe('Dialog', () => {
     expect(window.location.href).toBe(at);
   });
 
-  it('leaves no step behind on the history when it is closed by itself', async () => {
+  it('costs no press of Back of its own once it has been closed by itself', async () => {
+    window.history.pushState({ id: 'jobs' }, '', '/jobs');
+    window.history.pushState({ id: 'account' }, '', '/account');
     render(<NewJob />);
-    window.history.pushState({ page: 'jobs' }, '');
+    for (let times = 0; times < 2; times++) {
+      await userEvent.click(screen.getByRole('button', { name: 'New job' }));
+      expect(window.history.state).toEqual({ id: 'account', layer: 1 });
+      await userEvent.click(screen.getByRole('button', { name: 'Close' }));
+    }
+    act(() => window.history.back());
+    await waitFor(() => expect(window.history.state).toEqual({ id: 'jobs' }));
+    expect(window.location.pathname).toBe('/jobs');
+  });
+
+  it('lets Back come from the next page to the page that a dialog was closed on', async () => {
+    window.history.pushState({ id: 'jobs' }, '', '/jobs');
+    render(<NewJob onClosed={() => window.history.pushState({ id: 'room' }, '', '/room')} />);
     await userEvent.click(screen.getByRole('button', { name: 'New job' }));
-    expect(window.history.state).toMatchObject({ page: 'jobs', layer: 1 });
     await userEvent.click(screen.getByRole('button', { name: 'Close' }));
-    await waitFor(() => expect(window.history.state).toEqual({ page: 'jobs' }));
+    act(() => window.history.back());
+    await waitFor(() => expect(window.location.pathname).toBe('/jobs'));
+    expect(screen.queryByRole('dialog')).toBeNull();
   });
 
   it('does not take back a navigation that follows the closing at once', async () => {
