@@ -22,7 +22,8 @@ export function roomInputOf(room: RoomReadings, provisional = false): RoomInput 
           a: corner.triangle.a.value,
           b: corner.triangle.b.value,
           c: corner.triangle.c.value,
-          ...sdOf(corner.triangle.c.sd ?? corner.sd),
+          // Beside a protractor reading the corner's own is in degrees.
+          ...sdOf(corner.triangle.c.sd ?? (corner.angle === undefined ? corner.sd : undefined)),
         },
       }),
       ...(corner.angle !== undefined && { angleDeg: corner.angle }),

@@ -1,53 +1,12 @@
 import { z } from 'zod';
 
 import type { LengthUnit } from '@/geometry/tape/parse-length';
-import { alongIn, fileUnitsSchema, lengthIn, readingIn, readingsIn } from './file-length';
+import { alongIn, fileUnitsSchema, lengthIn } from './file-length';
 import { acceptedFindingSchema, climateYearSchema, finishSchema } from './layout-schema';
+import { roomBlockSchema } from './room-schema';
 
 const id = z.string().min(1).max(40);
 const between = z.tuple([id, id]);
-
-/** The room block of a file in these units. */
-export function roomBlockSchema(units: LengthUnit) {
-  const length = lengthIn(units);
-  const signed = lengthIn(units, true);
-  const reading = readingIn(units);
-  const along = alongIn(units);
-  const mark = z.strictObject({ wall: id, at: along });
-  const sd = length.optional();
-  return z.strictObject({
-    units: fileUnitsSchema.optional(),
-    closed: z.boolean().optional(),
-    tapeSd: z.strictObject({ fixed: length, perInch: z.number().min(0) }).optional(),
-    walls: z
-      .array(
-        z.strictObject({
-          id,
-          length: readingsIn(units).optional(),
-          sd,
-          profile: z.array(z.strictObject({ at: length, off: signed })).optional(),
-          outOfPlumb: signed.optional(),
-        }),
-      )
-      .min(1)
-      .max(60),
-    corners: z
-      .array(
-        z.strictObject({
-          between,
-          nominal: z.number().min(5).max(355).optional(),
-          triangle: z.strictObject({ a: reading, b: reading, c: reading, sd }).optional(),
-          angle: z.number().min(1).max(359).optional(),
-          sd: z.number().positive().optional(),
-        }),
-      )
-      .optional(),
-    ties: z.array(z.strictObject({ id, from: mark, to: mark, length: reading, sd })).optional(),
-    trust: z.array(z.string()).optional(),
-    ignore: z.array(z.string()).optional(),
-    sketch: z.array(z.tuple([signed, signed])).optional(),
-  });
-}
 
 /** The whole job file in these units; everything but `room` and `runs` may be left out. Unknown keys are refused by name. */
 export function jobFileSchema(units: LengthUnit) {

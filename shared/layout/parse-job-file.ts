@@ -123,7 +123,7 @@ function endOf(end: JobFile['runs'][number]['left'], settings: ShopSettings): Ru
 /** The room block as stored: every corner is listed, those left out at 90 degrees. */
 export function roomOf(file: { room: JobFile['room'] }, settings: ShopSettings): RoomReadings {
   const { room } = file;
-  const closed = room.closed ?? false;
+  const { closed } = room;
   const walls: Wall[] = room.walls.map(({ length, sd, profile, ...wall }) => {
     const readings = length ?? [];
     return {
@@ -132,7 +132,7 @@ export function roomOf(file: { room: JobFile['room'] }, settings: ShopSettings):
       profile: profile ?? [],
     };
   });
-  const listed = new Map((room.corners ?? []).map((corner) => [corner.between.join('|'), corner]));
+  const listed = new Map(room.corners.map((corner) => [corner.between.join('|'), corner]));
   const corners = wallPairs({ walls, closed }).map((between) => {
     const corner = listed.get(between.join('|'));
     listed.delete(between.join('|'));
@@ -152,12 +152,12 @@ export function roomOf(file: { room: JobFile['room'] }, settings: ShopSettings):
     tapeSd: room.tapeSd ?? settings.tapeSd,
     walls,
     corners: [...corners, ...(strangers as RoomReadings['corners'])],
-    ties: (room.ties ?? []).map(({ sd, ...tie }) => ({
+    ties: room.ties.map(({ sd, ...tie }) => ({
       ...tie,
       length: { ...tie.length, ...(sd !== undefined && { sd }) },
     })),
-    trust: room.trust ?? [],
-    ignore: room.ignore ?? [],
+    trust: room.trust,
+    ignore: room.ignore,
     sketch: room.sketch ?? [],
   };
   return readings.sketch.length > 0 ? readings : { ...readings, sketch: sketchFromReadings(readings) };

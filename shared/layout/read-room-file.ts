@@ -2,7 +2,7 @@ import { z } from 'zod';
 
 import { fileUnitsSchema } from './file-length';
 import { fileErrors } from './parse-job-file';
-import { roomFileSchema, toRoomInput } from './room-schema';
+import { roomBlockSchema, toRoomInput } from './room-schema';
 import type { RoomInputResult } from './room-schema';
 
 /**
@@ -18,8 +18,8 @@ export function readRoomFile(json: unknown): RoomInputResult {
     .safeParse(json);
   if (!head.success) return { ok: false, error: firstError(head.error) };
   const units = head.data.units ?? 'in';
-  const parsed = roomFileSchema(units).safeParse(json);
-  return parsed.success ? toRoomInput(parsed.data, units) : { ok: false, error: firstError(parsed.error) };
+  const parsed = roomBlockSchema(units).safeParse(json);
+  return parsed.success ? toRoomInput(parsed.data) : { ok: false, error: firstError(parsed.error) };
 }
 
 function firstError(error: z.ZodError): { code: string; message: string; path: string } {

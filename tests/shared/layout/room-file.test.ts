@@ -1,4 +1,6 @@
 import { readRoomFile } from '@/shared/layout/read-room-file';
+import { parseJobFile } from '@/shared/layout/parse-job-file';
+import { roomInputOf } from '@/geometry/plan/room-input';
 import type { RoomInput } from '@/geometry/room/types';
 
 function read(json: unknown): RoomInput {
@@ -84,6 +86,19 @@ describe('readRoomFile', () => {
       corners: [{ between: ['A', 'B'], triangle: { ...triangle, sd: 0.1 }, angle: 90, sd: 0.5 }],
     });
     expect(own.corners[0]).toMatchObject({ angleSdDeg: 0.5, triangle: { sd: 0.1 } });
+  });
+
+  it('gives the solver the same corners when the room stands in a job file', () => {
+    const triangle = { a: 36, b: 48, c: 60 };
+    const corners = [
+      { between: ['A', 'B'], nominal: 90, triangle, angle: 90, sd: 0.5 },
+      { between: ['B', 'C'], nominal: 90, triangle, sd: '1/16' },
+    ];
+    const room = { walls: [...walls, { id: 'C', length: 80 }], corners };
+    const job = parseJobFile({ room, runs: [] });
+    if (!job.ok) throw new Error(job.errors[0]!.message);
+    expect(roomInputOf(job.layout.room).corners).toEqual(read(room).corners);
+    expect(read(room).corners[0]!.triangle).not.toHaveProperty('sd');
   });
 
   it('leaves a wall without a length, or with an empty list, unknown', () => {
