@@ -64,6 +64,12 @@ export function AccountScreen() {
             />
           </View>
         </Card>
+        <Button
+          label="Shop settings"
+          icon="settings"
+          href="/settings"
+          onPress={() => router.navigate('/settings' as never)}
+        />
         <Button label="Sign out" icon="leave" onPress={() => setLeaving(true)} />
       </View>
       <Dialog

@@ -1,7 +1,8 @@
-import { useQuery } from '@tanstack/react-query';
+import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 
 import { DEFAULT_SETTINGS, type ShopSettings } from '@/geometry/core/settings';
-import { getShop } from '@/shared/contracts/shop';
+import type { BodyOf } from '@/shared/contracts/contract';
+import { getShop, updateShop } from '@/shared/contracts/shop';
 import { call } from './client';
 
 export const shopKey = ['shop'] as const;
@@ -14,4 +15,13 @@ export function useShop() {
 /** The shop's settings; the usual ones until its own have come for the first time on this device. */
 export function useShopSettings(): ShopSettings {
   return useShop().data?.settings ?? DEFAULT_SETTINGS;
+}
+
+/** Changes what is given of the shop; for owners. */
+export function useUpdateShop() {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (body: BodyOf<typeof updateShop>) => call(updateShop, { body }),
+    onSuccess: (shop) => client.setQueryData(shopKey, shop),
+  });
 }

@@ -1,15 +1,13 @@
-import { useEffect, useRef, useState } from 'react';
-
-import type { Step } from '@/geometry/core/layout';
+import type { DisplayStep } from '@/geometry/tape/format-length';
 import { formatLength } from '@/geometry/tape/format-length';
 import { parseLength, parseSignedLength } from '@/geometry/tape/parse-length';
-import { Field } from '../ui/Field';
+import { TypedField, type TypedValue } from '../ui/TypedField';
 
 export interface LengthFieldProps {
   readonly label: string;
   /** Inches; null shows an empty field. */
   readonly value: number | null;
-  readonly step: Step;
+  readonly step: DisplayStep;
   /** Takes a leading minus: an overhang that is a gap. */
   readonly signed?: boolean;
   readonly hint?: string;
@@ -22,40 +20,20 @@ export interface LengthFieldProps {
 
 /** A typed length: what was typed stays, with a sentence under it while it is none. */
 export function LengthField({ label, value, step, signed, hint, check, onLength, disabled }: LengthFieldProps) {
-  const written = value === null ? '' : formatLength(value, step);
-  const [text, setText] = useState(written);
-  const [error, setError] = useState<string | undefined>();
-  const touched = useRef(false);
-  // Somebody else changed it, or undo did: follow, unless something is being typed here.
-  useEffect(() => {
-    if (!touched.current) setText(written);
-  }, [written]);
-  const commit = () => {
-    if (!touched.current) return;
+  const read = (text: string): TypedValue<number> => {
     const parsed = (signed ? parseSignedLength : parseLength)(text, step.endsWith('mm') ? 'mm' : 'in');
-    const why = parsed.ok ? (check?.(parsed.value) ?? null) : parsed.message;
-    setError(why ?? undefined);
-    if (!parsed.ok || why !== null) return;
-    touched.current = false;
-    setText(formatLength(parsed.value, step));
-    if (parsed.value !== value) onLength(parsed.value);
+    const why = parsed.ok ? (check?.(parsed.value) ?? null) : null;
+    return why === null ? parsed : { ok: false, message: why };
   };
   return (
-    <Field
+    <TypedField
       label={label}
-      value={text}
+      value={value}
       hint={hint}
-      error={error}
       disabled={disabled}
-      kind="text"
-      autoComplete="off"
-      maxLength={24}
-      onChange={(next) => {
-        touched.current = true;
-        setText(next);
-      }}
-      onBlur={commit}
-      onSubmit={commit}
+      write={(inches) => formatLength(inches, step)}
+      read={read}
+      onValue={onLength}
     />
   );
 }

@@ -35,6 +35,7 @@ export function ShopShell({ children }: { readonly children: ReactNode }) {
 function sections(path: string): NavItem[] {
   const all: NavItem[] = [
     { key: 'jobs', label: 'Jobs', icon: 'jobs', href: '/jobs' },
+    { key: 'crew', label: 'Crew', icon: 'crew', href: '/crew' },
     { key: 'account', label: 'Account', icon: 'person', href: '/account' },
   ];
   return all.map((item) => ({ ...item, current: path.startsWith(item.href) }));

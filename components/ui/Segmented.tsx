@@ -23,10 +23,13 @@ export interface SegmentedProps<T extends string> {
   readonly hint?: string;
   readonly error?: string;
   readonly labelHidden?: boolean;
+  /** None of them can be chosen. */
+  readonly disabled?: boolean;
 }
 
 /** Two to four short choices side by side; the chosen one is dark and ticked. */
-export function Segmented<T extends string>({ options, value, onChange, ...shell }: SegmentedProps<T>) {
+export function Segmented<T extends string>({ value, onChange, disabled, ...shell }: SegmentedProps<T>) {
+  const options = disabled ? shell.options.map((option) => ({ ...option, disabled })) : shell.options;
   const chosen = options.findIndex((option) => option.value === value);
   const keys = useKeys(options, chosen, onChange);
   return (

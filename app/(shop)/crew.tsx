@@ -1,0 +1,5 @@
+import { CrewScreen } from '@/components/crew/CrewScreen';
+
+export default function Crew() {
+  return <CrewScreen />;
+}
