@@ -7,7 +7,7 @@ import { Segmented } from '../ui/Segmented';
 import { Text } from '../ui/Text';
 import { color, space } from '../ui/tokens';
 import { HoldButton } from './HoldButton';
-import { pieceDifferences, type PieceDifference } from './plan-differences';
+import { pieceDifferences, sameOnTape, type PieceDifference } from './plan-differences';
 import { useBefore, type BeforeWhat } from './use-before';
 
 export interface ComparePanelProps {
@@ -18,15 +18,15 @@ export interface ComparePanelProps {
 
 /** Now against before: held, the drawing shows the tops as they were; below, what is different in numbers. */
 export function ComparePanel({ what, onWhat, onHold }: ComparePanelProps) {
-  const { plan } = useOpenJob();
+  const { plan, layout } = useOpenJob();
   const { revision, before } = useBefore(what, true);
-  const differences = before ? pieceDifferences(before.plan, plan) : [];
+  const differences = before ? pieceDifferences(before.plan, plan, layout.step) : [];
   return (
     <View style={styles.panel}>
       <Segmented
         label="Compare with"
         options={[
-          { value: 'change', label: 'Before the last change' },
+          { value: 'change', label: 'The last change' },
           {
             value: 'revision',
             label: revision === null ? 'No revision yet' : `Revision ${revision}`,
@@ -68,7 +68,7 @@ function DifferenceWords({ difference }: { readonly difference: PieceDifference 
   if (difference.kind === 'new')
     return <Text>{`new: back ${length(difference.back)}, front ${length(difference.front)}`}</Text>;
   const changed = (['back', 'front', 'depth'] as const).filter(
-    (edge) => Math.abs(difference[edge][0] - difference[edge][1]) > 1 / 128,
+    (edge) => !sameOnTape(difference[edge][0], difference[edge][1], layout.step),
   );
   return (
     <>

@@ -8,7 +8,7 @@ import { useOpenJob } from '../editor/JobProvider';
 import { Button } from '../ui/Button';
 import { Checkbox } from '../ui/Checkbox';
 import { Field } from '../ui/Field';
-import { Chips, Segmented } from '../ui/Segmented';
+import { Chips, Segmented, type ChipsProps } from '../ui/Segmented';
 import { Text } from '../ui/Text';
 import { space } from '../ui/tokens';
 import { BladeField } from './BladeField';
@@ -118,7 +118,7 @@ function EdgeFields({ layout, set }: FieldsProps) {
         Edge and finish
       </Text>
       {mayEdit ? (
-        <Chips
+        <LabelledChips
           label="Edge profile"
           options={PROFILES}
           value={edges.profile}
@@ -138,7 +138,7 @@ function EdgeFields({ layout, set }: FieldsProps) {
         />
       )}
       {mayEdit ? (
-        <Chips
+        <LabelledChips
           label="Finish"
           options={FINISHES}
           value={finish.kind}
@@ -261,6 +261,17 @@ function AccessFields({ layout, set }: FieldsProps) {
   );
 }
 
+function LabelledChips<T extends string>(props: ChipsProps<T>) {
+  return (
+    <View style={styles.labelled}>
+      <Text kind="label" hidden>
+        {props.label}
+      </Text>
+      <Chips {...props} />
+    </View>
+  );
+}
+
 function CrewField({ crew, set }: { readonly crew: number; readonly set: Setter }) {
   const { mayEdit } = useOpenJob();
   const [text, setText] = useState<string | null>(null);
@@ -291,5 +302,6 @@ function CrewField({ crew, set }: { readonly crew: number; readonly set: Setter 
 const styles = StyleSheet.create({
   panel: { gap: space.xl },
   section: { gap: space.m },
+  labelled: { gap: 6 },
   buttons: { flexDirection: 'row', flexWrap: 'wrap', gap: space.s },
 });

@@ -142,7 +142,7 @@ function OtherPlaces(props: {
         : [],
     [plan.room, layout, settings, on, single],
   );
-  const others = sets.filter((set) => set.on === on && set.at.length === 1 && Math.abs(set.at[0]! - at) > SAME);
+  const others = apart(sets.flatMap((set) => (set.on === on && set.at.length === 1 ? [{ at: set.at[0]!, visible: set.visible }] : [])), at); // prettier-ignore
   if (others.length === 0) return null;
   return (
     <View>
@@ -151,14 +151,23 @@ function OtherPlaces(props: {
       </Text>
       {others.map((set) => (
         <LinkRow
-          key={set.at[0]}
-          title={`At ${say(set.at[0]!, layout.step)}`}
+          key={set.at}
+          title={`At ${say(set.at, layout.step)}`}
           value={`${say(set.visible, layout.step)} would show`}
-          onPress={() => props.onMove(set.at[0]!)}
+          onPress={() => props.onMove(set.at)}
         />
       ))}
     </View>
   );
+}
+
+/** At most four places, none within 3 in of where the seam is or of a better one. */
+function apart<T extends { readonly at: number }>(places: readonly T[], now: number): T[] {
+  const kept: T[] = [];
+  for (const place of places) {
+    if ([now, ...kept.map((k) => k.at)].every((at) => Math.abs(at - place.at) >= 3)) kept.push(place);
+  }
+  return kept.slice(0, 4);
 }
 
 const styles = StyleSheet.create({

@@ -84,7 +84,7 @@ export function TopsCanvas(props: TopsCanvasProps) {
         {(pxPerInch) => <Legible scene={scene} pxPerInch={pxPerInch} />}
       </Canvas>
       {before && (
-        <View style={styles.before} role="status">
+        <View style={[styles.before, { top: wide ? 88 : space.m }]} role="status">
           <Text kind="label">{`The tops ${before.words}`}</Text>
         </View>
       )}
@@ -120,7 +120,6 @@ const styles = StyleSheet.create({
   controls: { position: 'absolute', left: 20, bottom: 20 },
   before: {
     position: 'absolute',
-    top: space.m,
     alignSelf: 'center',
     paddingHorizontal: space.m,
     paddingVertical: space.s,

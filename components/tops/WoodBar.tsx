@@ -108,6 +108,7 @@ const styles = StyleSheet.create({
     flexDirection: 'row',
     flexWrap: 'wrap',
     alignItems: 'center',
+    alignContent: 'center',
     columnGap: space.m,
     rowGap: space.xs,
     minHeight: 56,

@@ -1,3 +1,4 @@
+import { roundLength, type DisplayStep } from '@/geometry/tape/format-length';
 import type { Plan } from '@/geometry/plan/types';
 
 /** What became of one piece between two plans. */
@@ -12,14 +13,15 @@ export type PieceDifference =
       readonly depth: readonly [before: number, now: number];
     };
 
-/** Less than this nobody cuts, inches. */
-const SAME = 1 / 128;
+/** Whether two lengths read the same on a tape. */
+export const sameOnTape = (a: number, b: number, step: DisplayStep): boolean =>
+  roundLength(a, step) === roundLength(b, step);
 
-/** Pieces that are new, gone or of another size, in the order of their letters. */
-export function pieceDifferences(before: Plan, now: Plan): PieceDifference[] {
+/** Pieces that are new, gone or of another size to the step, in the order of their letters. */
+export function pieceDifferences(before: Plan, now: Plan, step: DisplayStep): PieceDifference[] {
   const then = new Map(before.pieces.map((piece) => [piece.letter, piece]));
   const kept = new Set(now.pieces.map((piece) => piece.letter));
-  const differ = (a: number, b: number) => Math.abs(a - b) > SAME;
+  const differ = (a: number, b: number) => !sameOnTape(a, b, step);
   const found = now.pieces.flatMap((piece): PieceDifference[] => {
     const old = then.get(piece.letter);
     if (!old) return [{ kind: 'new', letter: piece.letter, back: piece.back, front: piece.front }];

@@ -11,6 +11,7 @@ import { applyEdit, type Edit } from '@/shared/layout/apply-edit';
 import { call } from '../api/client';
 import { useRevisions } from '../api/use-sheets';
 import { useOpenJob } from '../editor/JobProvider';
+import { inSentence } from './tops-choice';
 
 export type BeforeWhat = 'change' | 'revision';
 
@@ -63,7 +64,7 @@ export function useBefore(what: BeforeWhat, wanted: boolean): BeforeState {
       layout: undone.layout,
       plan,
       drawn: turnPlan(plan, viewTurn(undone.layout.room)),
-      words: `before ${deed.label}`,
+      words: `before ${inSentence(deed.label)}`,
     };
   }, [wanted, what, frozen.data, newest, deed, layout, settings]);
   return { revision: newest, before };

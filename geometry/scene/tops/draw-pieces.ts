@@ -1,7 +1,7 @@
 import type { Layout } from '../../core/layout';
 import type { Point, Polygon } from '../../core/point';
 import { boundingBox } from '../../core/polygon';
-import { along, leftNormal } from '../../core/vector';
+import { along, distance, dot, leftNormal, subtract, unit } from '../../core/vector';
 import type { PlacedCutout, Piece } from '../../top/types';
 import type { DrawItem, Stroke } from '../display-list';
 import { woodLook } from '../primitives/wood-look';
@@ -42,11 +42,53 @@ export function drawWood(piece: Piece, layout: Layout, grain: boolean): DrawItem
   };
 }
 
-/** Black on dark wood needs the casing that chalk needs on any. */
-export function drawOutline(piece: Piece, layout: Layout, selected: boolean): DrawItem {
+/**
+ * The edge of a piece, left out where a cutout has taken it away. Black on dark wood needs the casing that chalk needs on
+ * any. The polygon itself has no line where parts of it are missing.
+ */
+export function drawOutline(piece: Piece, layout: Layout, selected: boolean): DrawItem[] {
   const dark = woodLook(layout.material.species).dark;
   const stroke: Stroke = selected ? { ink: 'chalk', width: 4, casing: true } : { ink: 'ink', width: 2, casing: dark };
-  return { layer: 'tops', id: piece.letter, kind: 'polygon', outline: piece.outline, stroke };
+  const tag = { layer: 'tops', id: piece.letter } as const;
+  const holes = piece.cutouts.map((cutout) => cutout.outline.map((p) => toRoom(piece, p)));
+  const lines = piece.outline.flatMap((from, i) => leftOf([{ from, to: piece.outline[(i + 1) % piece.outline.length]! }], holes)); // prettier-ignore
+  if (holes.length === 0 || lines.length === piece.outline.length)
+    return [{ ...tag, kind: 'polygon', outline: piece.outline, stroke }];
+  return [
+    { ...tag, kind: 'polygon', outline: piece.outline },
+    ...lines.map(({ from, to }): DrawItem => ({ ...tag, kind: 'line', from, to, stroke })),
+  ];
+}
+
+interface Segment {
+  readonly from: Point;
+  readonly to: Point;
+}
+
+/** Shorter leftovers are rounding, inches. */
+const LEFTOVER = 1e-6;
+
+/** The parts of some segments that no hole takes. A hole is clipped to its piece, so its own edge may lie on the segment. */
+function leftOf(segments: readonly Segment[], holes: readonly Polygon[]): readonly Segment[] {
+  return holes.reduce<readonly Segment[]>((left, hole) => left.flatMap((segment) => outside(segment, hole)), segments);
+}
+
+/** What a convex or star-like hole leaves of a segment: before and after the stretch that lies in it or on its edge. */
+function outside({ from, to }: Segment, hole: Polygon): Segment[] {
+  const dir = unit(from, to);
+  if (!dir) return [];
+  const length = distance(from, to);
+  const normal = leftNormal(dir);
+  const on = hole
+    .filter((p) => Math.abs(dot(normal, subtract(p, from))) < 1e-6)
+    .map((p) => dot(dir, subtract(p, from)))
+    .filter((at) => at > -LEFTOVER && at < length + LEFTOVER);
+  if (on.length < 2) return [{ from, to }];
+  const [first, last] = [Math.min(...on), Math.max(...on)];
+  return [
+    ...(first > LEFTOVER ? [{ from, to: along(from, dir, first) }] : []),
+    ...(last < length - LEFTOVER ? [{ from: along(from, dir, last), to }] : []),
+  ];
 }
 
 /** Letter on a disc where the piece is widest beside its cutouts, and an arrow along the grain next to it. */

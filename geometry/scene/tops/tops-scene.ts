@@ -46,10 +46,10 @@ export function topsScene(plan: Plan, layout: Layout, options: TopsSceneOptions 
     ...(layers.walls ? surroundings(plan, layout) : []),
     ...pieces.map((piece) => drawWood(piece, layout, layers.grain)),
     ...cutouts.flatMap((cutout) => drawCutout(cutout, layout, chosen(`cutout ${cutout.id}`))),
-    ...pieces.map((piece) => drawOutline(piece, layout, false)),
+    ...pieces.flatMap((piece) => drawOutline(piece, layout, false)),
     ...joints.map((joint) => drawJoint(joint, layout, chosen(`joint ${joint.between.join('-')}`))),
     ...seams.flatMap((seam) => drawSeam(seam, cutouts)),
-    ...pieces.filter(lights).map((piece) => drawOutline(piece, layout, true)),
+    ...pieces.filter(lights).flatMap((piece) => drawOutline(piece, layout, true)),
     ...runEnds(plan)
       .filter((end) => chosen(`end ${end.run} ${end.side}`))
       .map(drawRunEnd),
