@@ -13,6 +13,7 @@ import { CutInto } from './CutInto';
 import { endWords } from './EndPanel';
 import { LinkRow } from './LinkRow';
 import { runPlaceProblem, someLength, wallLength } from './length-checks';
+import { ScribePanel } from './ScribePanel';
 import { inSentence, topName } from './tops-choice';
 import { useItemChange } from './use-item-change';
 
@@ -64,6 +65,7 @@ export function RunPanel({ id, onChoose }: TopPanelProps) {
           hint="Far side is the other side of a peninsula or a half wall."
         />
       )}
+      <ScribePanel run={id} />
       <CutInto on={id} onChoose={onChoose} />
       {mayEdit && (
         <Button

@@ -25,6 +25,7 @@ import { grainBreaksAtSeam } from './grain-breaks-at-seam';
 import { heavySection } from './heavy-section';
 import { jointNoAccess } from './joint-no-access';
 import { jointNoConnectors } from './joint-no-connectors';
+import { lowerFromAbove } from './lower-from-above';
 import { madeOutOfRange } from './made-out-of-range';
 import { miterOpens } from './miter-opens';
 import { moistureOutOfRange } from './moisture-out-of-range';
@@ -41,6 +42,7 @@ import { seamNearCutout } from './seam-near-cutout';
 import { seamNearEnd } from './seam-near-end';
 import { seamNoCleats } from './seam-no-cleats';
 import { seamUnsupported } from './seam-unsupported';
+import { scribeEatsDepth } from './scribe-eats-depth';
 import { sectionWontGoIn } from './section-wont-go-in';
 import { sharpCorner } from './sharp-corner';
 import { shortPiece } from './short-piece';
@@ -67,6 +69,7 @@ export const RULES: readonly Rule[] = [
   gapUnderSwelling,
   gapNotCovered,
   gapOpensInWinter,
+  scribeEatsDepth,
   wallOutOfPlumb,
   seamUnsupported,
   seamNearCutout,
@@ -102,6 +105,7 @@ export const RULES: readonly Rule[] = [
   slabNoNeighbours,
   stockDiffers,
   sectionWontGoIn,
+  lowerFromAbove,
   heavySection,
   endUnfinished,
   sharpCorner,

@@ -3,6 +3,7 @@ import type { ShopSettings } from '../core/settings';
 import type { NestPlan } from '../nest/types';
 import type { RoomFit } from '../room/types';
 import type { Piece, TopJoint, Tops } from '../top/types';
+import type { WallFit } from '../top/wall-fit';
 import type { JointWood, Movement } from '../wood/types';
 
 /** Whether an assembled section gets into the house. */
@@ -28,4 +29,5 @@ export interface FindingContext {
   /** Why the pieces cannot be nested, in a sentence; null when they can or it was not tried. */
   readonly nestProblem: { readonly code: string; readonly message: string } | null;
   readonly passages: readonly SectionPassage[];
+  readonly wallFit: WallFit;
 }

@@ -4,6 +4,7 @@ import { COOKTOP_ABOVE } from './cooktop-heat';
 import { COOKTOP_CLEAR } from './cooktop-near-edge';
 import { UNSURE_LIMIT } from './corner-unsure';
 import { NEEDS_CONNECTORS } from './joint-no-connectors';
+import { FRONT_REACH } from './scribe-eats-depth';
 import { SEASON_NOTE, SEASON_WARN } from './season-limits';
 import { CORNER_RADIUS } from './sharp-corner';
 import { CABINET_SIDE } from './sink-wider-than-base';
@@ -15,6 +16,7 @@ export const WHERE_FROM: readonly SourcedConstant[] = [
   ...WOOD_CONSTANTS,
   SEASON_NOTE,
   SEASON_WARN,
+  FRONT_REACH,
   PLUMB_LIMIT,
   COOKTOP_CLEAR,
   COOKTOP_ABOVE,

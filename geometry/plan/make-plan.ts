@@ -2,6 +2,9 @@ import type { Layout } from '../core/layout';
 import type { ShopSettings } from '../core/settings';
 import { findingsOf } from '../findings/catalogue';
 import type { NestError, NestPlan } from '../nest/types';
+import { solvedRoom } from '../top/solved-room';
+import { wallFit, type WallFit } from '../top/wall-fit';
+import { wallFrames } from '../top/wall-frame';
 import { gettingIn } from '../top/getting-in';
 import { assembledSections } from '../wood/sections';
 import { jointWood } from '../wood/joint-wood';
@@ -23,6 +26,8 @@ export const ENGINE = '1.0.0';
 export function makePlan({ layout, settings, nest, nestProblem }: PlanInput): Plan {
   return finishPlan(layRoom(layout, settings), layout, settings, { nest, nestProblem });
 }
+
+const NO_WALLS: WallFit = { scribes: [], slides: [] };
 
 /** What a search for slabs gave: a plan, or why there is none. */
 export interface NestGiven {
@@ -53,6 +58,8 @@ export function finishPlan(laid: Laid, layout: Layout, settings: ShopSettings, g
       layout.step,
     ),
   );
+  const walls = room.fit && !room.error ? wallFrames(solvedRoom(room.fit, layout.room)) : null;
+  const fit = walls ? wallFit(tops.runs, layout, walls) : NO_WALLS;
   const screws = chooseScrew(fixing, material.thickness, settings);
   return {
     engine: ENGINE,
@@ -67,6 +74,8 @@ export function finishPlan(laid: Laid, layout: Layout, settings: ShopSettings, g
     instance,
     nest,
     cost: nest && { slabs: nest.cost, lowerBound: nest.lowerBound, gap: nest.gap, proved: nest.proved },
+    passages,
+    wallFit: fit,
     movement,
     screws,
     findings: findingsOf({
@@ -80,6 +89,7 @@ export function finishPlan(laid: Laid, layout: Layout, settings: ShopSettings, g
       nest,
       nestProblem: given.nestProblem ?? null,
       passages,
+      wallFit: fit,
     }),
     schedule: orderOfWork({ layout, settings, tops }),
   };

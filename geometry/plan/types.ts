@@ -4,6 +4,8 @@ import type { Finding } from '../findings/types';
 import type { NestError, NestInstance, NestPlan } from '../nest/types';
 import type { RoomError, RoomFit } from '../room/types';
 import type { PlacedCutout, Piece, TopJoint, TopSeam, Tops } from '../top/types';
+import type { GettingIn } from '../top/getting-in';
+import type { WallFit } from '../top/wall-fit';
 import type { JointWood, Movement, ScrewChoice, Step } from '../wood/types';
 
 /** Everything computed from a layout, the shop's settings and a nest result; stored only inside a revision. */
@@ -29,6 +31,10 @@ export interface Plan {
     readonly gap: number;
     readonly proved: boolean;
   } | null;
+  /** How each section that is carried as one gets into the room. */
+  readonly passages: readonly GettingIn[];
+  /** Scribe lines on bowed walls, and which runs slide straight back. */
+  readonly wallFit: WallFit;
   readonly movement: Movement;
   readonly screws: ScrewChoice | null;
   readonly findings: readonly Finding[];

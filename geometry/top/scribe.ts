@@ -16,6 +16,8 @@ export interface ScribeStation {
 /** What a bowed wall means for one run. Inches. */
 export interface Scribe {
   readonly run: string;
+  /** Wall line to back edge as laid, before scribing. */
+  readonly standoff: number;
   /** In order along the wall; straight between them, so they are the scribe line of the template. */
   readonly stations: readonly ScribeStation[];
   readonly largestGap: number;
@@ -51,6 +53,7 @@ export function scribeRun(run: Run, laid: LaidRun, wall: WallFrame, backsplash: 
   const takeOff = Math.max(...stations.map((station) => station.takeOff));
   return {
     run: run.id,
+    standoff,
     stations,
     largestGap,
     covered: largestGap <= backsplash,
@@ -58,6 +61,13 @@ export function scribeRun(run: Run, laid: LaidRun, wall: WallFrame, backsplash: 
     takeOff,
     depthLeft: laid.depth - takeOff,
   };
+}
+
+/** Most that is taken off the back edge between two places along the wall, inches. */
+export function takeOffBetween({ stations }: Scribe, from: number, to: number): number {
+  const line = stations.map(({ at, takeOff }) => ({ at, off: takeOff }));
+  const inside = stations.filter(({ at }) => at > from && at < to).map(({ takeOff }) => takeOff);
+  return Math.max(offsetAt(line, from), ...inside, offsetAt(line, to));
 }
 
 /** The places, and those between two of them where a straight line passes through nothing. */

@@ -38,6 +38,7 @@ export function toPlanOutput(plan: Plan) {
       cuts: slab.cuts,
       offcuts: slab.offcuts,
     })),
+    scribes: plan.wallFit.scribes,
     cost: plan.cost,
     provedScope: plan.nest?.provedScope ?? null,
     movement: plan.movement,

@@ -5,6 +5,8 @@ import type { NestPlacement, NestPlan } from '@/geometry/nest/types';
 import type { CornerFit, RoomFit } from '@/geometry/room/types';
 import { layTops } from '@/geometry/seams/lay-tops';
 import type { Tops } from '@/geometry/top/types';
+import { wallFit } from '@/geometry/top/wall-fit';
+import { wallFrames } from '@/geometry/top/wall-frame';
 import { jointWood } from '@/geometry/wood/joint-wood';
 import { movementOf } from '@/geometry/wood/movement';
 import { pieceWeight } from '@/geometry/wood/weight';
@@ -61,6 +63,7 @@ export function kitchen(parts: KitchenParts = {}): FindingContext {
     nest: null,
     nestProblem: null,
     passages: [],
+    wallFit: wallFit(tops.runs, whole, wallFrames(solved)),
   };
   return parts.context ? parts.context(context) : context;
 }
