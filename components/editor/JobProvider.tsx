@@ -12,6 +12,7 @@ import { useShopSettings } from '../api/use-shop';
 import { useToast } from '../ui/ToastProvider';
 import type { EditorStore } from './editor-store';
 import { saveWords } from './editor-store';
+import { lettersToKeep } from './letters-to-keep';
 import { openEditor } from './open-editor';
 import { useFreshStock } from './use-fresh-stock';
 import { useLivePlan, type LivePlan } from './use-plan';
@@ -96,6 +97,8 @@ function WithPlan({ job, store, children }: { job: Job; store: EditorStore; chil
       store,
       mayEdit,
       run: (edit, label) => {
+        const letters = lettersToKeep(store.getState().layout, settings);
+        if (letters) store.getState().keep(letters);
         const reason = store.getState().run(edit, label);
         if (reason) toast({ tone: 'failure', text: reason });
         return reason === null;

@@ -36,6 +36,8 @@ export interface EditorState extends EditorRecord {
   readonly sync: 'idle' | 'sending' | 'offline' | 'no-permission';
   /** Applies an edit at once. Returns the sentence why not, or null. */
   readonly run: (edit: EditDraft, label: string) => string | null;
+  /** Applies an edit that nobody did on purpose, such as keeping letters: it is stored, and not undone. */
+  readonly keep: (edit: EditDraft) => void;
   readonly undoLast: () => string | null;
   readonly redoLast: () => string | null;
   readonly showPreview: (edits: readonly EditDraft[] | null) => void;
@@ -98,6 +100,7 @@ export function createEditorStore(record: EditorRecord, newId: () => string = ()
         set({ undo: [...get().undo, { label, inverse: result.inverse }].slice(-MOST_DEEDS), redo: [] });
         return null;
       },
+      keep: (draft) => void enqueue(draft),
       undoLast: () => turnBack('undo', 'redo', (label, why) => `Could not undo ${label}. ${why}`),
       redoLast: () => turnBack('redo', 'undo', (label, why) => `Could not redo ${label}. ${why}`),
       showPreview(drafts) {

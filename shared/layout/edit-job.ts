@@ -186,6 +186,16 @@ function moveSeam(draft: Draft<Layout>, on: string, from: number, at: number | n
   else draft.seams[index]!.at = at;
 }
 
+/** Letters of pieces that have none yet; where two people gave one letter to two pieces, the first to come keeps it. */
+function keepLetters(draft: Draft<Layout>, given: Readonly<Record<string, string>>): void {
+  const taken = new Set(Object.values(draft.letters));
+  for (const [key, letter] of Object.entries(given)) {
+    if (Object.hasOwn(draft.letters, key) || taken.has(letter)) continue;
+    draft.letters[key] = letter;
+    taken.add(letter);
+  }
+}
+
 /** Applies one edit of tops, stock or choices to a draft; throws EditRefused when it no longer applies. */
 export function applyJobEdit(draft: Draft<Layout>, edit: JobEdit): void {
   switch (edit.kind) {
@@ -210,10 +220,10 @@ export function applyJobEdit(draft: Draft<Layout>, edit: JobEdit): void {
     case 'unpinSeam':
       return moveSeam(draft, edit.on, edit.at, null);
     case 'setDisplay':
-    case 'keepLetters':
-      if (edit.kind === 'setDisplay') Object.assign(draft, edit.value);
-      else Object.assign(draft.letters, edit.value);
+      Object.assign(draft, edit.value);
       return;
+    case 'keepLetters':
+      return keepLetters(draft, edit.value);
     case 'acceptFinding':
       if (edit.accepted) draft.accepted[edit.finding] = edit.accepted;
       else delete draft.accepted[edit.finding];

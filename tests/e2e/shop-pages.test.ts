@@ -1,9 +1,8 @@
 import type { Browser, Page } from 'playwright-core';
 
 import type { Role } from '@/shared/roles/roles';
-import { openBrowserApp, type BrowserApp } from '@/tests/helpers/browser-app';
+import { openBrowserApp, openSignedIn, type BrowserApp } from '@/tests/helpers/browser-app';
 import { launchChromium } from '@/tests/helpers/chromium';
-import { TEST_PASSWORD } from '@/tests/helpers/test-server';
 
 let app: BrowserApp;
 let browser: Browser;
@@ -18,15 +17,8 @@ afterAll(async () => {
   await app.close();
 });
 
-async function open(role: Role, at: string, width: number): Promise<Page> {
-  const context = await browser.newContext({ serviceWorkers: 'block', viewport: { width, height: 844 } });
-  const page = await context.newPage();
-  await page.goto(`${app.address}${at}`);
-  await page.getByLabel('Work e-mail').fill(app.shop.people[role].email);
-  await page.getByLabel('Password').fill(TEST_PASSWORD);
-  await page.getByRole('button', { name: 'Sign in', exact: true }).click();
-  return page;
-}
+const open = (role: Role, at: string, width: number): Promise<Page> =>
+  openSignedIn(browser, app, at, { viewport: { width, height: 844 } }, role);
 
 /** Whether something on the page is wider than the screen. */
 const overflows = (page: Page) =>

@@ -1,10 +1,11 @@
+import { randomUUID } from 'node:crypto';
 import { existsSync } from 'node:fs';
 import type { AddressInfo } from 'node:net';
 import path from 'node:path';
 
 import type { Knex } from 'knex';
 import { pino } from 'pino';
-import type { Page } from 'playwright-core';
+import type { Browser, BrowserContextOptions, Page } from 'playwright-core';
 
 import { createApp } from '@/server/app';
 import { close, listen } from '@/server/listen';
@@ -66,3 +67,44 @@ export async function signIn(page: Page, { address, shop }: BrowserApp, role: Ro
   await page.getByRole('button', { name: 'Sign in', exact: true }).tap();
   await page.getByRole('heading', { name: 'Jobs', exact: true }).waitFor();
 }
+
+/** Opens a job from a job file, as `POST /job-files` does for a person of this role; gives its id. */
+export async function importJob(app: BrowserApp, file: unknown, role: Role = 'owner'): Promise<string> {
+  const post = async (path: string, body: object, token?: string) => {
+    const answer = await fetch(`${app.address}/api/v1${path}`, {
+      method: 'POST',
+      headers: {
+        'content-type': 'application/json',
+        'idempotency-key': randomUUID(),
+        ...(token && { authorization: `Bearer ${token}` }),
+      },
+      body: JSON.stringify(body),
+    });
+    if (!answer.ok) throw new Error(`${path} answered ${answer.status}: ${await answer.text()}`);
+    return answer.json() as Promise<Record<string, string>>;
+  };
+  const { email } = app.shop.people[role];
+  const session = await post('/auth/sign-in', { email, password: TEST_PASSWORD });
+  return (await post('/job-files', { file }, session.accessToken)).id!;
+}
+
+/** A page at an address of the app, signed in by hand; whoever is not signed in is brought back to the address. */
+export async function openSignedIn(
+  browser: Browser,
+  app: BrowserApp,
+  at: string,
+  options: BrowserContextOptions,
+  role: Role = 'owner',
+): Promise<Page> {
+  const context = await browser.newContext({ serviceWorkers: 'block', ...options });
+  const page = await context.newPage();
+  await page.goto(`${app.address}${at}`);
+  await page.getByLabel('Work e-mail').fill(app.shop.people[role].email);
+  await page.getByLabel('Password').fill(TEST_PASSWORD);
+  await page.getByRole('button', { name: 'Sign in', exact: true }).click();
+  await page.waitForURL(`${app.address}${at}`);
+  return page;
+}
+
+export const PHONE: BrowserContextOptions = { viewport: { width: 390, height: 844 }, hasTouch: true };
+export const WIDE: BrowserContextOptions = { viewport: { width: 1440, height: 900 } };
