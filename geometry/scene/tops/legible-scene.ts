@@ -24,6 +24,8 @@ const OFFSETS = [17, -19, 40, -42, 62];
 /** How far a joint's blade may go out, times its usual distance. */
 const LEADERS = [1, 1.7, 2.5, 3.4];
 const SEAM_WIDTH = 8;
+/** px further out that a seam's blade may go. */
+const FURTHER = [0, 44, 88, 132];
 
 /**
  * The same drawing with its words, sizes, letters and arrows placed for one zoom: none lies on another. What finds no
@@ -53,6 +55,7 @@ class Placer {
   place(): DrawItem[] {
     this.takeSeams();
     this.letters();
+    this.seamWords();
     this.each(
       (item) => item.kind === 'text' && item.layer === 'walls',
       (item) => this.wallLetter(item as Of<'text'>),
@@ -89,14 +92,35 @@ class Placer {
     if (found) this.taken.push(found.box);
   }
 
-  /** Handles, blades and lines of seams stay where they are: fingers look for them there. */
+  /** Handles and lines of seams stay where they are: fingers look for them there. */
   private takeSeams(): void {
     for (const item of this.items) {
       if (item.layer !== 'seams') continue;
       if (item.kind === 'line') this.taken.push(this.lineBox(item.from, item.to));
       if (item.kind === 'mark') this.taken.push(this.square(item.at, item.size, item.shift));
-      if (item.kind === 'blade') this.taken.push(this.bladeBox(item));
-      if (item.kind === 'text') this.taken.push(this.textBox(item));
+    }
+  }
+
+  /** A seam's blade and its words go out from their handle together until they are free; the words are given up first. */
+  private seamWords(): void {
+    const blades = this.items.filter((item): item is Of<'blade'> => item.kind === 'blade' && item.layer === 'seams');
+    for (const blade of blades) {
+      const words = this.items.find(
+        (item): item is Of<'text'> => item.kind === 'text' && item.layer === 'seams' && item.id === blade.id,
+      );
+      const [x, y] = blade.shift ?? [0, 1];
+      const reach = Math.hypot(x, y) || 1;
+      const moved = FURTHER.map((px) => {
+        const by = (shift: Shift = [0, 0]): Shift => [shift[0] + (x / reach) * px, shift[1] + (y / reach) * px];
+        return { blade: { ...blade, shift: by(blade.shift) }, words: words && { ...words, shift: by(words.shift) } };
+      });
+      const whole = moved.find((one) => this.free(this.bladeBox(one.blade)) && (!one.words || this.free(this.textBox(one.words)))); // prettier-ignore
+      const found = whole ?? moved.find((one) => this.free(this.bladeBox(one.blade)));
+      this.changed.set(blade, found?.blade ?? null);
+      if (found) this.taken.push(this.bladeBox(found.blade));
+      if (!words) continue;
+      this.changed.set(words, whole?.words ?? null);
+      if (whole?.words) this.taken.push(this.textBox(whole.words));
     }
   }
 
