@@ -87,7 +87,7 @@ function api(config: Config, db: Knex, log: Logger): Router {
     layoutRoutes(new LayoutService(db, log)),
     revisionRoutes(new RevisionService(db)),
     nestRoutes(nests),
-    sheetRoutes(new SheetService(db, nests)),
+    sheetRoutes(new SheetService(db, nests, config.publicUrl)),
     stockRoutes(new StockService(db)),
     rackRoutes(new RackService(db)),
     eventRoutes(new EventHub(db)),

@@ -3,7 +3,7 @@ import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import type { NestPlan } from '@/geometry/nest/types';
 import { API_ROOT } from '@/shared/contracts/contract';
 import { freezeRevision, listRevisions, signOff } from '@/shared/contracts/revisions';
-import { CUT_SHEET_PATH } from '@/shared/contracts/sheets';
+import { SHEET_PATH, type SheetChoice } from '@/shared/contracts/sheets';
 import { call, fetchFile } from './client';
 import { jobKeys } from './use-jobs';
 
@@ -47,14 +47,18 @@ export function useSignOff(jobId: string) {
   });
 }
 
-export interface CutSheetChoice {
+export interface SheetFile {
   readonly jobId: string;
+  readonly kind: SheetChoice;
   readonly revision: number | 'draft';
   readonly paper: 'letter' | 'a4';
+  /** Such as "1-3,5"; all when left out. */
+  readonly pages?: string;
 }
 
-/** The cut sheets as a PDF. */
-export function fetchCutSheet({ jobId, revision, paper }: CutSheetChoice): Promise<Blob> {
-  const query = new URLSearchParams({ revision: String(revision), paper });
-  return fetchFile(`${API_ROOT}${CUT_SHEET_PATH.replace(':jobId', jobId)}?${query.toString()}`);
+/** Sheets as a PDF. */
+export function fetchSheets({ jobId, kind, revision, paper, pages }: SheetFile): Promise<Blob> {
+  const query = new URLSearchParams({ revision: String(revision), paper, ...(pages && { pages }) });
+  const address = SHEET_PATH.replace(':jobId', jobId).replace(':kind', kind);
+  return fetchFile(`${API_ROOT}${address}?${query.toString()}`);
 }

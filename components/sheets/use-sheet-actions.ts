@@ -2,7 +2,7 @@ import { useState } from 'react';
 
 import type { Job } from '@/shared/contracts/jobs';
 import { ApiError } from '../api/api-problem';
-import { fetchCutSheet } from '../api/use-sheets';
+import { fetchSheets } from '../api/use-sheets';
 
 export interface SheetActions {
   readonly busy: 'download' | 'print' | null;
@@ -27,7 +27,7 @@ export function useSheetActions(choice: {
     setBusy(what);
     setError(null);
     try {
-      const address = URL.createObjectURL(await fetchCutSheet({ jobId: job.id, revision, paper }));
+      const address = URL.createObjectURL(await fetchSheets({ jobId: job.id, kind: 'cut', revision, paper }));
       deliver(address);
       setTimeout(() => URL.revokeObjectURL(address), KEEP_MS);
     } catch (failure) {

@@ -11,7 +11,7 @@ import type { SheetHead } from '@/geometry/scene/paper/sheet-head';
 import type { Path, Primitive, View } from '@/geometry/scene/primitives/primitive';
 import { toPrimitives } from '@/geometry/scene/primitives/to-primitives';
 import { fontOf } from '@/geometry/scene/text-width';
-import { cutSheetPdf } from '@/server/sheets/cut-sheet';
+import { sheetPdf } from '@/server/sheets/sheet-pdf';
 import { parseJobFile } from '@/shared/layout/parse-job-file';
 
 import type { BenchRow } from './bench-row';
@@ -59,7 +59,8 @@ const WARM_UP = 4;
 export async function rows(): Promise<BenchRow[]> {
   const { plan, layout } = benchJob();
   const bare = bareOperators(plan, layout);
-  const sheet = () => drain(cutSheetPdf({ plan, layout, head: HEAD, paper: 'letter' }));
+  const sheet = () =>
+    drain(sheetPdf({ kinds: ['cut'], settings: DEFAULT_SETTINGS, plan, layout, head: HEAD, paper: 'letter' }));
   const times = { sheet: [] as number[], bare: [] as number[] };
   // Turn about, so that a slow moment of the machine hits both alike.
   for (let round = 0; round < ROUNDS + WARM_UP; round++) {

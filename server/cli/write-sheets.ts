@@ -5,7 +5,9 @@ import { pipeline } from 'node:stream/promises';
 
 import type { Layout } from '@/geometry/core/layout';
 import type { Plan } from '@/geometry/plan/types';
-import { cutSheetPdf } from '../sheets/cut-sheet';
+import { DEFAULT_SETTINGS } from '@/geometry/core/settings';
+import { sheetEntry, SHEET_KINDS, type SheetKind } from '@/geometry/scene/sheet-kinds';
+import { sheetPdf } from '../sheets/sheet-pdf';
 
 export interface SheetsRequest {
   readonly plan: Plan;
@@ -20,15 +22,14 @@ export interface SheetsRequest {
 const NO_DATE = '2000-01-01';
 
 /**
- * Writes a job's sheets as PDF files.
+ * Writes a job's sheets as PDF files, one for each kind that has something to say.
  *
  * @param folder - made when it is not there
- * @returns paths of the files; none when the pieces are not nested
+ * @returns paths of the files; none when there are no pieces
  */
 export async function writeSheets(folder: string, { plan, layout, name, index }: SheetsRequest): Promise<string[]> {
-  if (!plan.nest || plan.nest.slabs.length === 0) return [];
+  if (plan.pieces.length === 0) return [];
   await mkdir(folder, { recursive: true });
-  const file = path.join(folder, `${fileName(name, index)}-cut.pdf`);
   const head = {
     jobNumber: String(index + 1).padStart(4, '0'),
     jobName: name,
@@ -38,8 +39,17 @@ export async function writeSheets(folder: string, { plan, layout, name, index }:
     signedBy: null,
     draft: true,
   };
-  await pipeline(cutSheetPdf({ plan, layout, head, paper: 'letter' }), createWriteStream(file));
-  return [file];
+  const request = { plan, layout, settings: DEFAULT_SETTINGS, head, paper: 'letter', prices: true } as const;
+  const nested = (plan.nest?.slabs.length ?? 0) > 0;
+  const has = (kind: SheetKind) =>
+    (nested || !sheetEntry(kind).needsSlabs) && sheetEntry(kind).pages(request).length > 0;
+  const files: string[] = [];
+  for (const kind of SHEET_KINDS.filter(has)) {
+    const file = path.join(folder, `${fileName(name, index)}-${kind}.pdf`);
+    await pipeline(sheetPdf({ ...request, kinds: [kind] }), createWriteStream(file));
+    files.push(file);
+  }
+  return files;
 }
 
 /** A file name of the job's own letters; jobs of one batch never share one. */

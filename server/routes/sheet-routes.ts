@@ -2,7 +2,14 @@ import { pipeline } from 'node:stream/promises';
 
 import { Router } from 'express';
 
-import { CUT_SHEET_PATH, cutSheetParams, cutSheetQuery, type CutSheetQuery } from '@/shared/contracts/sheets';
+import {
+  kindsOf,
+  SHEET_PATH,
+  sheetParams,
+  sheetQuery,
+  type SheetChoice,
+  type SheetQuery,
+} from '@/shared/contracts/sheets';
 import { actorOf } from '../http/authenticate';
 import { goneSignal } from '../http/gone-signal';
 import { parseRequest } from '../http/route';
@@ -10,12 +17,12 @@ import type { SheetService } from '../services/sheet-service';
 
 export function sheetRoutes(sheets: SheetService): Router {
   const router = Router();
-  router.get(CUT_SHEET_PATH, async (req, res) => {
+  router.get(SHEET_PATH, async (req, res) => {
     const actor = actorOf(res);
-    const { params, query } = parseRequest({ params: cutSheetParams, query: cutSheetQuery }, req);
+    const { params, query } = parseRequest({ params: sheetParams, query: sheetQuery }, req);
     const gone = goneSignal(res);
-    const { jobId } = params as { jobId: string };
-    const { pdf, fileName } = await sheets.cutSheet(actor, jobId, query as CutSheetQuery, gone);
+    const { jobId, kind } = params as { jobId: string; kind: SheetChoice };
+    const { pdf, fileName } = await sheets.print(actor, jobId, kindsOf(kind), query as SheetQuery, gone);
     res.set({
       'Content-Type': 'application/pdf',
       'Content-Disposition': `inline; filename="${fileName}"`,

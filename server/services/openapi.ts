@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { ALL_CONTRACTS, type NamedContract } from '@/shared/contracts/all-contracts';
 import { API_ROOT, type Contract } from '@/shared/contracts/contract';
 import { EVENTS_PATH, shopEventSchema } from '@/shared/contracts/events';
-import { CUT_SHEET_PATH, cutSheetParams, cutSheetQuery } from '@/shared/contracts/sheets';
+import { SHEET_PATH, sheetParams, sheetQuery } from '@/shared/contracts/sheets';
 import { PROBLEMS, problemSchema, type ProblemCode } from '@/shared/problems/problem';
 import { may, ROLES } from '@/shared/roles/roles';
 
@@ -22,7 +22,7 @@ export function openApiDocument(): Json {
   };
   for (const named of ALL_CONTRACTS) add(named.contract.path, named.contract.method, operationOf(named));
   add(EVENTS_PATH, 'get', eventsOperation());
-  add(CUT_SHEET_PATH, 'get', cutSheetOperation());
+  add(SHEET_PATH, 'get', sheetOperation());
   return {
     openapi: '3.1.0',
     info: { title: 'Offsquare', version: '1', description: 'Lengths inches, angles degrees, money integer cents.' },
@@ -135,14 +135,14 @@ function eventsOperation(): Json {
   };
 }
 
-function cutSheetOperation(): Json {
+function sheetOperation(): Json {
   return {
-    operationId: 'printCutSheet',
+    operationId: 'printSheets',
     tags: ['sheets'],
-    summary: 'The cut sheet as a PDF, a page a slab.',
+    summary: 'Sheets of one kind as a PDF, or all of them as one set.',
     description: whoMay({ may: 'sheet.print' } as Contract),
     security: [{ accessToken: [] }],
-    parameters: [...parametersOf(cutSheetParams, 'path'), ...parametersOf(cutSheetQuery, 'query')],
+    parameters: [...parametersOf(sheetParams, 'path'), ...parametersOf(sheetQuery, 'query')],
     responses: {
       200: { description: 'The sheet.', content: { 'application/pdf': {} } },
       401: problemAnswer(['not_signed_in']),

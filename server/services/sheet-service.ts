@@ -1,14 +1,21 @@
 import type { Knex } from 'knex';
 
+import type { ShopSettings } from '@/geometry/core/settings';
 import type { NestPlan } from '@/geometry/nest/types';
 import { makePlan } from '@/geometry/plan/make-plan';
 import type { Plan } from '@/geometry/plan/types';
 import type { Layout } from '@/geometry/core/layout';
 import type { SheetHead } from '@/geometry/scene/paper/sheet-head';
-import type { CutSheetQuery } from '@/shared/contracts/sheets';
+import { sheetEntry, type SheetKind } from '@/geometry/scene/sheet-kinds';
+import type { SheetQuery } from '@/shared/contracts/sheets';
+import { completeSettings } from '@/shared/contracts/shop-settings';
+import { may } from '@/shared/roles/roles';
+import { ProblemError } from '../http/problem-error';
 import { findMember } from '../repositories/crew-repository';
 import { listRevisions } from '../repositories/revision-repository';
-import { cutSheetPdf } from '../sheets/cut-sheet';
+import { qrRows } from '../sheets/qr-rows';
+import { SheetError } from '../sheets/sheet-error';
+import { sheetPdf } from '../sheets/sheet-pdf';
 import type { Actor } from './actor';
 import { inShop } from './in-shop';
 import { mustFindJob } from './job-service';
@@ -22,9 +29,10 @@ const DRAFT_SEARCH_MS = 5_000;
 const REMEMBERED_DRAFTS = 40;
 
 /** What a sheet is printed from. */
-interface Printable {
+export interface Printable {
   readonly plan: Plan;
   readonly layout: Layout;
+  readonly settings: ShopSettings;
   readonly head: SheetHead;
 }
 
@@ -33,33 +41,65 @@ export interface PrintedSheet {
   readonly fileName: string;
 }
 
-/** Sheets for the shop. None is printed before the independent checker has looked the saw cuts over. */
+/** Sheets of a job. None is printed before the independent checker has looked the saw cuts over. */
 export class SheetService {
   private readonly drafts = new Map<string, NestPlan>();
 
   constructor(
     private readonly db: Knex,
     private readonly nests: NestService,
+    private readonly publicUrl: string,
   ) {}
 
   /**
-   * The cut sheets of a revision, or of the layout as it is now with DRAFT across them.
+   * Sheets of a revision, or of the layout as it is now with DRAFT across them.
    *
    * @param signal - ends the search for a draft's slabs when the caller has gone
-   * @throws ProblemError not_found; plan_refused without slabs, or with cuts that cannot be sawn; busy
+   * @throws ProblemError not_found; plan_refused without slabs where they are needed, with cuts that cannot be sawn, or
+   *   where the job has nothing for these sheets; busy
    */
-  async cutSheet(actor: Actor, jobId: string, query: CutSheetQuery, signal: AbortSignal): Promise<PrintedSheet> {
-    const printable =
-      query.revision === 'draft'
-        ? await this.draft(actor, jobId, signal)
-        : await this.revision(actor, jobId, query.revision);
-    mustBeSawable(printable.plan);
+  async print(
+    actor: Actor,
+    jobId: string,
+    kinds: readonly SheetKind[],
+    query: SheetQuery,
+    signal: AbortSignal,
+  ): Promise<PrintedSheet> {
+    const printable = await this.printable(actor, jobId, query.revision, kinds, signal);
     const { jobNumber, draft, revision } = printable.head;
     const version = query.revision === 'draft' ? 'draft' : `revision-${revision}${draft ? '-draft' : ''}`;
-    return {
-      pdf: cutSheetPdf({ ...printable, paper: query.paper }),
-      fileName: `cut-sheet-${jobNumber}-${version}.pdf`,
-    };
+    const name = kinds.length === 1 ? sheetEntry(kinds[0]!).name.toLowerCase().replaceAll(' ', '-') : 'sheets';
+    const { paper, pages } = query;
+    const prices = may(actor.role, 'price.see');
+    try {
+      return {
+        pdf: sheetPdf({ ...printable, kinds, paper, prices, ...(pages && { only: pages }) }),
+        fileName: `${name}-${jobNumber}-${version}.pdf`,
+      };
+    } catch (error) {
+      if (error instanceof SheetError) throw new ProblemError('plan_refused', error.message);
+      throw error;
+    }
+  }
+
+  /**
+   * What the sheets of a revision or of the draft are drawn from; its slabs, where there are any, can be sawn.
+   *
+   * @throws ProblemError not_found; plan_refused; busy
+   */
+  async printable(
+    actor: Actor,
+    jobId: string,
+    which: number | 'draft',
+    kinds: readonly SheetKind[],
+    signal: AbortSignal,
+  ): Promise<Printable> {
+    const needsSlabs = kinds.every((kind) => sheetEntry(kind).needsSlabs);
+    const printable =
+      which === 'draft' ? await this.draft(actor, jobId, needsSlabs, signal) : await this.revision(actor, jobId, which);
+    if (needsSlabs || printable.plan.nest) mustBeSawable(printable.plan);
+    const qr = qrRows(`${this.publicUrl}/jobs/${jobId}/sheets`);
+    return { ...printable, head: { ...printable.head, qr } };
   }
 
   private revision(actor: Actor, jobId: string, number: number): Promise<Printable> {
@@ -69,6 +109,7 @@ export class SheetService {
       return {
         plan: revision.plan,
         layout: openLayout(revision.doc),
+        settings: completeSettings(revision.settings),
         head: {
           jobNumber: jobNumberText(job.number),
           jobName: revision.jobName,
@@ -83,14 +124,17 @@ export class SheetService {
     });
   }
 
-  private async draft(actor: Actor, jobId: string, signal: AbortSignal): Promise<Printable> {
+  private async draft(actor: Actor, jobId: string, needsSlabs: boolean, signal: AbortSignal): Promise<Printable> {
     const { layout, settings, head } = await inShop(this.db, actor, 'sheet.print', (trx) =>
       readDraft(trx, actor, jobId),
     );
     const { instance } = makePlan({ layout, settings, nest: null });
-    const nest = this.drafts.get(instance.id) ?? (await this.nests.search(layout, settings, DRAFT_SEARCH_MS, signal));
-    this.remember(nest);
-    return { plan: makePlan({ layout, settings, nest }), layout, head };
+    const known = this.drafts.get(instance.id);
+    const search = () => this.nests.search(layout, settings, DRAFT_SEARCH_MS, signal);
+    // A sheet that says nothing of slabs does not wait for a search that may find none.
+    const nest = known ?? (needsSlabs ? await search() : await search().catch(refusedAsNone));
+    if (nest) this.remember(nest);
+    return { plan: makePlan({ layout, settings, nest }), layout, settings, head };
   }
 
   private remember(nest: NestPlan): void {
@@ -99,6 +143,12 @@ export class SheetService {
     const [oldest] = this.drafts.keys();
     if (this.drafts.size > REMEMBERED_DRAFTS && oldest !== undefined) this.drafts.delete(oldest);
   }
+}
+
+/** Pieces that cannot be nested are no reason against the other sheets. */
+function refusedAsNone(error: unknown): null {
+  if (error instanceof ProblemError && error.code === 'plan_refused') return null;
+  throw error;
 }
 
 async function readDraft(trx: Knex.Transaction, actor: Actor, jobId: string) {

@@ -2,8 +2,9 @@ import type { Layout } from '../../core/layout';
 import type { Plan } from '../../plan/types';
 import type { DisplayStep } from '../../tape/format-length';
 import type { Scene, TextRun } from '../display-list';
+import { numberPages, type SheetNumbering, type UnnumberedPage } from '../paper/number-pages';
 import { PageBuilder, styles } from '../paper/page-builder';
-import { addDraft, addFoot, addHeading, footTop, HEAD_BOTTOM, MARGIN } from '../paper/sheet-frame';
+import { addHeading, footTop, HEAD_BOTTOM, MARGIN } from '../paper/sheet-frame';
 import { PAPER_SIZE, type Paper, type SheetHead } from '../paper/sheet-head';
 import { cutMarks } from '../slab/cut-marks';
 import { placeSlab, type PlacedSlab } from '../slab/placed-slab';
@@ -13,12 +14,6 @@ import { addTable, measureSteps, rowsThatFit, tableHeight, type MeasuredStep } f
 import { mapLabels, MOST_ROWS, rowsOf, type MarkLabel } from './mark-labels';
 import { addSide, sideHeight, type SideColumn } from './side-column';
 import { BESIDE_SLAB, LABEL_ROW, SheetSlab } from './sheet-slab';
-
-/** Where these sheets stand in a larger set: sheets before them, and of how many; by themselves when left out. */
-export interface SheetNumbering {
-  readonly before: number;
-  readonly of: number;
-}
 
 /**
  * The cut sheets of all slabs: a landscape page a slab, the table going on behind it where it is long. Marks from the
@@ -54,18 +49,8 @@ function paperPages(plan: Plan, layout: Layout, head: SheetHead, paper: Paper, n
   const drafts = slabs.flatMap((slab) =>
     new CutSheet(slab, layout, head, paper).pages().map((page) => ({ slab: slab.index, ...page })),
   );
-  const { before, of } = numbering ?? { before: 0, of: drafts.length };
-  return drafts.map(({ slab, page, title, alt }, i) => {
-    addFoot(page, head, before + i + 1, of);
-    if (head.draft) addDraft(page);
-    return { slab, scene: page.scene(title, alt) };
-  });
-}
-
-interface UnnumberedPage {
-  readonly page: PageBuilder;
-  readonly title: string;
-  readonly alt: string;
+  const scenes = numberPages(drafts, head, numbering);
+  return drafts.map(({ slab }, i) => ({ slab, scene: scenes[i]! }));
 }
 
 /** Shares of its true depth that the slab is drawn with, tried until table and cautions fit under it. */
@@ -109,7 +94,7 @@ class CutSheet {
     const plan = both(rows) ?? fitting(sideNeeds) ?? plans.at(-1)!;
     const top = plan.bottom + UNDER;
 
-    addHeading(page, this.title, this.about(), this.head);
+    addHeading(page, this.title, this.about(), this.head, 'Slab not to scale.');
     new SheetSlab(page, slab, plan.frame, this.step).draw(plan.top, plan.low);
     const room = foot - top;
     const whole = tableHeight(rows) <= room;
@@ -155,7 +140,7 @@ class CutSheet {
     if (steps.length === 0) return [];
     const page = new PageBuilder(PAPER_SIZE[this.paper]);
     const title = `${this.title}, continued`;
-    addHeading(page, title, [{ text: 'Do these after the cuts of the page before. Never turn the slab.' }], this.head);
+    addHeading(page, title, [{ text: 'Do these after the cuts of the page before. Never turn the slab.' }], this.head, ''); // prettier-ignore
     const columns = { left: MARGIN, width: page.width - 2 * MARGIN };
     const rows = measureSteps(steps, columns, 'roomy');
     const room = footTop(page) - UNDER - HEAD_BOTTOM - 16;

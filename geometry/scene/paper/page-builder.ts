@@ -85,6 +85,14 @@ export class PageBuilder {
     });
   }
 
+  /** A black box without a line. */
+  fill(x: number, y: number, width: number, height: number, place: Place = {}): void {
+    const { layer = 'frame', ...rest } = place;
+    const [left, right, top, low] = [x, x + width, y, y + height];
+    const outline = [this.at(left, low), this.at(right, low), this.at(right, top), this.at(left, top)];
+    this.items.push({ kind: 'polygon', layer, outline, fill: 'ink', ...rest });
+  }
+
   add(...items: readonly DrawItem[]): void {
     this.items.push(...items);
   }

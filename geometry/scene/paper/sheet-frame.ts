@@ -9,6 +9,10 @@ const LOGO = 40;
 const FOOT_HEIGHT = 52;
 const FOOT_BOTTOM = 32;
 const CHECK_BAR = 192;
+/** A phone reads modules of 0.45 mm on paper. */
+const QR = 68;
+/** px that modules overlap, so that no hairline shows between them. */
+const OVERLAP = 0.2;
 
 /** px from the top of the page to the first thing under the heading. */
 export const HEAD_BOTTOM = 99;
@@ -17,14 +21,21 @@ export const HEAD_BOTTOM = 99;
 export const footTop = (page: PageBuilder): number => page.height - FOOT_BOTTOM - FOOT_HEIGHT;
 
 /** The sign, what the sheet is, one line about it, and a bar that shows whether the printer kept the size. */
-export function addHeading(page: PageBuilder, title: string, under: readonly TextRun[], head: SheetHead): void {
+export function addHeading(
+  page: PageBuilder,
+  title: string,
+  under: readonly TextRun[],
+  head: SheetHead,
+  notToScale = 'Drawing not to scale.',
+): void {
   page.add({ kind: 'mark', layer: 'frame', at: page.at(MARGIN + 22, TOP + 26), mark: 'logo', size: LOGO, ink: 'ink' });
   const left = MARGIN + 58;
-  const room = page.width - MARGIN - CHECK_BAR - 40 - left - (head.draft ? 110 : 0);
+  const right = page.width - MARGIN - (head.qr ? QR + 22 : 0);
+  const room = right - CHECK_BAR - 40 - left - (head.draft ? 110 : 0);
   const fitted = fitText(title, styles.title, room, 20);
   page.text(left, TOP + 25, fitted.text, fitted.style, { id: 'title' });
   if (head.draft) {
-    page.text(page.width - MARGIN - CHECK_BAR - 76, TOP + 11, 'DRAFT', styles.heading, {
+    page.text(right - CHECK_BAR - 76, TOP + 11, 'DRAFT', styles.heading, {
       id: 'draft',
       anchor: 'middle',
       middle: true,
@@ -32,12 +43,22 @@ export function addHeading(page: PageBuilder, title: string, under: readonly Tex
       ground: 'card',
     });
   }
-  page.runs(left, TOP + 51, under, styles.body, page.width - MARGIN - left - 320, { id: 'about' });
-  addCheckBar(page);
+  page.runs(left, TOP + 51, under, styles.body, right - left - 320, { id: 'about' });
+  addCheckBar(page, right, notToScale);
+  if (head.qr) addQr(page, head.qr, page.width - MARGIN - QR, TOP - 8);
 }
 
-function addCheckBar(page: PageBuilder): void {
-  const right = page.width - MARGIN;
+/** A QR code, its quiet zone left free around it: dark runs of each row as boxes. */
+export function addQr(page: PageBuilder, rows: readonly string[], x: number, y: number, size = QR): void {
+  const module = size / rows.length;
+  rows.forEach((row, i) => {
+    for (const run of row.matchAll(/1+/g)) {
+      page.fill(x + run.index * module, y + i * module, run[0].length * module + OVERLAP, module + OVERLAP, { id: 'qr' });
+    }
+  });
+}
+
+function addCheckBar(page: PageBuilder, right: number, notToScale: string): void {
   const y = TOP + 16;
   page.line(right - CHECK_BAR, y, right, y, 2);
   for (let i = 0; i <= 4; i++) {
@@ -45,7 +66,10 @@ function addCheckBar(page: PageBuilder): void {
     const half = i % 4 === 0 ? 8 : 4;
     page.line(x, y - half, x, y + half, i % 4 === 0 ? 2 : 1.5);
   }
-  page.text(right, TOP + 46, 'This bar prints 2 in. Slab not to scale.', styles.body, { anchor: 'end', id: 'bar' });
+  page.text(right, TOP + 46, `This bar prints 2 in. ${notToScale}`.trimEnd(), styles.body, {
+    anchor: 'end',
+    id: 'bar',
+  });
 }
 
 /** Job, revision, who drew and signed it, which sheet of how many. */

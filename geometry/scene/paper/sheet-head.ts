@@ -12,6 +12,8 @@ export interface SheetHead {
   readonly draft: boolean;
   /** The job was changed after this revision. */
   readonly changedSince?: number;
+  /** The job's address as a QR code, a text of 0 and 1 for each row from the top; none where there is no address. */
+  readonly qr?: readonly string[];
 }
 
 export type Paper = 'letter' | 'a4';

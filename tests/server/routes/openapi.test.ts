@@ -26,12 +26,12 @@ beforeAll(async () => {
 afterAll(() => server.close());
 
 describe('GET /openapi.json', () => {
-  it('describes every contract, the events and the cut sheet', () => {
+  it('describes every contract, the events and the sheets', () => {
     const operations = Object.values(document.paths).flatMap((path) => Object.values(path));
     const ids = operations.map(({ operationId }) => operationId).sort();
 
     expect(document.openapi).toBe('3.1.0');
-    expect(ids).toEqual([...ALL_CONTRACTS.map(({ name }) => name), 'listen', 'printCutSheet'].sort());
+    expect(ids).toEqual([...ALL_CONTRACTS.map(({ name }) => name), 'listen', 'printSheets'].sort());
   });
 
   it('names every parameter of every path, and no other', () => {

@@ -7,20 +7,21 @@ import { cutMarks, offSquareDeg } from '@/geometry/scene/slab/cut-marks';
 import { placeSlab } from '@/geometry/scene/slab/placed-slab';
 import { formatLength } from '@/geometry/tape/format-length';
 import { parseLength } from '@/geometry/tape/parse-length';
-import { cutSheetPdf } from '@/server/sheets/cut-sheet';
+import { DEFAULT_SETTINGS } from '@/geometry/core/settings';
+import { sheetPdf } from '@/server/sheets/sheet-pdf';
 
 import { alderJob, HEAD, sharedMiterJob, stripsJob } from '../../geometry/scene/alder-job';
 import { poppler, readAll, textLines } from './pdf-reading';
 
 const ROOT = path.join(__dirname, '../../..');
 
-describe('cutSheetPdf', () => {
+describe('the cut sheets as a PDF', () => {
   const job = alderJob();
   let pdf: Buffer;
   let pages: string[][];
 
   beforeAll(async () => {
-    pdf = await readAll(cutSheetPdf({ ...job, head: HEAD, paper: 'letter' }));
+    pdf = await readAll(sheetPdf({ kinds: ['cut'], settings: DEFAULT_SETTINGS, ...job, head: HEAD, paper: 'letter' }));
     pages = textLines(pdf);
   });
 
@@ -32,7 +33,7 @@ describe('cutSheetPdf', () => {
   });
 
   it('comes on A4 as well', async () => {
-    const a4 = await readAll(cutSheetPdf({ ...job, head: HEAD, paper: 'a4' }));
+    const a4 = await readAll(sheetPdf({ kinds: ['cut'], settings: DEFAULT_SETTINGS, ...job, head: HEAD, paper: 'a4' }));
     expect(poppler('pdfinfo', [], a4, false)).toMatch(/Page size:\s+841\.89 x 595\.276 pts/);
   });
 
@@ -88,7 +89,13 @@ describe('cutSheetPdf', () => {
 
   it('says DRAFT on unsigned work', async () => {
     const draft = await readAll(
-      cutSheetPdf({ ...job, head: { ...HEAD, draft: true, signedBy: null }, paper: 'letter' }),
+      sheetPdf({
+        kinds: ['cut'],
+        settings: DEFAULT_SETTINGS,
+        ...job,
+        head: { ...HEAD, draft: true, signedBy: null },
+        paper: 'letter',
+      }),
     );
     for (const lines of textLines(draft))
       expect(lines.filter((line) => line.includes('DRAFT')).length).toBeGreaterThan(0);
@@ -102,25 +109,33 @@ describe('cutSheetPdf', () => {
   });
 
   it('gives other bytes for another revision', async () => {
-    const next = await readAll(cutSheetPdf({ ...job, head: { ...HEAD, revision: 3 }, paper: 'letter' }));
+    const next = await readAll(
+      sheetPdf({ kinds: ['cut'], settings: DEFAULT_SETTINGS, ...job, head: { ...HEAD, revision: 3 }, paper: 'letter' }),
+    );
     expect(next.equals(pdf)).toBe(false);
   });
 
   it('refuses a job whose pieces are not on slabs yet', () => {
     const plan = { ...job.plan, nest: null };
-    expect(() => cutSheetPdf({ ...job, plan, head: HEAD, paper: 'letter' })).toThrow(/no slab plan/);
+    expect(() =>
+      sheetPdf({ kinds: ['cut'], settings: DEFAULT_SETTINGS, ...job, plan, head: HEAD, paper: 'letter' }),
+    ).toThrow(/no slab plan/);
   });
 
   it('takes names of any length and letters beyond ASCII', async () => {
     const head = { ...HEAD, jobName: 'Spülküche Größenwahn, naïve façade '.repeat(9), drawnBy: 'Zoë' };
-    const lines = textLines(await readAll(cutSheetPdf({ ...job, head, paper: 'a4' }))).flat();
+    const lines = textLines(
+      await readAll(sheetPdf({ kinds: ['cut'], settings: DEFAULT_SETTINGS, ...job, head, paper: 'a4' })),
+    ).flat();
     expect(lines.some((line) => line.startsWith('0142 Spülküche Größenwahn') && line.endsWith('…'))).toBe(true);
     expect(lines).toContain('Zoë, Sol');
   });
 
   it('goes on over as many pages as the cuts need', async () => {
     const strips = stripsJob();
-    const many = textLines(await readAll(cutSheetPdf({ ...strips, head: HEAD, paper: 'letter' })));
+    const many = textLines(
+      await readAll(sheetPdf({ kinds: ['cut'], settings: DEFAULT_SETTINGS, ...strips, head: HEAD, paper: 'letter' })),
+    );
     expect(many.filter((lines) => lines[0]!.endsWith('continued')).length).toBeGreaterThan(0);
   });
 });
@@ -128,7 +143,9 @@ describe('cutSheetPdf', () => {
 describe('the marks of a printed sheet alone', () => {
   it('rebuild S and T, which laid together give the corner within 1/32 in', async () => {
     const job = sharedMiterJob();
-    const [page] = textLines(await readAll(cutSheetPdf({ ...job, head: HEAD, paper: 'letter' })));
+    const [page] = textLines(
+      await readAll(sheetPdf({ kinds: ['cut'], settings: DEFAULT_SETTINGS, ...job, head: HEAD, paper: 'letter' })),
+    );
     const marks = marksOf(page!);
     const at = (name: string, edge: 'top' | 'bottom') => marks.find((m) => m.name === name && m.edge === edge)!.inches;
     // Names that stand on one edge only tell their edge themselves; 25 is the depth printed under the title.
