@@ -38,13 +38,15 @@ export type MixAnswer =
 
 /** Share of a cut's need that counts as nothing. */
 const DONE = 1e-9;
+/** A slab worth less than this share of a cut's need counts for this much: its number could else be as good as endless. */
+const LEAST_WORTH = 1e-4;
 
 /** The same cut with amounts as shares of the most that can be needed: amounts in cents may be of any size. */
 function toShares({ worth, need, optionNeed }: MixCut): MixCut {
   const most = need + optionNeed.reduce((sum, o) => sum + Math.max(...o), 0);
   const scale = most > 0 ? 1 / most : 1;
   return {
-    worth: worth.map((w) => w * scale),
+    worth: worth.map((w) => (w > 0 ? Math.max(LEAST_WORTH, w * scale) : 0)),
     need: need * scale,
     optionNeed: optionNeed.map((o) => o.map((n) => n * scale)),
   };
@@ -82,21 +84,23 @@ export function cheapestMix(program: MixProgram, below: number, nodeLimit: numbe
   const stillTooSmall = (): boolean =>
     tooSmall.some((m) => m.picked.every((o, c) => o === picked[c]) && slabs.every((n, s) => n <= m.slabs[s]!));
 
-  /** More of an entry than this changes nothing. */
-  function mostUseful(s: number): number {
+  /** More of an entry than this changes nothing, or costs too much. */
+  function mostUseful(s: number, spent: number): number {
     let most = 0;
     cuts.forEach(({ worth }, k) => {
       if (need[k]! > DONE && worth[s]! > 0) most = Math.max(most, Math.ceil(need[k]! / worth[s]! - 1e-12));
     });
     for (const m of tooSmall) most = Math.max(most, m.slabs[s]! + 1);
     if (atLeast > 0 && prices[s]! > 0) most = Math.max(most, Math.ceil(atLeast / prices[s]!));
-    return Math.min(most, counts[s]!);
+    const affordable = prices[s]! > 0 ? Math.floor((bestCost - spent) / prices[s]!) : Infinity;
+    return Math.min(most, counts[s]!, affordable);
   }
 
   function take(depth: number, spent: number): void {
     const total = least(depth, spent);
+    nodes++;
     if (total >= bestCost) return;
-    if (++nodes > nodeLimit) {
+    if (nodes > nodeLimit) {
       open = Math.min(open, total);
       return;
     }
@@ -107,7 +111,7 @@ export function cheapestMix(program: MixProgram, below: number, nodeLimit: numbe
     }
     if (depth === order.length) return;
     const s = order[depth]!;
-    for (let n = mostUseful(s); n >= 0; n--) {
+    for (let n = mostUseful(s, spent); n >= 0; n--) {
       slabs[s] = n;
       cuts.forEach((cut, k) => (need[k]! -= n * cut.worth[s]!));
       take(depth + 1, spent + n * prices[s]!);

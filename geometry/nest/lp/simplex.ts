@@ -26,6 +26,8 @@ const PIVOT = 1e-9;
 /** Pivots between two fresh inversions of the basis, and without progress before the safest rule takes over. */
 const REFRESH = 120;
 const STALL = 60;
+/** Pivots that go on without progress, for each row, before the answer is taken as it is: rounding can hide that it is best. */
+const MOST_STALLED = 20;
 
 /**
  * Minimises a linear program over columns that arrive in batches (primal revised simplex with a dense basis inverse; rows
@@ -76,8 +78,8 @@ export class LinearProgram {
       if (this.sinceRefresh >= REFRESH) this.refresh();
       this.findDuals();
       const entering = this.findEntering(stalled > STALL);
-      if (entering < 0) break;
-      const leaving = this.findLeaving(this.columns[entering]!);
+      if (entering < 0 || stalled > STALL + MOST_STALLED * this.m) break;
+      const leaving = this.findLeaving(this.columns[entering]!, stalled > STALL);
       if (leaving < 0) throw new RangeError('the linear program has no least value');
       this.pivot(leaving, entering);
       const objective = this.cost();
@@ -122,8 +124,9 @@ export class LinearProgram {
     return best;
   }
 
-  private findLeaving({ rows, factors }: Column): number {
-    const { m, inverse, values, step } = this;
+  /** The row with the least ratio; of equal ones the safest pivot, or (Bland's rule, which never runs in circles) the first column. */
+  private findLeaving({ rows, factors }: Column, first: boolean): number {
+    const { m, inverse, values, step, basis } = this;
     let best = -1;
     let least = Infinity;
     for (let i = 0; i < m; i++) {
@@ -132,7 +135,8 @@ export class LinearProgram {
       step[i] = sum;
       if (sum <= PIVOT) continue;
       const ratio = values[i]! / sum;
-      if (ratio < least - 1e-12 || (ratio <= least + 1e-12 && best >= 0 && sum > step[best]!)) {
+      const isBetter = (): boolean => (first ? basis[i]! < basis[best]! : sum > step[best]!);
+      if (ratio < least - 1e-12 || (ratio <= least + 1e-12 && best >= 0 && isBetter())) {
         least = Math.min(least, ratio);
         best = i;
       }

@@ -91,6 +91,7 @@ export function coverExactly(
     if (!next) {
       const end = finish(chosen, left, slabs);
       if (end === 'unknown') open = true;
+      out ||= spend(0);
       return end === 'packed';
     }
     for (const r of next.options) {
