@@ -32,6 +32,8 @@ export interface Layout {
   readonly letters: Readonly<Record<string, string>>;
   /** Findings a designer or owner accepted, by finding key, with the reason typed. */
   readonly accepted: Readonly<Record<string, AcceptedFinding>>;
+  /** What somebody changed in the generated order of work; missing while nobody did. */
+  readonly work?: WorkPlan;
 }
 
 export type Units = 'in' | 'mm';
@@ -321,6 +323,42 @@ export interface AcceptedFinding {
   readonly reason: string;
   readonly by: string;
   readonly at: string;
+  /** The finding's sentence when it was accepted: with another number in it, it is open again. */
+  readonly text?: string;
+}
+
+/** Changes to the order of work, which is generated anew from every layout. */
+export interface WorkPlan {
+  /** First day of the work, YYYY-MM-DD. */
+  readonly start?: string;
+  /** Days of the week on which it is worked at, 0 Sunday to 6 Saturday, and hours a day. */
+  readonly workDays?: readonly number[];
+  readonly hoursPerDay?: number;
+  readonly changes: readonly StepChange[];
+  readonly added: readonly AddedStep[];
+  /** Steps by name or id as somebody put them; those that came since stand where the generated order has them. */
+  readonly order: readonly string[];
+}
+
+export interface StepChange {
+  /** Name of the generated step. */
+  readonly id: string;
+  readonly text?: string;
+  readonly caution?: string;
+  readonly hours?: number;
+  /** Why the step is left out. */
+  readonly skipped?: string;
+}
+
+/** A step that somebody added. */
+export interface AddedStep {
+  readonly id: string;
+  readonly text: string;
+  readonly part: 'shop' | 'site';
+  readonly hours: number;
+  readonly caution?: string;
+  /** Step before which it was added; at the end of its part when missing or gone. */
+  readonly before?: string;
 }
 
 const LABELS = 'ABCDEFGHIJKLMN';
