@@ -4,13 +4,14 @@ import { StyleSheet, View } from 'react-native';
 import type { Finding } from '@/geometry/findings/types';
 import { useMay, useSession } from '../api/use-session';
 import { useOpenJob } from '../editor/JobProvider';
+import { LengthWords } from '../measure/LengthWords';
 import { Button } from '../ui/Button';
 import { Dialog } from '../ui/Dialog';
 import { Field } from '../ui/Field';
 import { FindingRow, severityLooks } from '../ui/FindingRow';
 import { Icon } from '../ui/Icon';
 import { Text } from '../ui/Text';
-import { space } from '../ui/tokens';
+import { space, typeRoles } from '../ui/tokens';
 
 export interface FindingsListProps {
   /** Those to show; all of the plan when left out. */
@@ -45,8 +46,8 @@ export function FindingsList({ findings: some, onZoom }: FindingsListProps) {
           <View key={finding.key} role="listitem">
             <FindingRow
               severity={finding.severity}
-              fact={finding.text}
-              act={finding.action}
+              fact={<LengthWords text={finding.text} size={typeRoles.strong.size} bold />}
+              act={<LengthWords text={finding.action} size={typeRoles.second.size} tone="ink2" />}
               pieces={finding.at.pieces}
               accepted={accepted && { by: accepted.by, reason: accepted.reason }}
               onPress={() => onZoom(finding)}

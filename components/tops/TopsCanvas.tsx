@@ -54,8 +54,8 @@ export function TopsCanvas(props: TopsCanvasProps) {
   const layout: Layout = before?.layout ?? layoutNow;
   const handles = mayEdit && !before;
   const scene = useMemo(
-    () => topsScene(drawn, layout, { layers, selected, lit, handles }),
-    [drawn, layout, layers, selected, lit, handles],
+    () => topsScene(drawn, layout, { layers, selected, lit, handles, jointSizes: wide }),
+    [drawn, layout, layers, selected, lit, handles, wide],
   );
   const targets = useMemo(() => topsTargets(drawn, layout, scene), [drawn, layout, scene]);
   const drag = useTopsDrag();

@@ -52,8 +52,9 @@ export function TopsTools({ view, floating }: { readonly view: TopsView; readonl
 }
 
 const styles = StyleSheet.create({
-  tools: { flexDirection: 'row', flexWrap: 'wrap', gap: space.s },
+  tools: { flexDirection: 'row', flexWrap: 'wrap', gap: space.xs },
   bar: {
+    gap: space.s,
     padding: 6,
     borderWidth: 1,
     borderColor: color.line,

@@ -2,6 +2,7 @@ import type { Point, Polygon } from '../../core/point';
 import { contains } from '../../core/polygon';
 import { along, distance, dot, leftNormal, unit } from '../../core/vector';
 import type { DrawItem, Scene, Shift } from '../display-list';
+import { WALL_THICKNESS } from '../room/wall-bodies';
 import { bladeSize, boxOf, cornersOf, overlap, toPx, wordsSize, type LabelBox } from './label-box';
 
 type Of<K extends DrawItem['kind']> = Extract<DrawItem, { kind: K }>;
@@ -164,8 +165,14 @@ class Placer {
     );
     const [a, b] = body?.kind === 'polygon' ? body.outline : [];
     const way = (a && b && unit(a, b)) ?? [1, 0];
+    // Out of the room, where the wall is drawn too thin to hold it.
+    const thick = WALL_THICKNESS * this.k;
+    const { height } = this.textBox(item);
+    const out = thick < height ? (thick + height) / 2 : 0;
+    const outward = leftNormal(way);
     const places = [0, 30, -30, 60, -60].map((px): Placed => {
-      const moved: Of<'text'> = px === 0 ? item : { ...item, shift: [way[0] * px, way[1] * px] };
+      const shift: Shift = [way[0] * px + outward[0] * out, way[1] * px + outward[1] * out];
+      const moved: Of<'text'> = px === 0 && out === 0 ? item : { ...item, shift };
       return { item: moved, box: this.textBox(moved) };
     });
     this.choose(item, places);

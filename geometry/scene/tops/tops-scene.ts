@@ -28,6 +28,8 @@ export interface TopsSceneOptions {
   readonly lit?: readonly string[];
   /** Seams can be slid: each has its handle and a blade with what stays visible. */
   readonly handles?: boolean;
+  /** Each joint has a blade with its length, whether sizes are shown or not. */
+  readonly jointSizes?: boolean;
 }
 
 const LAYERS: TopsLayers = { grain: true, sizes: false, hardware: false, walls: true };
@@ -56,7 +58,7 @@ export function topsScene(plan: Plan, layout: Layout, options: TopsSceneOptions 
     ...(layers.hardware ? joints.flatMap(drawConnectors) : []),
     ...pieces.flatMap((piece) => drawLetter(piece, layers.grain && !layers.sizes)),
     ...(layers.sizes ? pieces.flatMap((piece) => drawSizes(piece, layout)) : []),
-    ...(layers.sizes ? joints.flatMap((joint) => drawJointSize(joint, layout)) : []),
+    ...(layers.sizes || options.jointSizes ? joints.flatMap((joint) => drawJointSize(joint, layout)) : []),
     ...seams.flatMap((seam) =>
       options.handles || chosen(`seam ${seamName(seam)}`) ? drawSeamHandle(seam, layout) : [],
     ),
