@@ -25,6 +25,7 @@ import { revisionRoutes } from './routes/revision-routes';
 import { sheetRoutes } from './routes/sheet-routes';
 import { shopRoutes } from './routes/shop-routes';
 import { stockRoutes } from './routes/stock-routes';
+import { workRoutes } from './routes/work-routes';
 import { createAccessTokens } from './services/access-tokens';
 import { AuthService } from './services/auth-service';
 import { CrewService } from './services/crew-service';
@@ -41,6 +42,7 @@ import { RevisionService } from './services/revision-service';
 import { SheetService } from './services/sheet-service';
 import { ShopService } from './services/shop-service';
 import { StockService } from './services/stock-service';
+import { WorkService } from './services/work-service';
 import { NestPool } from './work/nest-pool';
 
 /** A layout with 60 walls, 300 notes and 800 pieces of stock stays well under this. */
@@ -90,6 +92,7 @@ function api(config: Config, db: Knex, log: Logger): Router {
     sheetRoutes(new SheetService(db, nests, config.publicUrl)),
     stockRoutes(new StockService(db)),
     rackRoutes(new RackService(db)),
+    workRoutes(new WorkService(db)),
     eventRoutes(new EventHub(db)),
   );
   route(router, getHealth, 200, () => checkHealth(db));

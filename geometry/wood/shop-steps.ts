@@ -75,6 +75,7 @@ function glueUp({ settings, layout }: Job, joint: TopJoint): Draft {
     pieces: joint.letters,
     tools: [`${clamps} clamps`, 'clamping blocks', 'clock'],
     consumables: [`wood glue, about ${ounces.toFixed(1)} fl oz`],
+    clock: { openMinutes: GLUE_OPEN_MINUTES.value, cureHours },
     caution: `${GLUE_OPEN_MINUTES.value} minutes from the first glue to the last clamp. ${clampHours} h in clamps, no load for ${cureHours} h.`,
   };
 }

@@ -5,7 +5,7 @@ import { BETWEEN_GRIT } from './sanding';
 import { chooseScrew } from './screws';
 import { assembledSections } from './sections';
 import { cutOpenings } from './shop-steps';
-import { EFFORT } from './work-effort';
+import { EFFORT, GLUE_OPEN_MINUTES } from './work-effort';
 import type { Draft, Job, Stage } from './work-job';
 
 export function setOnSite(job: Job): readonly Stage[] {
@@ -79,6 +79,7 @@ export function closeOnSite({ settings, tops, siteJoints, cutLater }: Job): read
     pieces: letters,
     tools: [...tools, 'straight-edge', 'clock'],
     consumables: ['wood glue'],
+    clock: { openMinutes: GLUE_OPEN_MINUTES.value, cureHours },
     caution: `${how} Flush the faces first, then draw tight. ${cureHours} h before any load or cut.`,
   }));
   return [closes, cutLater.length > 0 ? [cutOpenings(cutLater, 'site')] : []];

@@ -45,4 +45,6 @@ export interface Step {
   readonly tools: readonly string[];
   readonly consumables: readonly string[];
   readonly caution?: string;
+  /** A glue-up: minutes from the first glue to the last clamp, and hours from then to any load or cut. */
+  readonly clock?: { readonly openMinutes: number; readonly cureHours: number };
 }

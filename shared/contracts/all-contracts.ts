@@ -10,6 +10,7 @@ import * as rack from './rack';
 import * as revisions from './revisions';
 import * as shop from './shop';
 import * as stock from './stock';
+import * as work from './work';
 
 export interface NamedContract {
   /** As exported: `signIn`, `postEdits` … */
@@ -19,7 +20,7 @@ export interface NamedContract {
   readonly contract: Contract;
 }
 
-const RESOURCES = { health, auth, crew, shop, jobs, layouts, jobFiles, nest, revisions, stock, rack };
+const RESOURCES = { health, auth, crew, shop, jobs, layouts, jobFiles, nest, revisions, stock, rack, work };
 
 /** Every contract there is, for the API document and for tests that go through all of them. */
 export const ALL_CONTRACTS: readonly NamedContract[] = Object.entries(RESOURCES).flatMap(([resource, exported]) =>

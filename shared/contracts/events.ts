@@ -7,6 +7,7 @@ export const shopEventSchema = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('layout'), jobId: uuid, layoutId: uuid, seq: z.number().int() }),
   z.strictObject({ kind: z.literal('job'), jobId: uuid }),
   z.strictObject({ kind: z.literal('revision'), jobId: uuid, number: z.number().int() }),
+  z.strictObject({ kind: z.literal('work'), jobId: uuid }),
   z.strictObject({ kind: z.literal('stock') }),
   z.strictObject({ kind: z.literal('rack') }),
   z.strictObject({ kind: z.literal('crew') }),

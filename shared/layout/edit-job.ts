@@ -3,6 +3,7 @@ import { z } from 'zod';
 import type { JointChoice, Layout } from '@/geometry/core/layout';
 import type { Draft } from 'immer';
 import { EditRefused, find } from './edit-refused';
+import { applyWorkEdit, workEditSchema } from './edit-work';
 import {
   acceptedFindingSchema,
   baseSchema,
@@ -117,6 +118,7 @@ export const jobEditSchema = z.discriminatedUnion('kind', [
     finding: z.string().min(1).max(200),
     accepted: acceptedFindingSchema.nullable(),
   }),
+  ...workEditSchema.options,
   z.strictObject({ id: uuid, kind: z.literal('replaceLayout'), layout: layoutSchema }),
 ]);
 
@@ -228,6 +230,12 @@ export function applyJobEdit(draft: Draft<Layout>, edit: JobEdit): void {
       if (edit.accepted) draft.accepted[edit.finding] = edit.accepted;
       else delete draft.accepted[edit.finding];
       return;
+    case 'setWork':
+    case 'changeStep':
+    case 'addStep':
+    case 'removeStep':
+    case 'orderSteps':
+      return applyWorkEdit(draft, edit);
     case 'replaceLayout':
       Object.assign(draft, edit.layout);
       return;

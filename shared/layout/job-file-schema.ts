@@ -2,7 +2,7 @@ import { z } from 'zod';
 
 import type { LengthUnit } from '@/geometry/tape/parse-length';
 import { alongIn, fileUnitsSchema, lengthIn } from './file-length';
-import { acceptedFindingSchema, climateYearSchema, finishSchema } from './layout-schema';
+import { acceptedFindingSchema, climateYearSchema, finishSchema, workPlanSchema } from './layout-schema';
 import { roomBlockSchema } from './room-schema';
 
 const id = z.string().min(1).max(40);
@@ -175,6 +175,7 @@ export function jobFileSchema(units: LengthUnit) {
       .optional(),
     letters: z.record(z.string().max(60), z.string().max(6)).optional(),
     accepted: z.record(z.string().max(200), acceptedFindingSchema).optional(),
+    work: workPlanSchema.optional(),
   });
 }
 

@@ -228,6 +228,38 @@ export const acceptedFindingSchema = z.strictObject({
   reason: z.string().min(1).max(2000),
   by: z.string().max(80),
   at: z.string().max(40),
+  text: z.string().max(1000).optional(),
+});
+
+const stepName = z.string().min(1).max(200);
+const stepText = z.string().trim().min(1).max(200);
+const caution = z.string().trim().max(1000);
+const workHours = z.number().min(0).max(500);
+
+export const stepChangeSchema = z.strictObject({
+  id: stepName,
+  text: stepText.optional(),
+  caution: caution.optional(),
+  hours: workHours.optional(),
+  skipped: z.string().trim().min(1).max(500).optional(),
+});
+
+export const addedStepSchema = z.strictObject({
+  id,
+  text: stepText,
+  part: z.enum(['shop', 'site']),
+  hours: workHours,
+  caution: caution.optional(),
+  before: stepName.optional(),
+});
+
+export const workPlanSchema = z.strictObject({
+  start: z.iso.date().optional(),
+  workDays: z.array(z.number().int().min(0).max(6)).min(1).max(7).readonly().optional(),
+  hoursPerDay: z.number().min(1).max(16).optional(),
+  changes: z.array(stepChangeSchema).max(300).readonly(),
+  added: z.array(addedStepSchema).max(100).readonly(),
+  order: z.array(stepName).max(400).readonly(),
 });
 
 /** The stored document. Unknown keys are refused by name. */
@@ -255,4 +287,5 @@ export const layoutSchema = z.strictObject({
   notes: z.array(placedNoteSchema).max(300).readonly(),
   letters: z.record(z.string().max(60), z.string().max(6)),
   accepted: z.record(z.string().max(200), acceptedFindingSchema),
+  work: workPlanSchema.optional(),
 }) satisfies z.ZodType<Layout>;

@@ -98,6 +98,7 @@ function fillIn(file: JobFile, settings: ShopSettings, metric: boolean): Layout 
     notes: file.notes ?? [],
     letters: file.letters ?? {},
     accepted: file.accepted ?? {},
+    ...(file.work && { work: file.work }),
   };
 }
 

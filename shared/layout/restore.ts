@@ -43,6 +43,9 @@ function nameOf(item: unknown): string | null {
 
 const named = (list: readonly unknown[]): boolean => list.every((item) => nameOf(item) !== null);
 
+/** Sections whose fields are kept one by one. */
+const BY_FIELD: ReadonlySet<string> = new Set(['room', 'letters', 'accepted', 'work']);
+
 /** All that differs between two versions of a layout, as named items. */
 export function changesBetween(before: Layout, after: Layout): Change[] {
   return compare(before as unknown as Record<string, unknown>, after as unknown as Record<string, unknown>, []);
@@ -56,7 +59,7 @@ function compare(before: Record<string, unknown>, after: Record<string, unknown>
     if (a === b) continue;
     if (Array.isArray(a) && Array.isArray(b) && (named(a) || a.length === 0) && (named(b) || b.length === 0))
       changes.push(...compareLists(a, b, [...path, key]));
-    else if (path.length === 0 && (key === 'room' || key === 'letters' || key === 'accepted'))
+    else if (path.length === 0 && BY_FIELD.has(key) && a !== undefined && b !== undefined)
       changes.push(...compare(a as Record<string, unknown>, b as Record<string, unknown>, [key]));
     else changes.push({ path: [...path, key], before: a, after: b });
   }

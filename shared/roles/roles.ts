@@ -20,6 +20,7 @@ export const PERMISSIONS = {
   'revision.freeze': ['owner', 'designer', 'installer'],
   'revision.sign': ['owner', 'designer'],
   'sheet.print': EVERYBODY,
+  'work.tick': EVERYBODY,
   'cutting.mark': ['owner', 'shop_hand'],
   'rack.see': EVERYBODY,
   'rack.edit': ['owner', 'shop_hand'],

@@ -49,6 +49,7 @@ export async function addOneOfEverything(db: Knex, shop: TestShop): Promise<Read
   const link = { token_hash: someHash(), expires_at: soon, person_id: by };
   await add('share_links', { revision_id: revisionId, ...link });
   const asked = { email: 'new@ferry-steps.example', role: 'installer', token_hash: someHash(), expires_at: soon };
+  await add('work_acts', { job_id: jobId, step: 'Load', act: 'done', acted_at: new Date(), person_id: by });
   await add('invitations', { ...asked, invited_by: by });
   await add('outbox', { kind: 'reset', to_address: 'a@b.example', subject: 'Hello', body: 'Hello' });
   await add('audit_log', { person_id: by, job_id: jobId, action: 'job.created' });

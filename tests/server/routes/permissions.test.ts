@@ -45,6 +45,7 @@ const BODIES: Readonly<Record<string, () => object>> = {
   createStock: () => ({ ...SLAB, code: randomUUID(), priceCents: 1 }),
   updateStock: () => ({ count: 1 }),
   createRackPiece: () => SLAB,
+  postWork: () => ({ sentAt: new Date().toISOString(), acts: [] }),
 };
 
 type Ids = Readonly<Record<string, string>>;
