@@ -1,6 +1,13 @@
+import { customerPages } from './customer/customer-pages';
 import { cutSheetPages } from './cut-sheet/cut-sheet-scene';
+import { jointPages } from './joint-sheet/joint-pages';
 import type { Scene } from './display-list';
+import { finishPages } from './finish-sheet/finish-pages';
+import { fitPages } from './fit-sheet/fit-pages';
+import { labelPages } from './labels/label-pages';
+import { orderPages } from './order-sheet/order-pages';
 import type { SheetPages, SheetRequest } from './paper/sheet-request';
+import { templatePages } from './templates/template-pages';
 
 /** A kind of sheet: what it is called, for whom, and how its pages are made. */
 export interface SheetKindEntry {
@@ -21,6 +28,13 @@ export const SHEETS = {
     needsSlabs: true,
     pages: ({ plan, layout, head, paper, numbering }) => cutSheetPages(plan, layout, head, paper, numbering),
   },
+  joint: { name: 'Joint sheet', reader: 'for the bench', needsSlabs: false, pages: jointPages },
+  fit: { name: 'Fit sheet', reader: 'for the house', needsSlabs: false, pages: fitPages },
+  order: { name: 'Order sheet', reader: 'for the buyer', needsSlabs: false, pages: orderPages },
+  finish: { name: 'Finish sheet', reader: 'for the finishing bench', needsSlabs: false, pages: finishPages },
+  templates: { name: 'Template', reader: 'for the bench, at full size', needsSlabs: false, pages: templatePages },
+  labels: { name: 'Label', reader: 'for pieces and offcuts', needsSlabs: false, pages: labelPages },
+  customer: { name: 'Customer page', reader: 'for the customer', needsSlabs: false, pages: customerPages },
 } as const satisfies Readonly<Record<string, SheetKindEntry>>;
 
 export type SheetKind = keyof typeof SHEETS;

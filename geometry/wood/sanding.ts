@@ -13,3 +13,8 @@ export function sandingGrits(finish: Finish): readonly number[] {
   const last = finish.kind === 'film' ? LAST_GRITS[0].value : LAST_GRITS[1].value;
   return [FIRST_GRIT.value, 120, 150, 180, 220].filter((grit) => grit <= last);
 }
+
+export const DISC_AREA = constant('Surface one 6 in sanding disc does with one grit', 10, 'sq ft', 'from memory', '');
+
+/** Discs of one grit for a surface, square feet; never none. */
+export const discsFor = (sqFt: number): number => Math.max(1, Math.ceil(sqFt / DISC_AREA.value - 1e-9));

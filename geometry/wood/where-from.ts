@@ -5,7 +5,7 @@ import { BOLT_SPACING, FIRST_BOLT } from './drawbolts';
 import { LOAD_CONSTANT, LONG_PIECE, TEAM_FACTORS } from './hands';
 import { BACKSPLASH_HEIGHT, LEDGER_MOST, LEVEL_LIMIT, SPAN_LIMIT } from './level-support';
 import { DEFLECTION_SHARE, EDGE_LOAD, STRIP_WIDTH } from './overhang';
-import { BETWEEN_GRIT, FIRST_GRIT, LAST_GRITS } from './sanding';
+import { BETWEEN_GRIT, DISC_AREA, FIRST_GRIT, LAST_GRITS } from './sanding';
 import { SETTING_SOURCES } from './setting-sources';
 import type { Sourced, SourcedConstant, Standing } from './sourced';
 import { SPECIES, type Species } from './species';
@@ -68,6 +68,7 @@ export const WOOD_CONSTANTS: readonly SourcedConstant[] = [
   FIRST_GRIT,
   ...LAST_GRITS,
   BETWEEN_GRIT,
+  DISC_AREA,
   ...Object.values(EFFORT),
   GLUE_OPEN_MINUTES,
   CLAMPS_APART,

@@ -5,6 +5,7 @@ import type { NestPlan } from '@/geometry/nest/types';
 import { makePlan } from '@/geometry/plan/make-plan';
 import type { Plan } from '@/geometry/plan/types';
 import type { Layout } from '@/geometry/core/layout';
+import { usualGrid } from '@/geometry/scene/labels/label-grids';
 import type { SheetHead } from '@/geometry/scene/paper/sheet-head';
 import { sheetEntry, type SheetKind } from '@/geometry/scene/sheet-kinds';
 import type { SheetQuery } from '@/shared/contracts/sheets';
@@ -69,11 +70,12 @@ export class SheetService {
     const { jobNumber, draft, revision } = printable.head;
     const version = query.revision === 'draft' ? 'draft' : `revision-${revision}${draft ? '-draft' : ''}`;
     const name = kinds.length === 1 ? sheetEntry(kinds[0]!).name.toLowerCase().replaceAll(' ', '-') : 'sheets';
-    const { paper, pages } = query;
+    const { paper, pages, grid, start } = query;
+    const labels = { grid: grid ?? usualGrid(paper), start };
     const prices = may(actor.role, 'price.see');
     try {
       return {
-        pdf: sheetPdf({ ...printable, kinds, paper, prices, ...(pages && { only: pages }) }),
+        pdf: sheetPdf({ ...printable, kinds, paper, prices, labels, ...(pages && { only: pages }) }),
         fileName: `${name}-${jobNumber}-${version}.pdf`,
       };
     } catch (error) {

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 
+import { LABEL_GRID_KEYS } from '@/geometry/scene/labels/label-grids';
 import { SHEET_KINDS, type SheetKind } from '@/geometry/scene/sheet-kinds';
 import { uuid } from './fields';
 
@@ -34,6 +35,9 @@ export const sheetQuery = z.strictObject({
   revision: z.union([z.literal('draft'), z.coerce.number().int().positive()]),
   paper: z.enum(['letter', 'a4']).default('letter'),
   pages: pageList.optional(),
+  /** Labels only: the sheet of labels in the printer, and the first free label on it, counted from 1 along the rows. */
+  grid: z.enum(LABEL_GRID_KEYS).optional(),
+  start: z.coerce.number().int().min(1).max(100).default(1),
 });
 
 export type SheetQuery = z.infer<typeof sheetQuery>;

@@ -7,6 +7,7 @@ import { PageBuilder, styles } from '../paper/page-builder';
 import { addHeading, footTop, HEAD_BOTTOM, MARGIN } from '../paper/sheet-frame';
 import { PAPER_SIZE, type Paper, type SheetHead } from '../paper/sheet-head';
 import { cutMarks } from '../slab/cut-marks';
+import { keptOffcuts } from '../slab/offcut-labels';
 import { placeSlab, type PlacedSlab } from '../slab/placed-slab';
 import { cutCautions } from './cautions';
 import { cutSteps, listed, type CutStep } from './cut-steps';
@@ -165,9 +166,7 @@ class CutSheet {
   }
 
   private offcutLabels(): string[] {
-    const kept = this.slab.offcuts.filter((offcut) => offcut.keep);
-    const name = `${this.head.jobNumber}-${this.slab.index + 1}`;
-    return kept.map((_, i) => (kept.length > 1 ? `${name}${String.fromCharCode(97 + i)}` : name));
+    return keptOffcuts(this.slab, this.head.jobNumber).map(({ label }) => label);
   }
 
   private alt(): string {

@@ -53,7 +53,9 @@ export function addQr(page: PageBuilder, rows: readonly string[], x: number, y: 
   const module = size / rows.length;
   rows.forEach((row, i) => {
     for (const run of row.matchAll(/1+/g)) {
-      page.fill(x + run.index * module, y + i * module, run[0].length * module + OVERLAP, module + OVERLAP, { id: 'qr' });
+      page.fill(x + run.index * module, y + i * module, run[0].length * module + OVERLAP, module + OVERLAP, {
+        id: 'qr',
+      });
     }
   });
 }

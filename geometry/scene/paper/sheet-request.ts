@@ -2,6 +2,7 @@ import type { Layout } from '../../core/layout';
 import type { ShopSettings } from '../../core/settings';
 import type { Plan } from '../../plan/types';
 import type { Scene } from '../display-list';
+import type { LabelChoice } from '../labels/label-grids';
 import type { SheetNumbering } from './number-pages';
 import type { Paper, SheetHead } from './sheet-head';
 
@@ -14,6 +15,8 @@ export interface SheetRequest {
   readonly paper: Paper;
   /** Whoever reads it may see what things cost. */
   readonly prices?: boolean;
+  /** How labels are printed; the paper's usual grid when left out. */
+  readonly labels?: LabelChoice;
   /** Where these sheets stand in a larger set. */
   readonly numbering?: SheetNumbering;
 }

@@ -41,7 +41,7 @@ describe.each(jobs)('DXF of %s, read back by another package', (_name, make) => 
     for (const shape of [...tops.shapes, ...pieces.shapes]) {
       expect(shape.closed).toBe(['PIECES', 'CUTOUTS'].includes(shape.layer));
     }
-    expect(tops.texts.sort()).toEqual(plan.pieces.map((piece) => piece.letter).sort());
+    expect([...tops.texts].sort()).toEqual(plan.pieces.map((piece) => piece.letter).sort());
   });
 
   it('gives each piece the area of the plan less its round corners, in the room and on the slab', () => {
