@@ -1,5 +1,6 @@
 import { StyleSheet, View } from 'react-native';
 
+import { roundLength } from '@/geometry/tape/format-length';
 import { inches as say } from '@/geometry/top/sentence';
 import { useOpenJob } from '../editor/JobProvider';
 import { Text } from '../ui/Text';
@@ -18,14 +19,14 @@ export function ScribePanel({ run }: { readonly run: string }) {
         Against the bowed wall
       </Text>
       <Text kind="small">
-        {scribe.takeOff > 0
+        {roundLength(scribe.takeOff, step) > 0
           ? `Take up to ${size(scribe.takeOff)} off the back edge; the top moves back ${size(scribe.shift)} and keeps ${size(scribe.depthLeft)} of depth.`
           : `Nothing to scribe: the widest gap is ${size(scribe.largestGap)}, the backsplash covers ${size(fixing.backsplash)}.`}
       </Text>
       <View role="table" aria-label="Gap and scribe at every station">
         <Row header cells={['Along', 'Gap', 'Take off']} />
         {scribe.stations.map(({ at, gap, takeOff }) => (
-          <Row key={at} cells={[size(at), size(gap), takeOff > 0 ? size(takeOff) : 'nothing']} />
+          <Row key={at} cells={[size(at), size(gap), roundLength(takeOff, step) > 0 ? size(takeOff) : 'nothing']} />
         ))}
       </View>
     </View>

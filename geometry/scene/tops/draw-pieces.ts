@@ -6,7 +6,7 @@ import type { PlacedCutout, Piece } from '../../top/types';
 import type { DrawItem, Stroke } from '../display-list';
 import { woodLook } from '../primitives/wood-look';
 import { text } from '../room/scene-styles';
-import { widestGap } from '../slab/widest-gap';
+import { letterPlace } from './letter-place';
 
 /** px: letter's disc, grain arrow and its distance from the letter. */
 const LETTER = 42;
@@ -91,13 +91,10 @@ function outside({ from, to }: Segment, hole: Polygon): Segment[] {
   ];
 }
 
-/** Letter on a disc where the piece is widest beside its cutouts, and an arrow along the grain next to it. */
+/** Letter on a disc where the piece has room beside its cutouts, and an arrow along the grain next to it. */
 export function drawLetter(piece: Piece, grain: boolean): DrawItem[] {
-  const middle = piece.depth / 2;
-  const gap = widestGap(piece.shape, piece.cutouts.map((c) => c.outline), [middle * 0.7, middle, middle * 1.3]); // prettier-ignore
-  const whole = widestGap(piece.shape, [], [middle]);
-  const { from, to } = gap.to > gap.from ? gap : whole;
-  const at = toRoom(piece, [(from + to) / 2, middle]);
+  const holes = piece.cutouts.map((cutout) => cutout.outline);
+  const at = toRoom(piece, letterPlace(piece.shape, holes, piece.depth));
   const tag = { layer: 'letters', id: piece.letter } as const;
   const narrow = piece.depth < NARROW;
   const size = narrow ? SMALL_LETTER : LETTER;

@@ -4,6 +4,7 @@ import { along, distance, dot, leftNormal, unit } from '../../core/vector';
 import type { DrawItem, Scene, Shift } from '../display-list';
 import { WALL_THICKNESS } from '../room/wall-bodies';
 import { bladeSize, boxOf, cornersOf, overlap, toPx, wordsSize, type LabelBox } from './label-box';
+import { roomAt } from './letter-place';
 
 type Of<K extends DrawItem['kind']> = Extract<DrawItem, { kind: K }>;
 
@@ -13,8 +14,9 @@ interface Placed<T extends DrawItem = DrawItem> {
   readonly box: LabelBox;
 }
 
-/** Share of a piece's depth on the screen that its letter may take, and the least a letter can be, px. */
+/** Shares of a piece's width, and of the room round its place, that a letter may take; the least a letter can be, px. */
 const LETTER_SHARE = 0.62;
+const ROOM_SHARE = 0.9;
 const LEAST_LETTER = 20;
 /** px between a disc and an arrow beside it. */
 const BESIDE = 8;
@@ -147,13 +149,17 @@ class Placer {
     };
   }
 
-  /** A letter's disc is never wider than its piece allows. */
+  /** A letter's disc is never wider than its piece allows where it stands. */
   private letters(): void {
+    const holes = this.items.flatMap((item) =>
+      item.kind === 'polygon' && item.layer === 'cutouts' ? [item.outline] : [],
+    );
     for (const item of this.items) {
       if (item.kind !== 'mark' || item.mark !== 'disc' || item.layer !== 'letters') continue;
       const outline = item.id ? this.outlines.get(item.id) : undefined;
-      const room = outline ? leastWidth(outline) * this.k * LETTER_SHARE : item.size;
-      const size = Math.max(Math.min(item.size, room), LEAST_LETTER);
+      const across = outline ? leastWidth(outline) * LETTER_SHARE : Infinity;
+      const around = outline ? roomAt(item.at, outline, holes) * 2 * ROOM_SHARE : Infinity;
+      const size = Math.max(Math.min(item.size, Math.min(across, around) * this.k), LEAST_LETTER);
       if (size !== item.size) this.changed.set(item, { ...item, size });
       this.taken.push(this.square(item.at, size, item.shift));
     }

@@ -60,7 +60,8 @@ export function topsScene(plan: Plan, layout: Layout, options: TopsSceneOptions 
     ...(layers.sizes ? pieces.flatMap((piece) => drawSizes(piece, layout)) : []),
     ...(layers.sizes || options.jointSizes ? joints.flatMap((joint) => drawJointSize(joint, layout)) : []),
     ...seams.flatMap((seam) =>
-      options.handles || chosen(`seam ${seamName(seam)}`) ? drawSeamHandle(seam, layout) : [],
+      // A seam along the grain lies where its rows part: nothing slides it.
+      !seam.edge && (options.handles || chosen(`seam ${seamName(seam)}`)) ? drawSeamHandle(seam, layout) : [],
     ),
   ];
   const letters = pieces.map((piece) => piece.letter).join(', ');
