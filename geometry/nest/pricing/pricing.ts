@@ -8,8 +8,9 @@ import type { PricedRow } from './priced-row';
 
 export type { PricedRow } from './priced-row';
 
-/** Rows kept for each slab when new columns are wanted. */
+/** Rows kept for each slab when new columns are wanted: those with a section beside them take long to work out. */
 const KEEP = 3;
+const KEEP_BARE = 10;
 
 export interface Priced {
   /** By stock entry: no pattern of the class is worth more. */
@@ -57,7 +58,12 @@ export function createPricing(problem: Problem, rowsAt: (depth: number) => Depth
     const found: PricedRow[] = [];
     const penalties: (readonly number[])[] = [];
     for (const group of groups) {
-      const best = group.best({ value, demand, conflict }, KEEP, known, nodes);
+      const best = group.best(
+        { value, demand, conflict },
+        group.rows.shallow.length > 0 ? KEEP : KEEP_BARE,
+        known,
+        nodes,
+      );
       group.stock.forEach((stock, i) => {
         worth[stock.index] = best[i]!.bound;
         best[i]!.rows.forEach((row) => found.push({ ...row, stock }));

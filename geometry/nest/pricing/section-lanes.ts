@@ -5,9 +5,14 @@ import { fillLane, type FilledLane } from './fill-lane';
 import { bestLaneSet, type LanePlans } from './lane-plans';
 
 /** Rounds of new lanes for one section; later ones change nothing that shows. */
-const MOST_ROUNDS = 40;
-/** Lanes remembered from one section to the next: sections of a slab need much the same ones. */
+const MOST_ROUNDS = 12;
+/** Lanes with which a program begins, and with which it begins anew: sections need much the same ones. */
 const MOST_LANES = 80;
+const TOO_MANY_LANES = 160;
+/** Programs kept, each for other numbers of copies. */
+const MOST_PROGRAMS = 4;
+/** Cents that a lane costs where it must not be used: never worth it. */
+const BARRED = 1;
 const NOTHING = 1e-6;
 
 export interface LaneUse {
@@ -30,6 +35,13 @@ interface KnownLane {
   readonly kind: number;
   readonly items: readonly number[];
   readonly length: number;
+}
+
+/** A linear program over lanes for certain numbers of copies; it goes on from where the last section left it. */
+interface LaneProgram {
+  readonly demand: readonly number[];
+  readonly lp: LinearProgram;
+  readonly lanes: KnownLane[];
 }
 
 export interface SectionRelaxer {
@@ -58,23 +70,43 @@ export function createSectionRelaxer(
   const kinds = lanes.length;
   const sets = plans.sets ?? lanes.map((_, k) => lanes.map((__, j) => (j === k ? 1 / plans.share[k]! : 0)));
   let known: KnownLane[] = [];
+  let programs: LaneProgram[] = [];
+  const rowOf = new Map(shallow.map((i, row) => [i, row]));
 
   /** Limits by item, then the number of lanes of each kind, then one section. */
-  function createProgram(items: readonly number[], demand: readonly number[]): LinearProgram {
-    const limits: LpRow[] = items.map((i) => ({ sense: '<=', rhs: demand[i]!, penalty: 0 }));
+  function createProgram(demand: readonly number[]): LaneProgram {
+    const items = shallow.length;
+    const limits: LpRow[] = shallow.map((i) => ({ sense: '<=', rhs: demand[i]!, penalty: 0 }));
     for (let k = 0; k < kinds; k++) limits.push({ sense: '<=', rhs: 0, penalty: 0 });
     limits.push({ sense: '<=', rhs: 1, penalty: 0 });
-    const program = new LinearProgram(limits);
+    const lp = new LinearProgram(limits);
     for (const set of sets) {
-      const rows = [items.length + kinds];
+      const rows = [items + kinds];
       const factors = [1];
       set.forEach((n, k) => {
         if (n <= 0) return;
-        rows.push(items.length + k);
+        rows.push(items + k);
         factors.push(-n);
       });
-      program.addColumn(0, rows, factors);
+      lp.addColumn(0, rows, factors);
     }
+    const program: LaneProgram = { demand: [...demand], lp, lanes: [] };
+    for (const lane of known) if (isWithin(lane.items, demand)) addLane(program, lane, rowOf, items);
+    return program;
+  }
+
+  /** The program for these copies, priced for a section of this length. */
+  function programFor(room: number, value: readonly number[], demand: readonly number[]): LaneProgram {
+    let program = programs.find((p) => shallow.every((i) => p.demand[i] === demand[i]));
+    if (!program || program.lanes.length > TOO_MANY_LANES) {
+      const old = program;
+      program = createProgram(demand);
+      programs = [program, ...programs.filter((p) => p !== old)].slice(0, MOST_PROGRAMS);
+    }
+    const { lp, lanes: added } = program;
+    added.forEach((lane, n) =>
+      lp.setCost(sets.length + n, lane.length <= room + FIT ? -worthOf(lane.items, value) : BARRED),
+    );
     return program;
   }
 
@@ -90,16 +122,8 @@ export function createSectionRelaxer(
       const { bound, work } = underPenalty(items, room, value, demand, (i) => guess[i]!);
       if (bound <= enough) return { penalty: guess, bound, work, lanes: [] };
     }
-    const program = createProgram(items, demand);
-    const used: KnownLane[] = [];
-    const rowOf = new Map<number, number>();
-    items.forEach((i, row) => rowOf.set(i, row));
-    const add = (lane: KnownLane): void => {
-      addLane(program, lane, rowOf, items.length, value);
-      used.push(lane);
-    };
-    for (const lane of known) if (lane.length <= room + FIT && isWanted(lane.items, value, demand)) add(lane);
-    let answer = program.solve();
+    const program = programFor(room, value, demand);
+    let answer = program.lp.solve();
     let bound = Infinity;
     let penalty = value;
     let work = 0;
@@ -115,18 +139,23 @@ export function createSectionRelaxer(
         penalty = rest.penalty;
       }
       if (bound <= enough) break;
-      const fresh = newLanes(best, answer, items.length, lanes);
+      const fresh = newLanes(best, answer, shallow.length, lanes);
       if (fresh.length === 0) break;
-      fresh.forEach(add);
-      answer = program.solve();
+      for (const lane of fresh) {
+        const column = addLane(program, lane, rowOf, shallow.length);
+        program.lp.setCost(column, -worthOf(lane.items, value));
+      }
+      answer = program.lp.solve();
     }
-    remember(used, answer, sets.length);
     const fractions = answer.x.slice(sets.length);
+    remember(program.lanes, fractions);
     return {
       penalty,
       bound,
       work,
-      lanes: used.map((lane, n) => ({ depth: plans.depths[lane.kind]!, items: lane.items, x: fractions[n] ?? 0 })),
+      lanes: program.lanes.flatMap((lane, n) =>
+        fractions[n]! > NOTHING ? [{ depth: plans.depths[lane.kind]!, items: lane.items, x: fractions[n]! }] : [],
+      ),
     };
   }
 
@@ -156,30 +185,26 @@ export function createSectionRelaxer(
   }
 
   /** Lanes in use come first, so that those never used are the first to be forgotten. */
-  function remember(used: readonly KnownLane[], answer: LpAnswer, offset: number): void {
-    const inUse = used.filter((_, n) => (answer.x[offset + n] ?? 0) > NOTHING);
-    const rest = used.filter((_, n) => !((answer.x[offset + n] ?? 0) > NOTHING));
-    const others = known.filter((lane) => !used.includes(lane));
-    known = [...inUse, ...rest, ...others].slice(0, MOST_LANES);
+  function remember(all: readonly KnownLane[], fractions: readonly number[]): void {
+    const inUse = all.filter((_, n) => fractions[n]! > NOTHING);
+    const held = new Set(inUse);
+    known = [...inUse, ...known.filter((lane) => !held.has(lane))].slice(0, MOST_LANES);
   }
 
   return { relax };
 }
 
 function addLane(
-  program: LinearProgram,
+  { lp, lanes }: LaneProgram,
   lane: KnownLane,
   rowOf: ReadonlyMap<number, number>,
   items: number,
-  value: readonly number[],
-): void {
+): number {
   const rows: number[] = [];
   const factors: number[] = [];
-  let worth = 0;
   for (const i of lane.items) {
     const row = rowOf.get(i)!;
     const at = rows.indexOf(row);
-    worth += value[i]!;
     if (at >= 0) factors[at]!++;
     else {
       rows.push(row);
@@ -188,7 +213,18 @@ function addLane(
   }
   rows.push(items + lane.kind);
   factors.push(1);
-  program.addColumn(-worth, rows, factors);
+  lanes.push(lane);
+  return lp.addColumn(BARRED, rows, factors);
+}
+
+/** What the items of a lane are worth; those worth nothing bar it, as it would be better without them. */
+function worthOf(items: readonly number[], value: readonly number[]): number {
+  let sum = 0;
+  for (const i of items) {
+    if (!(value[i]! > 0)) return -BARRED;
+    sum += value[i]!;
+  }
+  return sum;
 }
 
 /** The lanes worth more than the program pays for one of their kind. */
@@ -205,9 +241,8 @@ function newLanes(
   );
 }
 
-function isWanted(items: readonly number[], value: readonly number[], demand: readonly number[]): boolean {
+function isWithin(items: readonly number[], demand: readonly number[]): boolean {
   for (const i of items) {
-    if (!(value[i]! > 0)) return false;
     let copies = 0;
     for (const j of items) if (j === i) copies++;
     if (copies > demand[i]!) return false;

@@ -1,17 +1,21 @@
 import type { PricedRow } from '../pricing/priced-row';
 import { patternItems, type Pattern } from '../plan/pattern';
 
-/** A pattern as the linear program sees it. */
-export interface Column {
+/** What is cut from one slab, by numbers alone. */
+export interface Counted {
   readonly stock: number;
-  /** Null for a column whose section is relaxed: good for bounds, not for sawing. */
-  readonly pattern: Pattern | null;
-  /** Of a relaxed column: the row beside its section. */
-  readonly row?: PricedRow;
   /** Items cut, each once, and how many of each. */
   readonly items: readonly number[];
   readonly counts: readonly number[];
   readonly key: string;
+}
+
+/** A pattern as the linear program sees it. */
+export interface Column extends Counted {
+  /** Null for a column whose section is relaxed: good for bounds, not for sawing. */
+  readonly pattern: Pattern | null;
+  /** Of a relaxed column: the row beside its section. */
+  readonly row?: PricedRow;
 }
 
 export interface RealColumn extends Column {
@@ -21,7 +25,7 @@ export interface RealColumn extends Column {
 export function makeColumn(pattern: Pattern): RealColumn {
   const counts = new Map<number, number>();
   for (const item of patternItems(pattern)) counts.set(item, (counts.get(item) ?? 0) + 1);
-  return { ...fromCounts(pattern.stock, counts), pattern };
+  return { ...withCounts(pattern.stock, counts), pattern };
 }
 
 /** A row beside fractions of lanes. */
@@ -33,10 +37,10 @@ export function relaxedColumn(
   const add = (item: number, n: number): void => void counts.set(item, (counts.get(item) ?? 0) + n);
   row.items.forEach((i) => add(i, 1));
   lanes.forEach(({ items, x }) => x > 1e-9 && items.forEach((i) => add(i, x)));
-  return { ...fromCounts(row.stock.index, counts), pattern: null, row };
+  return { ...withCounts(row.stock.index, counts), pattern: null, row };
 }
 
-function fromCounts(stock: number, counts: ReadonlyMap<number, number>): Omit<Column, 'pattern' | 'row'> {
+export function withCounts(stock: number, counts: ReadonlyMap<number, number>): Counted {
   const items = [...counts.keys()].sort((a, b) => a - b);
   const numbers = items.map((i) => counts.get(i)!);
   return { stock, items, counts: numbers, key: `${stock}|${items.join()}|${numbers.map((n) => n.toFixed(6)).join()}` };
@@ -49,7 +53,7 @@ export function worthOf(column: Column, value: readonly number[]): number {
 }
 
 /** True when no more copies are cut than are left. */
-export const isWithin = (column: Column, left: readonly number[]): boolean =>
+export const isWithin = (column: Counted, left: readonly number[]): boolean =>
   column.items.every((i, k) => column.counts[k]! <= left[i]!);
 
 /** Columns met so far, each once. */

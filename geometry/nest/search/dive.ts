@@ -1,6 +1,8 @@
-import { isWithin, type RealColumn } from './column';
+import { isWithin, makeColumn, type RealColumn } from './column';
+import { cutTrimmed, trimColumn, type TrimmedColumn } from './trim-column';
 import type { SearchContext } from './context';
 import type { Generation } from './generate-columns';
+import { greedy } from './greedy';
 import { createMaster, type MasterAnswer } from './master';
 
 /** A column used this nearly whole is taken as it is. */
@@ -45,38 +47,53 @@ export function dive(
   const taken: RealColumn[] = [];
   let spent = 0;
   while (left.some((n) => n > 0)) {
-    const usable = context.real.list.filter((c) => slabs[c.stock]! > 0 && isWithin(c, left));
+    const usable = trimmed(context.real.list, left, slabs);
     const rounds = taken.length === 0 ? FIRST_ROUNDS : LATER_ROUNDS;
     const { columns, answer, out } = solveReal(context, usable, left, slabs, rounds);
-    if (out || spent + answer.objective >= below - 1e-6) return null;
+    if (out) {
+      const rest = greedy(problem, context.rowsAt, left, slabs);
+      if (!rest) return null;
+      taken.push(...rest.map(makeColumn));
+      spent += rest.reduce((sum, pattern) => sum + prices[pattern.stock]!, 0);
+      break;
+    }
+    if (spent + answer.objective >= below - 1e-6) return null;
     const ranked = columns.map((column, k) => ({ column, x: answer.x[k]! })).filter((c) => c.x > 1e-6);
     ranked.sort((a, b) => b.x - a.x || prices[b.column.stock]! - prices[a.column.stock]!);
     if (ranked.length === 0) return null;
-    ranked.forEach(({ column, x }, k) => {
-      for (
-        let n = k === 0 ? Math.max(1, Math.floor(x + 1 - NEARLY_WHOLE)) : Math.floor(x + 1 - NEARLY_WHOLE);
-        n > 0;
-        n--
-      ) {
-        if (slabs[column.stock]! <= 0 || !isWithin(column, left)) return;
-        column.items.forEach((i, j) => (left[i]! -= column.counts[j]!));
-        slabs[column.stock]!--;
-        spent += prices[column.stock]!;
-        taken.push(column);
+    for (const [k, { column, x }] of ranked.entries()) {
+      const copies = Math.max(k === 0 ? 1 : 0, Math.floor(x + 1 - NEARLY_WHOLE));
+      for (let n = copies; n > 0 && slabs[column.stock]! > 0; n--) {
+        const cut = k === 0 || isWithin(column, left) ? cutTrimmed(context, column, answer.value, left) : null;
+        if (!cut) break;
+        cut.items.forEach((i, j) => (left[i]! -= cut.counts[j]!));
+        slabs[cut.stock]!--;
+        spent += prices[cut.stock]!;
+        taken.push(cut);
       }
-    });
+    }
   }
   return spent < below ? taken : null;
+}
+
+/** Columns trimmed to what is left, each once. */
+function trimmed(all: readonly RealColumn[], left: readonly number[], slabs: readonly number[]): TrimmedColumn[] {
+  const byKey = new Map<string, TrimmedColumn>();
+  for (const whole of all) {
+    const column = slabs[whole.stock]! > 0 ? trimColumn(whole, left) : null;
+    if (column) byKey.set(column.key, column);
+  }
+  return [...byKey.values()];
 }
 
 /** The master program over real columns for what is left, after some rounds of new ones. */
 function solveReal(
   context: SearchContext,
-  usable: readonly RealColumn[],
+  usable: readonly TrimmedColumn[],
   left: readonly number[],
   slabs: readonly number[],
   rounds: number,
-): { columns: RealColumn[]; answer: MasterAnswer; out: boolean } {
+): { columns: TrimmedColumn[]; answer: MasterAnswer; out: boolean } {
   const { problem, pricing, real } = context;
   const cost = problem.stock.map((s) => s.price);
   const most = Math.max(...cost);
@@ -106,7 +123,7 @@ function solveReal(
       const column = pricing.real(row, answer.value, left);
       if (!column || !real.add(column)) continue;
       master.add(column);
-      columns.push(column);
+      columns.push({ ...column, whole: column });
       helped = true;
     }
     out = context.spend(pricing.work() - before + columns.length / 8 + 20);

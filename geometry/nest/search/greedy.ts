@@ -11,15 +11,17 @@ const FAIR_FILL = 0.9;
  * longest parts first.
  *
  * @param demand - copies of each item to cut
+ * @param slabs - how many there are, by stock entry
  * @returns null when this way runs out of slabs
  */
 export function greedy(
   problem: Problem,
   rowsAt: (depth: number) => DepthRows,
   demand: readonly number[],
+  slabs: readonly number[],
 ): Pattern[] | null {
   const left = [...demand];
-  const counts = problem.stock.map((s) => s.count);
+  const counts = [...slabs];
   const rate = Math.min(...problem.stock.map((s) => s.price / Math.max(1, s.usable * s.depth))) / FAIR_FILL;
   const order = problem.items.map((i) => i.index).sort((a, b) => byDepthThenLength(problem, a, b));
   const patterns: Pattern[] = [];

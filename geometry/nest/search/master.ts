@@ -1,10 +1,10 @@
 import { LinearProgram, type LpAnswer, type LpRow } from '../lp/simplex';
 import type { Problem } from '../model/problem';
-import type { Column } from './column';
+import type { Counted } from './column';
 
 /** The linear program over the columns known so far, with the duals read by what they belong to. */
 export interface Master {
-  add(column: Column): void;
+  add(column: Counted): void;
   solve(): MasterAnswer;
 }
 
@@ -64,7 +64,7 @@ export function createMaster(problem: Problem, goal: MasterGoal): Master {
     return { objective: answer.objective, shortfall: answer.shortfall, value, rent, x: answer.x.slice(extra) };
   }
 
-  function add(column: Column): void {
+  function add(column: Counted): void {
     const at: number[] = [];
     const factors: number[] = [];
     column.items.forEach((i, k) => {

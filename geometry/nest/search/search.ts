@@ -26,8 +26,9 @@ const LEAST_POLISH = 20_000;
 export function search(problem: Problem, limits: SearchLimits): SearchResult {
   const state = createState(problem, limits);
   const { context } = state;
+  const counts = problem.stock.map((s) => s.count);
   for (const picked of settledChoices(problem)) {
-    const patterns = greedy(problem, context.rowsAt, demandOf(problem, picked));
+    const patterns = greedy(problem, context.rowsAt, demandOf(problem, picked), counts);
     if (patterns) state.offer(patterns, picked);
     if (context.spend(1)) break;
   }
