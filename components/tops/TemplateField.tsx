@@ -8,7 +8,6 @@ import { Button } from '../ui/Button';
 import { Field } from '../ui/Field';
 import { Text } from '../ui/Text';
 import { space } from '../ui/tokens';
-import { outlineFromDxf } from './dxf-outline';
 import { outlineToText, parseOutline } from './outline-text';
 
 export interface TemplateFieldProps {
@@ -40,7 +39,9 @@ export function TemplateField({ label, hint, outline, onOutline, template }: Tem
     const file = event.target.files?.[0];
     event.target.value = '';
     if (!file) return;
-    const result = await outlineFromDxf(await file.text());
+    // Few jobs bring a template: what reads one is fetched when one does.
+    const { outlineFromDxf } = await import('./dxf-outline');
+    const result = outlineFromDxf(await file.text());
     if (!result.ok) return setError(`${file.name}: ${result.message}`);
     setError(undefined);
     setDraft(null);

@@ -1,9 +1,7 @@
 import { StyleSheet, View } from 'react-native';
-import { Svg } from 'react-native-svg';
 
-import type { Scene } from '@/geometry/scene/display-list';
 import { SPECIES } from '@/geometry/wood/species';
-import { PaintSvg } from '../canvas/paint-svg';
+import { WoodSwatch } from '../canvas/WoodSwatch';
 import { useOpenJob } from '../editor/JobProvider';
 import { Fraction } from '../measure/Fraction';
 import { planTotals } from '../slabs/slab-words';
@@ -15,10 +13,6 @@ import { useRadioKeys } from '../ui/use-radio-keys';
 
 /** Woods with a figure of their own on screen; all others stand in the list. */
 const SWATCHES = ['hard maple', 'black walnut', 'cherry', 'white oak', 'beech'] as const;
-
-/** px */
-const SWATCH = { width: 48, height: 28 };
-const PX_PER_INCH = 4;
 
 const named = (species: string): string => `${species.charAt(0).toUpperCase()}${species.slice(1)}`;
 
@@ -55,7 +49,7 @@ export function WoodBar() {
             style={styles.press}
           >
             <View style={[styles.swatch, i === chosen && styles.chosen]}>
-              <Swatch species={name} />
+              <WoodSwatch species={name} />
             </View>
           </Press>
         ))}
@@ -83,23 +77,6 @@ export function VisibleSeam() {
       <Text kind="label">Visible seam, all</Text>
       <Fraction inches={planTotals(plan, layout).visibleSeam} step={layout.step} bold size={20} />
     </View>
-  );
-}
-
-function Swatch({ species }: { readonly species: string }) {
-  const [w, h] = [SWATCH.width / PX_PER_INCH, SWATCH.height / PX_PER_INCH];
-  const outline = [[0, -h], [w, -h], [w, 0], [0, 0]] as const; // prettier-ignore
-  const scene: Scene = {
-    bounds: { minX: 0, minY: -h, maxX: w, maxY: 0 },
-    items: [
-      { layer: 'staves', kind: 'staves', outline, along: [1, 0], origin: [0, -h], width: 1.75, species, seed: species },
-      { layer: 'staves', kind: 'polygon', outline, stroke: { ink: 'ink', width: 2 } },
-    ],
-  };
-  return (
-    <Svg width={SWATCH.width} height={SWATCH.height} aria-hidden>
-      <PaintSvg scene={scene} pxPerInch={PX_PER_INCH} />
-    </Svg>
   );
 }
 

@@ -1,4 +1,11 @@
-import type { IDxf, IEntity, IArcEntity, ICircleEntity, ILineEntity, ILwpolylineEntity } from 'dxf-parser';
+import DxfParser, {
+  type IDxf,
+  type IEntity,
+  type IArcEntity,
+  type ICircleEntity,
+  type ILineEntity,
+  type ILwpolylineEntity,
+} from 'dxf-parser';
 
 import { arcPoints } from '@/geometry/core/arc';
 import type { Point, Polygon } from '@/geometry/core/point';
@@ -18,9 +25,7 @@ const UNITS: Readonly<Record<number, number>> = { 1: 1, 2: 12, 4: 1 / 25.4, 5: 1
  *
  * @returns a sentence where the file holds none
  */
-export async function outlineFromDxf(text: string): Promise<TypedOutline> {
-  // Few jobs bring a template: the parser is fetched when one does.
-  const { DxfParser } = await import('dxf-parser');
+export function outlineFromDxf(text: string): TypedOutline {
   let file: IDxf | null;
   try {
     file = new DxfParser().parseSync(text);

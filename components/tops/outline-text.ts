@@ -28,7 +28,7 @@ export function parseOutline(text: string, step: Step): TypedOutline {
   const points: Point[] = [];
   for (const [i, line] of lines.entries()) {
     if (line === '') continue;
-    // A semicolon lets a comma stand for the decimal point.
+    // Between semicolons a decimal comma is told from the one that parts two lengths, and named.
     const parts = line.split(line.includes(';') ? ';' : ',');
     if (parts.length !== 2)
       return refused(`Line ${i + 1}: give two lengths with a comma between them, such as 36 1/2, 0.`);
