@@ -11,6 +11,8 @@ export interface NestSearch {
   readonly searching: boolean;
   /** Plans found so far, and what nothing can cost less than, cents. */
   readonly found: number;
+  /** Layouts of slabs weighed so far. */
+  readonly tried: number;
   readonly lowerBound: number | null;
   /** Ends the search with the best plan so far. */
   readonly stop: () => void;
@@ -24,6 +26,7 @@ const NOTHING: Progress = {
   error: null,
   searching: false,
   found: 0,
+  tried: 0,
   lowerBound: null,
 };
 
@@ -103,6 +106,7 @@ function shown(id: string | null, progress: Progress): Progress {
 function progressAfter(now: Progress, id: string, reply: NestReply): Progress {
   if (now.instance !== id) return now;
   if (reply.kind === 'failed') return { ...now, searching: false, error: reply.error };
+  if (reply.kind === 'progress') return { ...now, tried: reply.progress.tried, lowerBound: reply.progress.lowerBound };
   if (reply.kind === 'better') return { ...now, plan: reply.plan, found: now.found + 1, lowerBound: reply.lowerBound };
   keep(reply.plan);
   return { ...now, plan: reply.plan, searching: false, lowerBound: reply.plan.lowerBound };

@@ -25,6 +25,7 @@ export function nest(instance: NestInstance, options: NestOptions = {}): NestPla
   const result = search(problem, {
     stop: options.stop ?? (() => false),
     workLimit: options.workLimit ?? DEFAULT_WORK,
+    onProgress: (progress) => options.onProgress?.(progress),
     onBetter: (plan, soFar) => options.onBetter?.(finished(problem, plan, soFar, false), soFar.lower),
   });
   if (!result.plan)

@@ -235,6 +235,16 @@ export interface NestError {
   };
 }
 
+/** How far a search has come. */
+export interface NestProgress {
+  /** Layouts of slabs weighed so far: units of counted work. */
+  readonly tried: number;
+  /** Cents of the best plan so far; null before the first. */
+  readonly cost: number | null;
+  /** No plan of the class costs less, cents. */
+  readonly lowerBound: number;
+}
+
 export interface NestOptions {
   /** Asked now and then; true ends the search with the best plan so far. */
   readonly stop?: () => boolean;
@@ -244,4 +254,6 @@ export interface NestOptions {
   readonly evidence?: boolean;
   /** Told of every better plan as it is found, with the lower bound known then. */
   readonly onBetter?: (plan: NestPlan, lowerBound: number) => void;
+  /** Told of every better cost and bound, and now and then in between; cheap to call, so throttle what is costly to show. */
+  readonly onProgress?: (progress: NestProgress) => void;
 }

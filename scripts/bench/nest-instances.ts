@@ -118,6 +118,9 @@ export function knownInstance(seed: number, slabs: number): NestInstance {
   };
 }
 
+/** How many slabs a known instance was sawn from. */
+export const knownSlabs = ({ id }: NestInstance): number => Number(id.split('-')[1]);
+
 function sawnSlab(draw: Draw, usable: number, withSection: boolean): Polygon[] {
   const pieces: Polygon[] = [];
   let at = 0;

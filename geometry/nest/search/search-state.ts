@@ -1,6 +1,7 @@
 import { areaCut } from '../bound/area-cut';
 import { cheapestMix, type MixCut } from '../bound/cheapest-mix';
 import type { Problem } from '../model/problem';
+import type { NestProgress } from '../types';
 import type { Pattern } from '../plan/pattern';
 import { createPricing } from '../pricing/pricing';
 import { createDepthRows } from '../row/depth-rows';
@@ -11,6 +12,9 @@ import { createLaneTools } from './pack-sections';
 
 /** Branching nodes spent on rounding a bound up to a total that the prices can reach. */
 export const MIX_NODES = 100_000;
+
+/** Units of work after which progress is told though nothing better was found. */
+const TELL_EVERY = 1000;
 
 export interface SearchResult {
   readonly plan: FoundPlan | null;
@@ -24,6 +28,7 @@ export interface SearchLimits {
   readonly stop: () => boolean;
   readonly workLimit: number;
   readonly onBetter: (plan: FoundPlan, soFar: SearchResult) => void;
+  readonly onProgress: (progress: NestProgress) => void;
 }
 
 /** Best plan, best bound and what both rest on, while a search goes on. */
@@ -42,11 +47,16 @@ export interface SearchState {
   readonly result: () => SearchResult;
 }
 
-export function createState(problem: Problem, { stop, workLimit, onBetter }: SearchLimits): SearchState {
+export function createState(problem: Problem, { stop, workLimit, onBetter, onProgress }: SearchLimits): SearchState {
   const rowsAt = createDepthRows(problem);
   let work = 0;
   let best: FoundPlan | null = null;
   let lower = 0;
+  let told = 0;
+  const tell = (): void => {
+    told = work;
+    onProgress({ tried: Math.round(work), cost: best?.cost ?? null, lowerBound: result().lower });
+  };
   const context: SearchContext = {
     problem,
     rowsAt,
@@ -57,6 +67,7 @@ export function createState(problem: Problem, { stop, workLimit, onBetter }: Sea
     most: problem.items.map((_, i) => mostOf(problem, i)),
     spend(units) {
       work += units;
+      if (work >= told + TELL_EVERY) tell();
       return work >= workLimit || stop();
     },
   };
@@ -75,7 +86,12 @@ export function createState(problem: Problem, { stop, workLimit, onBetter }: Sea
     below,
     spent: () => work,
     done: () => best !== null && lower >= best.cost,
-    raise: (bound) => void (lower = Math.max(lower, Math.min(bound, below()))),
+    raise(bound) {
+      const raised = Math.min(bound, below());
+      if (raised <= lower) return;
+      lower = raised;
+      tell();
+    },
     offer(patterns, picked) {
       const cost = patterns.reduce((sum, p) => sum + problem.stock[p.stock]!.price, 0);
       for (const pattern of patterns) {
@@ -86,6 +102,7 @@ export function createState(problem: Problem, { stop, workLimit, onBetter }: Sea
       if (cost >= below()) return;
       best = { patterns, picked, cost };
       onBetter(best, result());
+      tell();
     },
     replace(patterns) {
       if (best) best = { ...best, patterns };
