@@ -5,6 +5,7 @@ import { seamNearCutout } from './seam-near-cutout';
 import { seamNearEnd } from './seam-near-end';
 import { seamUnsupported } from './seam-unsupported';
 import { shortPiece } from './short-piece';
+import { inPersonsWords } from './top-words';
 
 /** What the tops could not be laid as drawn: every problem the layout itself reports. */
 export const cannotLay: Rule = (facts) =>
@@ -14,7 +15,7 @@ export const cannotLay: Rule = (facts) =>
       finding({
         code: 'cannot-lay',
         severity: severity ?? 'stop',
-        text: message,
+        text: inPersonsWords(facts, message),
         action: 'Change the drawing there; the rest is laid all the same.',
         at: { run: at.run, wall: at.wall, cutout: at.cutout, detail: [code, at.joint].filter(Boolean).join(' ') },
         source: 'plane geometry',

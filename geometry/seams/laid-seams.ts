@@ -17,7 +17,7 @@ export function laidSeam(deck: Deck, seam: PlannedSeam, pieces: readonly BarePie
   const place = (p: Point) => toRoom(deck.frame, p);
   const common = { on: deck.id, visible: seam.visible, inCutout: seam.inCutout?.id ?? null, pinned: seam.pinned };
   if (seam.kind === 'edge') {
-    const [from, to] = deck.shape === 'strip' ? edgeSpan(deck, seam.at) : extent(deck);
+    const [from, to] = edgeSpan(deck, seam.at);
     const keys = [seam.row - 1, seam.row].map((row) => pieces.find((piece) => piece.row === row)?.key ?? '');
     return {
       ...common,
@@ -44,7 +44,7 @@ export function laidSeam(deck: Deck, seam: PlannedSeam, pieces: readonly BarePie
   };
 }
 
-/** Where a line along the grain enters and leaves a strip. */
+/** Where a line along the grain enters and leaves a top. */
 function edgeSpan(deck: Deck, y: number): readonly [number, number] {
   const turned = deck.outline.map(([px, py]): Point => [py, px]);
   return spanAt(turned, y) ?? extent(deck);

@@ -50,7 +50,8 @@ describe('a maker’s template from a DXF file', () => {
     drawing.setUnits('Inches');
     drawing.drawCircle(3, 3, 0.7);
     // A bulge of 1 is half a circle: a square of 10 with a half disc of radius 5 on its right side.
-    drawing.drawPolyline([[0, 0], [10, 0, 1], [10, 10], [0, 10]], true); // prettier-ignore
+    const half = [10, 0, 1] as unknown as [number, number];
+    drawing.drawPolyline([[0, 0], half, [10, 10], [0, 10]], true);
     const outline = read(drawing.toDxfString());
     expect(Math.abs(area(outline) - (100 + (Math.PI * 25) / 2))).toBeLessThan(0.1);
     expect(boundingBox(outline).maxX - boundingBox(outline).minX).toBeCloseTo(15, 1);

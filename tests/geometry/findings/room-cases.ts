@@ -57,6 +57,6 @@ export const ROOM_CASES: RuleCases = {
     severity: 'stop',
     raises: () => kitchen({ layout: { runs: [run('1', 'A', { left: WALL })] } }),
     spares: () => kitchen(),
-    says: ['1'],
+    says: ['The run on wall A', 'wall A has no neighbor'],
   },
 };

@@ -281,6 +281,15 @@ describe('placeSeams, islands', () => {
     ]);
   });
 
+  it('draws the seam of an L no longer than the wood on both sides of it', () => {
+    const outline = [[0, 0], [70, 0], [70, 24], [40, 24], [40, 40], [0, 40]] as const; // prettier-ignore
+    const free = { id: 'I', length: 70, depth: 40, shape: 'free', outline, at: [10, -90], bearing: 0 } as const;
+    const [seam] = layTops(layout({ islands: [free] }), room([60], []), DEFAULT_SETTINGS).seams;
+    expect(seam).toMatchObject({ at: 25, edge: true, visible: 40 });
+    expect(Math.hypot(seam!.to[0] - seam!.from[0], seam!.to[1] - seam!.from[1])).toBeCloseTo(40, 9);
+    expect(Math.min(seam!.from[0], seam!.to[0])).toBeCloseTo(10, 9);
+  });
+
   it('leaves it whole where one deep rack piece holds it, and splits the next', () => {
     const stock = { ...layout().stock, rack: [{ id: 'R', length: 80, depth: 40 }] };
     const islands = ['I', 'J'].map((id) => ({ id, length: 72, depth: 39 }));

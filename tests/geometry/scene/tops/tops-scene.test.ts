@@ -1,8 +1,10 @@
 import type { DrawItem, Scene } from '@/geometry/scene/display-list';
+import { letterPlace, roomAt } from '@/geometry/scene/tops/letter-place';
 import { splitAt } from '@/geometry/scene/tops/draw-joints';
 import { toRoom } from '@/geometry/scene/tops/draw-pieces';
 import { thumbnailScene } from '@/geometry/scene/tops/thumbnail-scene';
 import { topsScene } from '@/geometry/scene/tops/tops-scene';
+import type { Polygon } from '@/geometry/core/point';
 import { contains } from '@/geometry/core/polygon';
 
 import { sharedMiterJob } from '../alder-job';
@@ -111,5 +113,29 @@ describe('thumbnailScene', () => {
     expect(scene.items).toHaveLength(1);
     expect(scene.items[0]).toMatchObject({ kind: 'polyline', layer: 'walls' });
     expect(scene.alt).toBe('3 walls, no tops yet');
+  });
+});
+
+describe('letterPlace', () => {
+  const rectangle: Polygon = [[0, 0], [60, 0], [60, 25], [0, 25]]; // prettier-ignore
+
+  it('is the middle of a plain piece, and of the longer part beside a sink', () => {
+    expect(letterPlace(rectangle, [], 25)).toEqual([30, 12.5]);
+    const sink: Polygon = [[10, 3], [34, 3], [34, 20], [10, 20]]; // prettier-ignore
+    expect(letterPlace(rectangle, [sink], 25)).toEqual([47, 12.5]);
+  });
+
+  it('goes where there is room when the usual place is cramped: the arm of an L beside a cooktop', () => {
+    const l: Polygon = [[0, 0], [70, 0], [70, 24], [40, 24], [40, 40], [0, 40]]; // prettier-ignore
+    const cooktop: Polygon = [[6, 3], [34, 3], [34, 21], [6, 21]]; // prettier-ignore
+    const place = letterPlace(l, [cooktop], 40);
+    // A circle of 11 in radius lies in the arm, from 34 to 70 by 0 to 24.
+    expect(roomAt(place, l, [cooktop])).toBeGreaterThan(9);
+  });
+
+  it('has no room outside the piece or in a cutout', () => {
+    expect(roomAt([70, 5], rectangle, [])).toBe(0);
+    expect(roomAt([15, 10], rectangle, [[[10, 3], [34, 3], [34, 20], [10, 20]]])).toBe(0); // prettier-ignore
+    expect(roomAt([30, 10], rectangle, [])).toBe(10);
   });
 });
