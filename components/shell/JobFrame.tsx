@@ -3,6 +3,7 @@ import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { useStore } from 'zustand';
 
+import { isOpen } from '@/geometry/findings/acceptance';
 import { useOpenJob, useSaveWords } from '../editor/JobProvider';
 import { jobNumber } from '../jobs/job-words';
 import { Icon } from '../ui/Icon';
@@ -64,14 +65,15 @@ export function JobFrame({ subtitle, primary, actions, undo = true, ...page }: J
 }
 
 function useSteps(): NavItem[] {
-  const { job, plan } = useOpenJob();
+  const { job, plan, layout } = useOpenJob();
   const path = usePathname();
-  const count = plan.findings.filter((finding) => finding.severity !== 'note').length;
+  const count = plan.findings.filter((finding) => finding.severity !== 'note' && isOpen(layout, finding)).length;
   const all: Omit<NavItem, 'href'>[] = [
     { key: 'room', label: 'Room', icon: 'room' },
     { key: 'tops', label: 'Tops', icon: 'tops', count },
     { key: 'slabs', label: 'Slabs', icon: 'slabs' },
     { key: 'sheets', label: 'Sheets', icon: 'sheets' },
+    { key: 'work', label: 'Work', icon: 'saw' },
   ];
   return all.map((item) => {
     const href = `/jobs/${job.id}/${item.key}`;

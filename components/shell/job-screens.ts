@@ -8,3 +8,4 @@ export { RoomScreen } from '../room/RoomScreen';
 export { SheetsScreen } from '../sheets/SheetsScreen';
 export { SlabsScreen } from '../slabs/SlabsScreen';
 export { TopsScreen } from '../tops/TopsScreen';
+export { WorkScreen } from '../work/WorkScreen';

@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import { StyleSheet, View } from 'react-native';
 
+import { acceptanceOf, isOpen } from '@/geometry/findings/acceptance';
 import type { Finding } from '@/geometry/findings/types';
 import { useMay, useSession } from '../api/use-session';
 import { useOpenJob } from '../editor/JobProvider';
@@ -28,7 +29,7 @@ export function FindingsList({ findings: some, onZoom }: FindingsListProps) {
   if (findings.length === 0) return <Text kind="second">Nothing to look at.</Text>;
   const actions = (finding: Finding) => {
     if (!mayEdit || !signs || finding.severity !== 'warn') return undefined;
-    return layout.accepted[finding.key] ? (
+    return acceptanceOf(layout, finding).state === 'accepted' ? (
       <Button
         label="Take it back"
         height={44}
@@ -41,7 +42,8 @@ export function FindingsList({ findings: some, onZoom }: FindingsListProps) {
   return (
     <View role="list" aria-label="Findings">
       {findings.map((finding) => {
-        const accepted = layout.accepted[finding.key];
+        const acceptance = acceptanceOf(layout, finding);
+        const accepted = acceptance.state === 'accepted' ? acceptance.accepted : undefined;
         return (
           <View key={finding.key} role="listitem">
             <FindingRow
@@ -50,6 +52,8 @@ export function FindingsList({ findings: some, onZoom }: FindingsListProps) {
               act={<LengthWords text={finding.action} size={typeRoles.second.size} tone="ink2" />}
               pieces={finding.at.pieces}
               accepted={accepted && { by: accepted.by, reason: accepted.reason }}
+              source={finding.source}
+              before={acceptance.state === 'changed since' ? acceptance.accepted : undefined}
               onPress={() => onZoom(finding)}
               actions={actions(finding)}
             />
@@ -70,7 +74,7 @@ function AcceptDialog({ finding, onClose }: { readonly finding: Finding; readonl
   const accept = () => {
     const words = reason.trim();
     if (words === '') return setError('Say why, so that whoever cuts it can follow.');
-    const accepted = { reason: words, by: me?.name ?? '', at: new Date().toISOString() };
+    const accepted = { reason: words, by: me?.name ?? '', at: new Date().toISOString(), text: finding.text };
     if (run({ kind: 'acceptFinding', finding: finding.key, accepted }, 'finding accepted')) onClose();
   };
   return (
@@ -103,7 +107,7 @@ function AcceptDialog({ finding, onClose }: { readonly finding: Finding; readonl
 /** How many of each kind there are, as signs with numbers; accepted ones are not counted. */
 export function FindingCounts() {
   const { plan, layout } = useOpenJob();
-  const open = plan.findings.filter((finding) => !layout.accepted[finding.key]);
+  const open = plan.findings.filter((finding) => isOpen(layout, finding));
   return (
     <View style={styles.counts} role="img" aria-label={countWords(open)}>
       {(['stop', 'warn', 'note'] as const).map((severity) => {

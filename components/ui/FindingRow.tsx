@@ -29,6 +29,10 @@ export interface FindingRowProps {
   readonly pieces?: readonly string[];
   /** Somebody accepted it and said why; it stays listed. */
   readonly accepted?: { readonly by: string; readonly reason: string };
+  /** Where its limit is from: a document, or 'common practice'. */
+  readonly source?: string;
+  /** It was accepted with another number, and is open again. */
+  readonly before?: { readonly by: string; readonly reason: string };
   /** Zooms to it and lights the pieces. */
   readonly onPress?: () => void;
   /** Buttons under it: "Accept", "Move the seam". */
@@ -36,7 +40,8 @@ export interface FindingRowProps {
 }
 
 /** One finding: shape, word and pieces, the fact, and what to do. */
-export function FindingRow({ severity, fact, act, pieces = [], accepted, onPress, actions }: FindingRowProps) {
+export function FindingRow(props: FindingRowProps) {
+  const { severity, fact, act, pieces = [], accepted, before, source, onPress, actions } = props;
   const look = severityLooks[severity];
   const body = (
     <>
@@ -57,6 +62,10 @@ export function FindingRow({ severity, fact, act, pieces = [], accepted, onPress
         <Text kind="strong">{fact}</Text>
         {act && <Text kind="second">{act}</Text>}
         {accepted && <Text kind="second">{`${accepted.by}: ${accepted.reason}`}</Text>}
+        {before && (
+          <Text kind="second">{`Open again: the number has changed since ${before.by} accepted it (${before.reason}).`}</Text>
+        )}
+        {source && <Text kind="small">{`By: ${source}`}</Text>}
       </View>
     </>
   );

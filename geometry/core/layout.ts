@@ -236,6 +236,10 @@ export interface Fixing {
   readonly rail: number;
   /** Thickness of the backsplash that covers the back gap, inches; 0 = none. */
   readonly backsplash: number;
+  /** Stock length of screw chosen for this job, inches; the longest that is safe when missing or 0. */
+  readonly screw?: number;
+  /** Name of a connector of the table chosen for this job; the shop's own when missing or ''. */
+  readonly connector?: string;
 }
 
 export interface SiteAccess {

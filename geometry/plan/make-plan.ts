@@ -7,6 +7,7 @@ import { wallFit, type WallFit } from '../top/wall-fit';
 import { wallFrames } from '../top/wall-frame';
 import { gettingIn } from '../top/getting-in';
 import { assembledSections } from '../wood/sections';
+import { jobSettings } from '../wood/job-settings';
 import { jointWood } from '../wood/joint-wood';
 import { movementOf } from '../wood/movement';
 import { orderOfWork } from '../wood/schedule';
@@ -36,7 +37,8 @@ export interface NestGiven {
 }
 
 /** The part of the plan that follows once room and tops are known. */
-export function finishPlan(laid: Laid, layout: Layout, settings: ShopSettings, given: NestGiven): Plan {
+export function finishPlan(laid: Laid, layout: Layout, shop: ShopSettings, given: NestGiven): Plan {
+  const settings = jobSettings(layout, shop);
   const { room, tops } = laid;
   const { material, climate, fixing } = layout;
   // The wall gap and the slots belong to runs; a kitchen of islands alone still moves.

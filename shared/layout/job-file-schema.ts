@@ -138,7 +138,10 @@ export function jobFileSchema(units: LengthUnit) {
       .partial()
       .optional(),
     climate: climateYearSchema.partial().optional(),
-    fixing: z.strictObject({ rail: length, backsplash: length }).partial().optional(),
+    fixing: z
+      .strictObject({ rail: length, backsplash: length, screw: length, connector: z.string().max(60) })
+      .partial()
+      .optional(),
     access: z
       .strictObject({
         doorWidth: length,

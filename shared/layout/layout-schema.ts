@@ -158,7 +158,11 @@ export const climateYearSchema = z.strictObject({
   heated: z.boolean(),
 });
 
-export const fixingSchema = z.strictObject({ rail: notNegative, backsplash: notNegative });
+export const fixingSchema = z.strictObject({
+  rail: notNegative, backsplash: notNegative,
+  screw: notNegative.optional(),
+  connector: z.string().max(60).optional(),
+});
 
 export const siteAccessSchema = z.strictObject({
   doorWidth: size,
