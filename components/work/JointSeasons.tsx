@@ -6,7 +6,7 @@ import { sizeText } from '@/geometry/findings/words';
 import { useOpenJob } from '../editor/JobProvider';
 import { Text } from '../ui/Text';
 import { space } from '../ui/tokens';
-import { Fine } from './WoodPart';
+import { Fine } from './Fine';
 import { Section } from './Part';
 
 /** How far each joint opens or its legs swing with the seasons, and what makes it less. */

@@ -11,6 +11,7 @@ import { Select } from '../ui/Select';
 import { Text } from '../ui/Text';
 import { ClimateCard } from './ClimateCard';
 import { Fact } from './Fact';
+import { Fine } from './Fine';
 import { JointSeasons } from './JointSeasons';
 import { LoadsCard } from './LoadsCard';
 import { OverhangCard } from './OverhangCard';
@@ -81,20 +82,6 @@ export function WoodPart() {
       <OverhangCard />
     </Cards>
   );
-}
-
-interface FineProps {
-  readonly label: string;
-  readonly inches: number;
-  readonly from?: string;
-  readonly note?: string;
-}
-
-/** A length that the seasons make: to the 1/32. */
-export function Fine({ label, inches, from, note }: FineProps) {
-  const { layout } = useOpenJob();
-  const step = layout.step.endsWith('mm') ? '0.5 mm' : '1/32';
-  return <Fact label={label} value={<Fraction inches={inches} step={step} bold />} from={from} note={note} />;
 }
 
 function SpeciesCard() {
