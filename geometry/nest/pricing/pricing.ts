@@ -10,7 +10,7 @@ export type { PricedRow } from './priced-row';
 
 /** Rows kept for each slab when new columns are wanted: those with a section beside them take long to work out. */
 const KEEP = 3;
-const KEEP_BARE = 10;
+const KEEP_BARE = 20;
 
 export interface Priced {
   /** By stock entry: no pattern of the class is worth more. */

@@ -7,6 +7,8 @@ import { createMaster, type MasterAnswer } from './master';
 
 /** A column used this nearly whole is taken as it is. */
 const NEARLY_WHOLE = 0.95;
+/** Share of the slabs still to be used that is settled with each decision. */
+const AT_ONCE = 0.15;
 /** Rounds of new columns before each decision: the first program needs more than those that follow. */
 const FIRST_ROUNDS = 12;
 const LATER_ROUNDS = 3;
@@ -61,8 +63,9 @@ export function dive(
     const ranked = columns.map((column, k) => ({ column, x: answer.x[k]! })).filter((c) => c.x > 1e-6);
     ranked.sort((a, b) => b.x - a.x || prices[b.column.stock]! - prices[a.column.stock]!);
     if (ranked.length === 0) return null;
+    const atOnce = Math.max(1, Math.floor(ranked.reduce((sum, r) => sum + r.x, 0) * AT_ONCE));
     for (const [k, { column, x }] of ranked.entries()) {
-      const copies = Math.max(k === 0 ? 1 : 0, Math.floor(x + 1 - NEARLY_WHOLE));
+      const copies = Math.max(k < atOnce ? 1 : 0, Math.floor(x + 1 - NEARLY_WHOLE));
       for (let n = copies; n > 0 && slabs[column.stock]! > 0; n--) {
         const cut = k === 0 || isWithin(column, left) ? cutTrimmed(context, column, answer.value, left) : null;
         if (!cut) break;

@@ -1,6 +1,6 @@
 import { cheapestMix } from '../bound/cheapest-mix';
 import { demandOf, type Problem } from '../model/problem';
-import { provenCut, type ProvenCut } from './context';
+import { provenCut, type ProvenCut, type SearchContext } from './context';
 import { dive, realiseUsed } from './dive';
 import type { Generation } from './generate-columns';
 import { greedy } from './greedy';
@@ -16,8 +16,9 @@ import {
   type SearchState,
 } from './search-state';
 
-/** Bound and objective this share apart are near enough for a first dive. */
+/** Bound and objective this share apart are near enough for a first dive: with sections the last bit takes long. */
 const ROUGH = 0.02;
+const ROUGH_IN_ROWS = 0.001;
 
 /** Work that looking for a longer offcut may always take. */
 const LEAST_POLISH = 20_000;
@@ -38,7 +39,7 @@ export function search(problem: Problem, limits: SearchLimits): SearchResult {
     return state.done() || context.spend(0);
   };
   if (!learn()) {
-    const rough = relax(context, areaValues(context), ROUGH);
+    const rough = relax(context, areaValues(context), hasSections(context) ? ROUGH : ROUGH_IN_ROWS);
     if (!learn(provenCut(problem, rough))) {
       plunge(state, rough);
       const first = relax(context, rough.value, MET);
@@ -48,6 +49,9 @@ export function search(problem: Problem, limits: SearchLimits): SearchResult {
   polish(state);
   return state.result();
 }
+
+const hasSections = ({ problem, rowsAt }: SearchContext): boolean =>
+  problem.stock.some((s) => rowsAt(s.depth).shallow.length > 0);
 
 /** The longest offcut at the price found, with no more work than the price took. */
 function polish(state: SearchState): void {
