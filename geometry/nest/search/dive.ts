@@ -34,6 +34,7 @@ const DIVE_NODES = 1000;
  * @param demand - copies of each item to cut
  * @param counts - slabs that may be used, by stock entry
  * @param below - gives up when the plan cannot cost less than this
+ * @param lead - place, among the columns most used, of the one taken first: another one leads to another plan
  * @returns the columns of a plan, or null when the slabs run out or the plan would cost too much
  */
 export function dive(
@@ -41,6 +42,7 @@ export function dive(
   demand: readonly number[],
   counts: readonly number[],
   below: number,
+  lead = 0,
 ): RealColumn[] | null {
   const { problem } = context;
   const prices = problem.stock.map((s) => s.price);
@@ -63,6 +65,7 @@ export function dive(
     const ranked = columns.map((column, k) => ({ column, x: answer.x[k]! })).filter((c) => c.x > 1e-6);
     ranked.sort((a, b) => b.x - a.x || prices[b.column.stock]! - prices[a.column.stock]!);
     if (ranked.length === 0) return null;
+    if (taken.length === 0) ranked.unshift(...ranked.splice(lead % ranked.length, 1));
     const atOnce = Math.max(1, Math.floor(ranked.reduce((sum, r) => sum + r.x, 0) * AT_ONCE));
     for (const [k, { column, x }] of ranked.entries()) {
       const copies = Math.max(k < atOnce ? 1 : 0, Math.floor(x + 1 - NEARLY_WHOLE));

@@ -20,6 +20,9 @@ import {
 const ROUGH = 0.02;
 const ROUGH_IN_ROWS = 0.001;
 
+/** Dives from the finished relaxation when there are sections: each begins elsewhere, and finds more columns than the last. */
+const MORE_DIVES = 3;
+
 /** Work that looking for a longer offcut may always take. */
 const LEAST_POLISH = 20_000;
 
@@ -33,17 +36,21 @@ export function search(problem: Problem, limits: SearchLimits): SearchResult {
     if (patterns) state.offer(patterns, picked);
     if (context.spend(1)) break;
   }
+  const isOver = (): boolean => state.done() || context.spend(0);
   const learn = (...cuts: ProvenCut[]): boolean => {
     state.learnt.cuts.push(...cuts);
     state.raise(boundOf(problem, state.learnt.cuts, state.below()));
-    return state.done() || context.spend(0);
+    return isOver();
   };
   if (!learn()) {
     const rough = relax(context, areaValues(context), hasSections(context) ? ROUGH : ROUGH_IN_ROWS);
     if (!learn(provenCut(problem, rough))) {
       plunge(state, rough);
       const first = relax(context, rough.value, MET);
-      if (!learn(provenCut(problem, first))) improve(state, first.value);
+      if (!learn(provenCut(problem, first))) {
+        for (let lead = 0; lead < MORE_DIVES && hasSections(context) && !isOver(); lead++) plunge(state, first, lead);
+        improve(state, first.value);
+      }
     }
   }
   polish(state);
@@ -63,7 +70,7 @@ function polish(state: SearchState): void {
 }
 
 /** A first good plan, by diving from the relaxation with the options of the cheapest mix. */
-function plunge({ context, learnt, below, offer }: SearchState, first: Generation): void {
+function plunge({ context, learnt, below, offer }: SearchState, first: Generation, lead = 0): void {
   const { problem } = context;
   const prices = problem.stock.map((s) => s.price);
   const counts = problem.stock.map((s) => s.count);
@@ -72,7 +79,7 @@ function plunge({ context, learnt, below, offer }: SearchState, first: Generatio
   const { picked } = answer.mix;
   const demand = demandOf(problem, picked);
   realiseUsed(context, first, demand);
-  const columns = dive(context, demand, counts, below());
+  const columns = dive(context, demand, counts, below(), lead);
   if (columns)
     offer(
       columns.map((c) => c.pattern),
