@@ -30,7 +30,7 @@ export function Fact({ label, value, note, from }: FactProps) {
 }
 
 /** Leads to a line of 'Where from'. */
-export function FromLink({ line }: { readonly line: string }) {
+export function FromLink({ line, label = 'Where from' }: { readonly line: string; readonly label?: string }) {
   const { showLine } = useWorkPart();
   return (
     <Press
@@ -40,7 +40,7 @@ export function FromLink({ line }: { readonly line: string }) {
       hitSlop={{ top: 6, bottom: 6 }}
     >
       <Text kind="small" tone="chalk" style={styles.line}>
-        Where from
+        {label}
       </Text>
     </Press>
   );

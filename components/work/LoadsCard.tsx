@@ -10,7 +10,7 @@ import { Banner } from '../ui/Banner';
 import { Table } from '../ui/Table';
 import { Text } from '../ui/Text';
 import { space } from '../ui/tokens';
-import { Fact } from './Fact';
+import { Fact, FromLink } from './Fact';
 import { Section } from './Part';
 
 /** What is carried in one go: weight, hands, and the way into the house. */
@@ -87,8 +87,11 @@ export function LoadsCard() {
           value={<Fraction inches={access.clearLength} step={step} bold />}
         />
       )}
-      <Fact label="Weight" value="" from="Weight of a piece" />
-      <Fact label="People" value="" from="People to carry" note="The index over 1 is heavy for each of them." />
+      <View style={{ flexDirection: 'row', flexWrap: 'wrap', columnGap: space.l }}>
+        <FromLink line="Weight of a piece" label="Weight" />
+        <FromLink line="People to carry" label="People" />
+        <FromLink line="Lifting index" label="Lifting index: over 1 is heavy" />
+      </View>
       <Banner icon="look" fact="Lifting." act={CAUTIONS.lifting.text} />
     </Section>
   );

@@ -5,6 +5,7 @@ import { useOpenJob } from '../editor/JobProvider';
 import { Fraction } from '../measure/Fraction';
 import { Text } from '../ui/Text';
 import { Fact } from './Fact';
+import { IslandHangs } from './IslandHangs';
 import { Section } from './Part';
 
 /** How far this wood may hang over with nobody's brackets under it, as advice. */
@@ -29,6 +30,9 @@ export function OverhangCard() {
         value={<Fraction inches={longest('along')} step={step} bold />}
         from="Load on the edge of an overhang"
       />
+      {layout.islands.map((island) => (
+        <IslandHangs key={island.id} island={island} />
+      ))}
       <Text kind="second">
         {`For a 12 in strip with 100 lb on its edge, sag up to a 180th of the overhang. Further out, put brackets or a rail under it. ${CAUTIONS.strength.text}`}
       </Text>

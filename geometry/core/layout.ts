@@ -153,6 +153,16 @@ export interface Island {
   readonly corner?: number;
   /** Own axes, x along the grain from the left end, y from the front edge; for 'free'. */
   readonly outline?: readonly Point[];
+  /** How far it hangs past its cabinets on each side, inches; a side that is not typed is carried to its edge. */
+  readonly hangs?: IslandHangs;
+}
+
+/** Front is the island's own y = 0; left is x = 0, where its grain begins. */
+export interface IslandHangs {
+  readonly front?: number;
+  readonly back?: number;
+  readonly left?: number;
+  readonly right?: number;
 }
 
 /** A narrow rectangle with the grain along it: backsplash, filler, shelf. */

@@ -1,3 +1,4 @@
+import type { Island } from '../core/layout';
 import { dot, subtract } from '../core/vector';
 import type { LaidRun } from '../top/types';
 import type { WallFrame } from '../top/wall-frame';
@@ -11,7 +12,7 @@ import type { Finding } from './types';
 import { capital, pounds, sizePair } from './words';
 
 interface Overhang {
-  readonly side: 'front' | 'left' | 'right';
+  readonly side: 'front' | 'back' | 'left' | 'right';
   readonly way: OverhangWay;
   readonly length: number;
 }
@@ -21,20 +22,36 @@ export const overhangUnsupported: Rule = (facts) => {
   const species = speciesOf(facts.layout.material.species);
   if (!species || facts.layout.material.thickness <= 0) return [];
   const { grain, thickness } = facts.layout.material;
-  return facts.tops.runs.flatMap((laid) => {
-    const wall = facts.wallById.get(laid.wall);
-    if (!wall || facts.runById.get(laid.id)?.side === 'back') return [];
-    return overhangs(facts, laid, wall).flatMap((overhang) => {
-      const check = checkOverhang(species, grain, overhang.way, overhang.length, thickness);
-      return check.holds ? [] : [tooFar(facts, laid, overhang, check)];
+  const check = (id: string, all: readonly Overhang[]): readonly Finding[] =>
+    all.flatMap((overhang) => {
+      const checked = checkOverhang(species, grain, overhang.way, overhang.length, thickness);
+      return checked.holds ? [] : [tooFar(facts, id, overhang, checked)];
     });
-  });
+  return [
+    ...facts.tops.runs.flatMap((laid) => {
+      const wall = facts.wallById.get(laid.wall);
+      return wall ? check(laid.id, overhangs(facts, laid, wall)) : [];
+    }),
+    ...facts.layout.islands.flatMap((island) =>
+      facts.piecesOn.has(island.id) ? check(island.id, hangsOf(island)) : [],
+    ),
+  ];
 };
 
-/** Past the front of the shallowest cabinet, across the grain; past the last cabinet at an open end, along it. */
+/** What was typed for an island: seats along its front and back hang across the grain, its ends along it. */
+function hangsOf({ hangs = {} }: Island): readonly Overhang[] {
+  const ways = { front: 'across', back: 'across', left: 'along', right: 'along' } as const;
+  return (Object.keys(ways) as Overhang['side'][]).map((side) => ({ side, way: ways[side], length: hangs[side] ?? 0 }));
+}
+
+/**
+ * Past the front of the shallowest cabinet, across the grain; past the last cabinet at an open end, along it. What stands
+ * below a run on the far side of a wall is not drawn, so only what was typed for its open ends is known.
+ */
 function overhangs(facts: Facts, laid: LaidRun, wall: WallFrame): readonly Overhang[] {
   const [from, to] = [Math.min(laid.backFrom, laid.frontFrom), Math.max(laid.backTo, laid.frontTo)];
-  const bases = basesUnder(facts, laid).filter((base) => {
+  const far = facts.runById.get(laid.id)?.side === 'back';
+  const bases = (far ? [] : basesUnder(facts, laid)).filter((base) => {
     const [a, b] = baseReach(wall, base);
     return carriesTop(base) && b > from && a < to;
   });
@@ -54,7 +71,7 @@ function overhangs(facts: Facts, laid: LaidRun, wall: WallFrame): readonly Overh
 
 function tooFar(
   facts: Facts,
-  laid: LaidRun,
+  id: string,
   { side, way, length }: Overhang,
   check: ReturnType<typeof checkOverhang>,
 ): Finding {
@@ -62,9 +79,9 @@ function tooFar(
   return finding({
     code: 'overhang-unsupported',
     severity: 'warn',
-    text: `${capital(runName(facts, laid.id))} hangs ${size(facts, length)} past the cabinets at the ${side}, ${way} the grain: ${pounds(EDGE_LOAD.value)} on the edge bends it ${sags}, and ${limit} is the limit.`,
+    text: `${capital(runName(facts, id))} hangs ${size(facts, length)} past the cabinets at the ${side}, ${way} the grain: ${pounds(EDGE_LOAD.value)} on the edge bends it ${sags}, and ${limit} is the limit.`,
     action: `Put brackets or a panel under it, or keep it to ${size(facts, Math.floor(check.longest * 8) / 8)}. Advice, not an engineer's approval.`,
-    at: { run: laid.id, detail: side },
+    at: { run: id, detail: side },
     source: `P L^3 / 3 E I with E of the Wood Handbook; ${sourceText(EDGE_LOAD)}`,
   });
 }

@@ -81,6 +81,7 @@ export function jobFileSchema(units: LengthUnit) {
           shape: z.enum(['rectangle', 'clipped', 'rounded', 'free']).optional(),
           corner: length.optional(),
           outline: z.array(point).min(3).optional(),
+          hangs: z.strictObject({ front: length, back: length, left: length, right: length }).partial().optional(),
         }),
       )
       .optional(),

@@ -104,6 +104,10 @@ export const islandSchema = z.strictObject({
   shape: z.enum(['rectangle', 'clipped', 'rounded', 'free']).optional(),
   corner: notNegative.optional(),
   outline: outline.optional(),
+  hangs: z
+    .strictObject({ front: notNegative, back: notNegative, left: notNegative, right: notNegative })
+    .partial()
+    .optional(),
 });
 
 export const stripSchema = z.strictObject({
@@ -159,7 +163,8 @@ export const climateYearSchema = z.strictObject({
 });
 
 export const fixingSchema = z.strictObject({
-  rail: notNegative, backsplash: notNegative,
+  rail: notNegative,
+  backsplash: notNegative,
   screw: notNegative.optional(),
   connector: z.string().max(60).optional(),
 });
