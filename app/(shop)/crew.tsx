@@ -1,5 +1,6 @@
-import { CrewScreen } from '@/components/crew/CrewScreen';
+import { useShopPages } from '@/components/shell/use-shop-pages';
 
 export default function Crew() {
+  const { CrewScreen } = useShopPages();
   return <CrewScreen />;
 }

@@ -1,5 +1,6 @@
-import { SettingsScreen } from '@/components/settings/SettingsScreen';
+import { useShopPages } from '@/components/shell/use-shop-pages';
 
 export default function Settings() {
+  const { SettingsScreen } = useShopPages();
   return <SettingsScreen />;
 }

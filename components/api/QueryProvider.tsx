@@ -46,7 +46,12 @@ export function QueryProvider({ children }: { readonly children: ReactNode }) {
   const [client] = useState(makeClient);
   const [persister] = useState(makePersister);
   return (
-    <PersistQueryClientProvider client={client} persistOptions={{ persister, maxAge: KEPT_MS, buster: STORED_SHAPE }}>
+    <PersistQueryClientProvider
+      client={client}
+      persistOptions={{ persister, maxAge: KEPT_MS, buster: STORED_SHAPE }}
+      // What this device remembers may be older than the last change made on it: shown at once, asked again at once.
+      onSuccess={() => void client.invalidateQueries()}
+    >
       {children}
     </PersistQueryClientProvider>
   );

@@ -3,6 +3,7 @@ import { useState } from 'react';
 import type { Job } from '@/shared/contracts/jobs';
 import { ApiError } from '../api/api-problem';
 import { fetchSheets } from '../api/use-sheets';
+import { KEEP_MS, saveAs } from './save-file';
 
 export interface SheetActions {
   readonly busy: 'download' | 'print' | null;
@@ -10,9 +11,6 @@ export interface SheetActions {
   readonly download: () => void;
   readonly print: () => void;
 }
-
-/** ms a printed file stays in memory: the browser's own viewer reads it late. */
-const KEEP_MS = 120_000;
 
 /** Fetches the PDF of a revision or the draft, and saves or prints it. */
 export function useSheetActions(choice: {
@@ -43,15 +41,6 @@ export function useSheetActions(choice: {
     download: () => void act('download', (address) => saveAs(address, name)),
     print: () => void act('print', printFile),
   };
-}
-
-function saveAs(address: string, name: string): void {
-  const link = document.createElement('a');
-  link.href = address;
-  link.download = name;
-  document.body.append(link);
-  link.click();
-  link.remove();
 }
 
 /** Prints from a hidden frame; where the browser has no viewer in frames, the file opens in a tab of its own. */

@@ -1,7 +1,8 @@
 import { usePathname, useRouter } from 'expo-router';
-import { useEffect, type ReactNode } from 'react';
+import { Suspense, useEffect, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
+import { may } from '@/shared/roles/roles';
 import { startSession } from '../api/client';
 import { useSession } from '../api/use-session';
 import { AppShell } from '../ui/AppShell';
@@ -14,7 +15,7 @@ import { color, space } from '../ui/tokens';
 export function ShopShell({ children }: { readonly children: ReactNode }) {
   const router = useRouter();
   const path = usePathname();
-  const { status } = useSession();
+  const { status, me } = useSession();
 
   useEffect(() => {
     if (status === 'starting') void startSession();
@@ -25,16 +26,20 @@ export function ShopShell({ children }: { readonly children: ReactNode }) {
 
   if (status !== 'in') return <Opening />;
   return (
-    <AppShell sections={sections(path)} onNavigate={(href) => router.navigate(href as never)}>
-      {children}
+    <AppShell
+      sections={sections(path, me !== null && may(me.role, 'stock.see'))}
+      onNavigate={(href) => router.navigate(href as never)}
+    >
+      <Suspense fallback={<Opening />}>{children}</Suspense>
     </AppShell>
   );
 }
 
 /** Sections of the shop that have a page. */
-function sections(path: string): NavItem[] {
+function sections(path: string, seesStock: boolean): NavItem[] {
   const all: NavItem[] = [
     { key: 'jobs', label: 'Jobs', icon: 'jobs', href: '/jobs' },
+    ...(seesStock ? [{ key: 'stock', label: 'Stock', icon: 'stock', href: '/stock' } as const] : []),
     { key: 'crew', label: 'Crew', icon: 'crew', href: '/crew' },
     { key: 'account', label: 'Account', icon: 'person', href: '/account' },
   ];

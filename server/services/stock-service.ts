@@ -1,9 +1,10 @@
 import type { Knex } from 'knex';
 
-import type { ParsedBody } from '@/shared/contracts/contract';
+import type { ParsedBody, ResponseOf } from '@/shared/contracts/contract';
 import {
   wholeSlabSchema,
   type createStock,
+  type importStock,
   type StockSlab,
   type updateStock as updateStockContract,
 } from '@/shared/contracts/stock';
@@ -44,6 +45,35 @@ export class StockService {
       const id = await insertStock(trx, actor.shopId, fields);
       await this.changed(trx, actor, 'stock.added', fields.code);
       return seenBy(actor, await mustFind(trx, id));
+    });
+  }
+
+  /** Adds many; those whose code is taken, by the stock or by one before it, are named and left out. */
+  import(actor: Actor, slabs: ParsedBody<typeof importStock>['slabs']): Promise<ResponseOf<typeof importStock>> {
+    return inShopOnce(this.db, actor, 'stock.edit', async (trx) => {
+      const added: StockSlab[] = [];
+      const refused: { index: number; code: string; message: string }[] = [];
+      for (const [index, fields] of slabs.entries()) {
+        const { code } = fields;
+        if (await isStockCodeTaken(trx, code))
+          refused.push({ index, code, message: `There is a slab called ${code}.` });
+        else added.push(seenBy(actor, await mustFind(trx, await insertStock(trx, actor.shopId, fields))));
+      }
+      const data = { added: added.length, refused: refused.length };
+      await logAct(trx, { shopId: actor.shopId, personId: actor.personId, action: 'stock.imported', data });
+      await announce(trx, actor.shopId, { kind: 'stock' });
+      return { added, refused };
+    });
+  }
+
+  /** Takes many out of the list. */
+  remove(actor: Actor, ids: readonly string[]): Promise<{ removed: number }> {
+    return inShop(this.db, actor, 'stock.edit', async (trx) => {
+      let removed = 0;
+      for (const id of ids) if (await deleteStock(trx, id)) removed++;
+      await logAct(trx, { shopId: actor.shopId, personId: actor.personId, action: 'stock.removed', data: { removed } });
+      await announce(trx, actor.shopId, { kind: 'stock' });
+      return { removed };
     });
   }
 

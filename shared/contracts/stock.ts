@@ -60,6 +60,9 @@ const newSlab = z
   .superRefine(defectsLieOnSlab)
   .superRefine(leavesWood);
 
+/** Most slabs of one import. */
+const MOST_IMPORTED = 500;
+
 const slabParams = z.strictObject({ slabId: uuid });
 
 export const listStock = contract({
@@ -101,6 +104,30 @@ export const deleteStock = contract({
   params: slabParams,
   response: null,
   problems: ['not_found'],
+});
+
+export const importStock = contract({
+  method: 'post',
+  path: '/stock/import',
+  summary: 'Add many slabs at once; those whose code is taken are named and left out, the others are kept.',
+  may: 'stock.edit',
+  creates: true,
+  body: z.strictObject({ slabs: z.array(newSlab).min(1).max(MOST_IMPORTED).readonly() }),
+  response: z.strictObject({
+    added: z.array(stockSlabSchema),
+    refused: z.array(z.strictObject({ index: z.number().int(), code: z.string(), message: z.string() })),
+  }),
+  problems: [],
+});
+
+export const removeStock = contract({
+  method: 'post',
+  path: '/stock/removals',
+  summary: 'Take many slabs out of the list at once: the undo of an import. Slabs that are gone already do no harm.',
+  may: 'stock.edit',
+  body: z.strictObject({ ids: z.array(uuid).min(1).max(MOST_IMPORTED).readonly() }),
+  response: z.strictObject({ removed: z.number().int() }),
+  problems: [],
 });
 
 /** Checks a slab as it would be after a change. */

@@ -44,6 +44,8 @@ const BODIES: Readonly<Record<string, () => object>> = {
   sendBack: () => ({ note: 'No.' }),
   createStock: () => ({ ...SLAB, code: randomUUID(), priceCents: 1 }),
   updateStock: () => ({ count: 1 }),
+  importStock: () => ({ slabs: [{ ...SLAB, code: randomUUID(), priceCents: 1 }] }),
+  removeStock: () => ({ ids: [randomUUID()] }),
   createRackPiece: () => SLAB,
   postWork: () => ({ sentAt: new Date().toISOString(), acts: [] }),
 };

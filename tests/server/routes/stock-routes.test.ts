@@ -168,3 +168,36 @@ describe('POST /layouts/:layoutId/stock', () => {
     expect(body.layout.stock.kerf).toBe(0.125);
   });
 });
+
+describe('/stock/import', () => {
+  it('takes what has a free code, names what has not, and takes all of it back', async () => {
+    const { code } = await newSlab();
+    const slabs = ['I1', code, 'I2', 'I1'].map((one) => ({ ...SLAB, code: one }));
+    const { body } = await owner.post('/stock/import', { slabs }).expect(201);
+
+    expect(body.added.map((slab: { code: string }) => slab.code)).toEqual(['I1', 'I2']);
+    expect(body.refused.map((one: { index: number }) => one.index)).toEqual([1, 3]);
+    const ids = body.added.map((slab: { id: string }) => slab.id);
+    expect((await owner.post('/stock/removals', { ids }).expect(200)).body).toEqual({ removed: 2 });
+    expect((await owner.post('/stock/removals', { ids }).expect(200)).body).toEqual({ removed: 0 });
+    const left = (await owner.get('/stock').expect(200)).body.slabs.map((slab: { code: string }) => slab.code);
+    expect(left).toContain(code);
+    expect(left).not.toContain('I1');
+  });
+
+  it('adds nothing where a slab makes no sense', async () => {
+    const slabs = [
+      { ...SLAB, code: 'J1' },
+      { ...SLAB, code: 'J2', priceCents: -1 },
+    ];
+    const { body } = await owner.post('/stock/import', { slabs }).expect(422);
+    expect(body.issues[0].path).toContain('slabs.1.priceCents');
+    expect(
+      (await owner.get('/stock').expect(200)).body.slabs.some((slab: { code: string }) => slab.code === 'J1'),
+    ).toBe(false);
+  });
+
+  it('is the owner’s alone', async () => {
+    await shopHand.post('/stock/import', { slabs: [{ ...SLAB, code: 'K1' }] }).expect(403);
+  });
+});
