@@ -13,6 +13,7 @@ import { Text } from '../ui/Text';
 import { space } from '../ui/tokens';
 import { BladeField } from './BladeField';
 import { someLength } from './length-checks';
+import { WoodLinks } from './WoodLinks';
 
 const PROFILES: readonly { readonly value: EdgeProfile['profile']; readonly label: string }[] = [
   { value: 'square', label: 'Square' },
@@ -40,6 +41,7 @@ export function JobPanel() {
       <EdgeFields layout={layout} set={set} />
       <FixingFields layout={layout} set={set} />
       <AccessFields layout={layout} set={set} />
+      <WoodLinks />
     </View>
   );
 }
