@@ -23,8 +23,9 @@ export function stepState(step: WorkStep, all: readonly WorkStep[], marks: WorkM
   const open = before.findLast((one) => !marks[one.key]?.doneAt);
   if (open) return { kind: 'waits', behind: open };
   for (const one of before) {
-    const ready = marks[one.key]?.readyAt;
-    if (ready && Date.parse(ready) > now) return { kind: 'curing', behind: one, until: ready };
+    const { doneAt, readyAt: ready } = marks[one.key] ?? {};
+    // Without a wait it is ready by being done, whatever the clock of the page last said.
+    if (ready && ready !== doneAt && Date.parse(ready) > now) return { kind: 'curing', behind: one, until: ready };
   }
   return { kind: 'next' };
 }
