@@ -129,9 +129,12 @@ class MarkPen {
       ...this.through([[-0.5 + head * 1.4, -head], [-0.5, 0], [-0.5 + head * 1.4, head]], false), // prettier-ignore
       ...this.through([[0.5 - head * 1.4, -head], [0.5, 0], [0.5 - head * 1.4, head]], false), // prettier-ignore
     ];
-    // Wood may be as dark as ink, so the arrow has a casing.
+    // Wood may be as dark as ink, so the arrow has a casing; what always stays dark is drawn on light wood alone.
+    const casing = this.mark.ink !== 'tapeInk';
     return [
-      { kind: 'path', path, line: { paint: 'card', width: 4.6 * this.view.pixel } },
+      ...(casing
+        ? [{ kind: 'path' as const, path, line: { paint: 'card' as const, width: 4.6 * this.view.pixel } }]
+        : []),
       { kind: 'path', path, line: { paint: this.mark.ink, width: 1.8 * this.view.pixel } },
     ];
   }

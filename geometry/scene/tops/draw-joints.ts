@@ -3,7 +3,7 @@ import type { Point, Polygon } from '../../core/point';
 import { along, cross, distance, subtract, unit } from '../../core/vector';
 import type { Plan } from '../../plan/types';
 import type { PlacedCutout, TopSeam } from '../../top/types';
-import type { DrawItem } from '../display-list';
+import type { DrawItem, Ink } from '../display-list';
 import { woodLook } from '../primitives/wood-look';
 import { text } from '../room/scene-styles';
 
@@ -16,7 +16,7 @@ const HANDLE_OFF = 52;
 const HANDLE = 46;
 
 /** The line of a joint, from its back corner to its front corner. */
-export function drawJoint(joint: Joint, layout: Layout, selected = false): DrawItem {
+export function drawJoint(joint: Joint, layout: Layout, selected = false, ink: Ink = 'ink'): DrawItem {
   return {
     layer: 'joints',
     id: joint.between.join('-'),
@@ -25,7 +25,7 @@ export function drawJoint(joint: Joint, layout: Layout, selected = false): DrawI
     to: joint.to,
     stroke: selected
       ? { ink: 'chalk', width: 5, casing: true }
-      : { ink: 'ink', width: 3.2, casing: woodLook(layout.material.species).dark },
+      : { ink, width: 3.2, casing: woodLook(layout.material.species).dark },
   };
 }
 

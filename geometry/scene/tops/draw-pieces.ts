@@ -3,7 +3,7 @@ import type { Point, Polygon } from '../../core/point';
 import { boundingBox } from '../../core/polygon';
 import { along, distance, dot, leftNormal, subtract, unit } from '../../core/vector';
 import type { PlacedCutout, Piece } from '../../top/types';
-import type { DrawItem, Stroke } from '../display-list';
+import type { DrawItem, Ink, Stroke } from '../display-list';
 import { woodLook } from '../primitives/wood-look';
 import { text } from '../room/scene-styles';
 import { letterPlace } from './letter-place';
@@ -43,12 +43,19 @@ export function drawWood(piece: Piece, layout: Layout, grain: boolean): DrawItem
 }
 
 /**
+ * What lines on the pieces are drawn with. Light wood stays light when the screen is dark, so its lines stay dark; on dark
+ * wood, and on none, they are as all lines.
+ */
+export const inkOnWood = (layout: Layout, grain: boolean): Ink =>
+  grain && !woodLook(layout.material.species).dark ? 'tapeInk' : 'ink';
+
+/**
  * The edge of a piece, left out where a cutout has taken it away. Black on dark wood needs the casing that chalk needs on
  * any. The polygon itself has no line where parts of it are missing.
  */
-export function drawOutline(piece: Piece, layout: Layout, selected: boolean): DrawItem[] {
+export function drawOutline(piece: Piece, layout: Layout, selected: boolean, ink: Ink = 'ink'): DrawItem[] {
   const dark = woodLook(layout.material.species).dark;
-  const stroke: Stroke = selected ? { ink: 'chalk', width: 4, casing: true } : { ink: 'ink', width: 2, casing: dark };
+  const stroke: Stroke = selected ? { ink: 'chalk', width: 4, casing: true } : { ink, width: 2, casing: dark };
   const tag = { layer: 'tops', id: piece.letter } as const;
   const holes = piece.cutouts.map((cutout) => cutout.outline.map((p) => toRoom(piece, p)));
   const lines = piece.outline.flatMap((from, i) => leftOf([{ from, to: piece.outline[(i + 1) % piece.outline.length]! }], holes)); // prettier-ignore
@@ -92,7 +99,7 @@ function outside({ from, to }: Segment, hole: Polygon): Segment[] {
 }
 
 /** Letter on a disc where the piece has room beside its cutouts, and an arrow along the grain next to it. */
-export function drawLetter(piece: Piece, grain: boolean): DrawItem[] {
+export function drawLetter(piece: Piece, grain: boolean, ink: Ink = 'ink'): DrawItem[] {
   const holes = piece.cutouts.map((cutout) => cutout.outline);
   const at = toRoom(piece, letterPlace(piece.shape, holes, piece.depth));
   const tag = { layer: 'letters', id: piece.letter } as const;
@@ -109,19 +116,19 @@ export function drawLetter(piece: Piece, grain: boolean): DrawItem[] {
     shift: [back[0] * ARROW_OFF, back[1] * ARROW_OFF],
     mark: 'grainArrow',
     size: ARROW,
-    ink: 'ink',
+    ink,
     turn: Math.atan2(piece.grain[1], piece.grain[0]),
   };
   return [disc, arrow];
 }
 
 /** The hole: its edge, and a cross to say that nothing is there. */
-export function drawCutout(cutout: PlacedCutout, layout: Layout, selected: boolean): DrawItem[] {
+export function drawCutout(cutout: PlacedCutout, layout: Layout, selected: boolean, ink: Ink = 'ink'): DrawItem[] {
   const tag = { layer: 'cutouts', id: cutout.id } as const;
   const corners = farCorners(cutout.outline);
   const cross: DrawItem[] = corners.map(([from, to]) => ({ ...tag, kind: 'line', from, to, stroke: { ink: 'line', width: 1.3 } })); // prettier-ignore
   const casing = selected || woodLook(layout.material.species).dark;
-  const stroke: Stroke = { ink: selected ? 'chalk' : 'ink', width: selected ? 3.6 : 1.6, casing };
+  const stroke: Stroke = { ink: selected ? 'chalk' : ink, width: selected ? 3.6 : 1.6, casing };
   return [...cross, { ...tag, kind: 'polygon', outline: cutout.outline, stroke }];
 }
 

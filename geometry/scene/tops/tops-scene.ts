@@ -10,7 +10,7 @@ import { text } from '../room/scene-styles';
 import { outward, wallBodies, WALL_THICKNESS } from '../room/wall-bodies';
 import { runEnds, type OpenRunEnd } from './run-ends';
 import { drawConnectors, drawJoint, drawJointSize, drawSeam, drawSeamHandle, seamName } from './draw-joints';
-import { drawCutout, drawLetter, drawOutline, drawSizes, drawWood } from './draw-pieces';
+import { drawCutout, drawLetter, drawOutline, drawSizes, drawWood, inkOnWood } from './draw-pieces';
 
 /** What is shown besides the tops themselves; all of it when left out but sizes and hardware. */
 export interface TopsLayers {
@@ -44,19 +44,20 @@ export function topsScene(plan: Plan, layout: Layout, options: TopsSceneOptions 
   const lights = (piece: Plan['pieces'][number]) =>
     chosen(`piece ${piece.letter}`) || chosen(`top ${piece.on}`) || lit.has(piece.letter);
   const { pieces, cutouts, joints, seams } = plan;
+  const ink = inkOnWood(layout, layers.grain);
   const items: DrawItem[] = [
     ...(layers.walls ? surroundings(plan, layout) : []),
     ...pieces.map((piece) => drawWood(piece, layout, layers.grain)),
-    ...cutouts.flatMap((cutout) => drawCutout(cutout, layout, chosen(`cutout ${cutout.id}`))),
-    ...pieces.flatMap((piece) => drawOutline(piece, layout, false)),
-    ...joints.map((joint) => drawJoint(joint, layout, chosen(`joint ${joint.between.join('-')}`))),
+    ...cutouts.flatMap((cutout) => drawCutout(cutout, layout, chosen(`cutout ${cutout.id}`), ink)),
+    ...pieces.flatMap((piece) => drawOutline(piece, layout, false, ink)),
+    ...joints.map((joint) => drawJoint(joint, layout, chosen(`joint ${joint.between.join('-')}`), ink)),
     ...seams.flatMap((seam) => drawSeam(seam, cutouts)),
     ...pieces.filter(lights).flatMap((piece) => drawOutline(piece, layout, true)),
     ...runEnds(plan)
       .filter((end) => chosen(`end ${end.run} ${end.side}`))
       .map(drawRunEnd),
     ...(layers.hardware ? joints.flatMap(drawConnectors) : []),
-    ...pieces.flatMap((piece) => drawLetter(piece, layers.grain && !layers.sizes)),
+    ...pieces.flatMap((piece) => drawLetter(piece, layers.grain && !layers.sizes, ink)),
     ...(layers.sizes ? pieces.flatMap((piece) => drawSizes(piece, layout)) : []),
     ...(layers.sizes || options.jointSizes ? joints.flatMap((joint) => drawJointSize(joint, layout)) : []),
     ...seams.flatMap((seam) =>

@@ -1,7 +1,7 @@
 import type { DrawItem, Scene } from '@/geometry/scene/display-list';
 import { letterPlace, roomAt } from '@/geometry/scene/tops/letter-place';
 import { splitAt } from '@/geometry/scene/tops/draw-joints';
-import { toRoom } from '@/geometry/scene/tops/draw-pieces';
+import { inkOnWood, toRoom } from '@/geometry/scene/tops/draw-pieces';
 import { thumbnailScene } from '@/geometry/scene/tops/thumbnail-scene';
 import { topsScene } from '@/geometry/scene/tops/tops-scene';
 import type { Polygon } from '@/geometry/core/point';
@@ -137,5 +137,18 @@ describe('letterPlace', () => {
     expect(roomAt([70, 5], rectangle, [])).toBe(0);
     expect(roomAt([15, 10], rectangle, [[[10, 3], [34, 3], [34, 20], [10, 20]]])).toBe(0); // prettier-ignore
     expect(roomAt([30, 10], rectangle, [])).toBe(10);
+  });
+});
+
+describe('inkOnWood', () => {
+  const of = (species: string) => ({ ...layout, material: { ...layout.material, species } });
+
+  it('keeps lines dark on light wood, whatever the screen; on dark wood and on none they go with the screen', () => {
+    expect(inkOnWood(of('hard maple'), true)).toBe('tapeInk');
+    expect(inkOnWood(of('black walnut'), true)).toBe('ink');
+    expect(inkOnWood(of('hard maple'), false)).toBe('ink');
+    const lines = topsScene(plan, of('hard maple')).items.filter((item) => item.layer === 'joints');
+    expect(lines.every((item) => item.kind === 'line' && item.stroke.ink === 'tapeInk')).toBe(true);
+    expect(lines.length).toBeGreaterThan(0);
   });
 });
