@@ -36,3 +36,20 @@ export function invitationMail(shopName: string, invitedBy: string, role: Role, 
     ].join('\n'),
   };
 }
+
+export function sheetsMail(from: string, jobName: string, revision: number, link: string, note: string): MailText {
+  return {
+    subject: `Sheets of ${jobName}, revision ${revision}`,
+    body: [
+      'Hello,',
+      '',
+      `${from} sends you the sheets of ${jobName}, revision ${revision}:`,
+      '',
+      link,
+      '',
+      ...(note ? [note, ''] : []),
+      'Bin what was printed of an earlier revision.',
+      '',
+    ].join('\n'),
+  };
+}

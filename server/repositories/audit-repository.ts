@@ -46,3 +46,18 @@ export async function listActs(
     .limit(limit)
     .select<LoggedAct[]>('a.id', 'a.created_at as at', 'p.name as personName', 'a.action', 'a.data');
 }
+
+/** Acts of one kind on a job, newest first. */
+export async function listActsOf(
+  trx: Knex.Transaction,
+  jobId: string,
+  action: string,
+  limit: number,
+): Promise<LoggedAct[]> {
+  return trx('audit_log as a')
+    .leftJoin('people as p', 'p.id', 'a.person_id')
+    .where({ 'a.job_id': jobId, 'a.action': action })
+    .orderBy('a.created_at', 'desc')
+    .limit(limit)
+    .select<LoggedAct[]>('a.id', 'a.created_at as at', 'p.name as personName', 'a.action', 'a.data');
+}

@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { ALL_CONTRACTS, type NamedContract } from '@/shared/contracts/all-contracts';
 import { API_ROOT, type Contract } from '@/shared/contracts/contract';
 import { EVENTS_PATH, shopEventSchema } from '@/shared/contracts/events';
-import { SHEET_PATH, sheetParams, sheetQuery } from '@/shared/contracts/sheets';
+import { BUNDLE_PATH, bundleParams, SHEET_PATH, sheetParams, sheetQuery } from '@/shared/contracts/sheets';
 import { PROBLEMS, problemSchema, type ProblemCode } from '@/shared/problems/problem';
 import { may, ROLES } from '@/shared/roles/roles';
 
@@ -23,6 +23,7 @@ export function openApiDocument(): Json {
   for (const named of ALL_CONTRACTS) add(named.contract.path, named.contract.method, operationOf(named));
   add(EVENTS_PATH, 'get', eventsOperation());
   add(SHEET_PATH, 'get', sheetOperation());
+  add(BUNDLE_PATH, 'get', bundleOperation());
   return {
     openapi: '3.1.0',
     info: { title: 'Offsquare', version: '1', description: 'Lengths inches, angles degrees, money integer cents.' },
@@ -150,6 +151,19 @@ function sheetOperation(): Json {
       409: problemAnswer(['plan_refused']),
       422: problemAnswer(['validation_failed']),
       503: problemAnswer(['busy']),
+    },
+  };
+}
+
+function bundleOperation(): Json {
+  return {
+    ...sheetOperation(),
+    operationId: 'bundleSheets',
+    summary: 'Every sheet, drawing and list, and the job file, as one archive.',
+    parameters: [...parametersOf(bundleParams, 'path'), ...parametersOf(sheetQuery, 'query')],
+    responses: {
+      ...(sheetOperation().responses as Json),
+      200: { description: 'The archive.', content: { 'application/zip': {} } },
     },
   };
 }

@@ -7,18 +7,23 @@ import type { Plan } from '@/geometry/plan/types';
 import type { Layout } from '@/geometry/core/layout';
 import { usualGrid } from '@/geometry/scene/labels/label-grids';
 import type { SheetHead } from '@/geometry/scene/paper/sheet-head';
-import { sheetEntry, type SheetKind } from '@/geometry/scene/sheet-kinds';
+import { sheetEntry, SHEET_KINDS, type SheetKind } from '@/geometry/scene/sheet-kinds';
+import type { SheetPrint } from '@/shared/contracts/sheet-acts';
 import type { SheetQuery } from '@/shared/contracts/sheets';
 import { completeSettings } from '@/shared/contracts/shop-settings';
 import { may } from '@/shared/roles/roles';
 import { ProblemError } from '../http/problem-error';
+import { sheetsMail } from '../mail/mail-texts';
+import { listActsOf, logAct } from '../repositories/audit-repository';
 import { findMember } from '../repositories/crew-repository';
+import { addMail } from '../repositories/outbox-repository';
 import { listRevisions } from '../repositories/revision-repository';
+import { sheetBundle } from '../sheets/bundle';
 import { qrRows } from '../sheets/qr-rows';
 import { SheetError } from '../sheets/sheet-error';
 import { sheetPdf } from '../sheets/sheet-pdf';
 import type { Actor } from './actor';
-import { inShop } from './in-shop';
+import { inShop, inShopOnce } from './in-shop';
 import { mustFindJob } from './job-service';
 import { readCurrent, type NestService } from './nest-service';
 import { openLayout } from './open-layout';
@@ -28,6 +33,9 @@ import { mustBeSawable, mustFindRevision } from './revision-service';
 const DRAFT_SEARCH_MS = 5_000;
 /** Drafts whose slabs are remembered, so that printing twice gives the same sheet. */
 const REMEMBERED_DRAFTS = 40;
+
+const PRINTED = 'sheet.printed';
+const MOST_PRINTS = 100;
 
 /** What a sheet is printed from. */
 export interface Printable {
@@ -73,6 +81,7 @@ export class SheetService {
     const { paper, pages, grid, start } = query;
     const labels = { grid: grid ?? usualGrid(paper), start };
     const prices = may(actor.role, 'price.see');
+    if (query.revision !== 'draft') await this.printed(actor, jobId, query.revision, kinds);
     try {
       return {
         pdf: sheetPdf({ ...printable, kinds, paper, prices, labels, ...(pages && { only: pages }) }),
@@ -82,6 +91,59 @@ export class SheetService {
       if (error instanceof SheetError) throw new ProblemError('plan_refused', error.message);
       throw error;
     }
+  }
+
+  /** Everything of a revision, or of the draft, in one archive. @throws ProblemError as `print` */
+  async bundle(actor: Actor, jobId: string, query: SheetQuery, signal: AbortSignal): Promise<PrintedSheet> {
+    const { revision, paper } = query;
+    const printable = await this.printable(actor, jobId, revision, SHEET_KINDS, signal);
+    if (printable.plan.pieces.length === 0)
+      throw new ProblemError('plan_refused', 'There are no pieces yet. Lay a top first.');
+    if (revision !== 'draft') await this.printed(actor, jobId, revision, SHEET_KINDS);
+    const version = revision === 'draft' ? 'draft' : `revision-${revision}`;
+    return {
+      pdf: sheetBundle({ ...printable, paper, prices: may(actor.role, 'price.see') }),
+      fileName: `job-${printable.head.jobNumber}-${version}.zip`,
+    };
+  }
+
+  /** What went to paper of a job's revisions, newest first. @throws ProblemError not_found */
+  prints(actor: Actor, jobId: string): Promise<{ prints: SheetPrint[] }> {
+    return inShop(this.db, actor, 'job.see', async (trx) => {
+      await mustFindJob(trx, jobId);
+      const acts = await listActsOf(trx, jobId, PRINTED, MOST_PRINTS);
+      return {
+        prints: acts.map(({ at, personName, data }) => ({
+          revision: Number(data.revision),
+          kinds: data.kinds as string[],
+          at: at.toISOString(),
+          by: personName ?? '',
+        })),
+      };
+    });
+  }
+
+  /** Mails somebody of the crew the way to a revision's sheets. @throws ProblemError not_found */
+  mail(actor: Actor, jobId: string, personId: string, revision: number, note: string): Promise<{ sentTo: string }> {
+    return inShopOnce(this.db, actor, 'sheet.print', async (trx) => {
+      const job = await mustFindJob(trx, jobId);
+      await mustFindRevision(trx, jobId, revision);
+      const [to, from] = [await findMember(trx, personId), await findMember(trx, actor.personId)];
+      if (!to) throw new ProblemError('not_found', 'There is nobody like this in the crew.');
+      const link = `${this.publicUrl}/jobs/${jobId}/sheets`;
+      const text = sheetsMail(from?.name ?? '', job.name, revision, link, note);
+      await addMail(trx, { shopId: actor.shopId, kind: 'sheets', to: to.email, ...text });
+      const whose = { shopId: actor.shopId, personId: actor.personId, jobId };
+      await logAct(trx, { ...whose, action: 'sheet.mailed', data: { revision, to: to.name } });
+      return { sentTo: to.name };
+    });
+  }
+
+  private printed(actor: Actor, jobId: string, revision: number, kinds: readonly SheetKind[]): Promise<void> {
+    return inShop(this.db, actor, 'sheet.print', async (trx) => {
+      const whose = { shopId: actor.shopId, personId: actor.personId, jobId };
+      await logAct(trx, { ...whose, action: PRINTED, data: { revision, kinds } });
+    });
   }
 
   /**

@@ -9,6 +9,7 @@ import * as nest from './nest';
 import * as rack from './rack';
 import * as revisions from './revisions';
 import * as shop from './shop';
+import * as sheetActs from './sheet-acts';
 import * as stock from './stock';
 import * as work from './work';
 
@@ -20,7 +21,7 @@ export interface NamedContract {
   readonly contract: Contract;
 }
 
-const RESOURCES = { health, auth, crew, shop, jobs, layouts, jobFiles, nest, revisions, stock, rack, work };
+const RESOURCES = { health, auth, crew, shop, jobs, layouts, jobFiles, nest, revisions, stock, rack, sheetActs, work };
 
 /** Every contract there is, for the API document and for tests that go through all of them. */
 export const ALL_CONTRACTS: readonly NamedContract[] = Object.entries(RESOURCES).flatMap(([resource, exported]) =>

@@ -41,3 +41,8 @@ export const sheetQuery = z.strictObject({
 });
 
 export type SheetQuery = z.infer<typeof sheetQuery>;
+
+/** GET: every sheet, drawing and list of a revision or of the draft, and the job file, in one archive. */
+export const BUNDLE_PATH = '/jobs/:jobId/sheets.zip';
+
+export const bundleParams = z.strictObject({ jobId: uuid });

@@ -31,7 +31,7 @@ describe('GET /openapi.json', () => {
     const ids = operations.map(({ operationId }) => operationId).sort();
 
     expect(document.openapi).toBe('3.1.0');
-    expect(ids).toEqual([...ALL_CONTRACTS.map(({ name }) => name), 'listen', 'printSheets'].sort());
+    expect(ids).toEqual([...ALL_CONTRACTS.map(({ name }) => name), 'listen', 'printSheets', 'bundleSheets'].sort());
   });
 
   it('names every parameter of every path, and no other', () => {

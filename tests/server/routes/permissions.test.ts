@@ -45,6 +45,7 @@ const BODIES: Readonly<Record<string, () => object>> = {
   createStock: () => ({ ...SLAB, code: randomUUID(), priceCents: 1 }),
   updateStock: () => ({ count: 1 }),
   importStock: () => ({ slabs: [{ ...SLAB, code: randomUUID(), priceCents: 1 }] }),
+  mailSheets: () => ({ personId: randomUUID(), revision: 1 }),
   removeStock: () => ({ ids: [randomUUID()] }),
   createRackPiece: () => SLAB,
   postWork: () => ({ sentAt: new Date().toISOString(), acts: [] }),

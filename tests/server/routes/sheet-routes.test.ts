@@ -1,5 +1,7 @@
 import { randomUUID } from 'node:crypto';
 
+import AdmZip from 'adm-zip';
+import DxfParser from 'dxf-parser';
 import type { Response } from 'supertest';
 
 import { QUAY_STREET_SCULLERY } from '@/shared/layout/demo/quay-street-scullery';
@@ -131,5 +133,73 @@ describe('GET /jobs/:jobId/sheets/cut.pdf', () => {
 
   it("finds nothing of another shop's", async () => {
     await sheet('revision=1', randomUUID()).expect(404);
+  });
+});
+
+describe('what goes out of a revision', () => {
+  let fresh: { id: string };
+  const get = (path: string) =>
+    installer
+      .get(`/jobs/${fresh.id}${path}`)
+      .buffer(true)
+      .parse((response, done) => {
+        const chunks: Buffer[] = [];
+        response.on('data', (chunk: Buffer) => chunks.push(chunk));
+        response.on('end', () => done(null, Buffer.concat(chunks)));
+      });
+
+  beforeAll(async () => {
+    fresh = (await installer.post('/job-files', { file: QUAY_STREET_SCULLERY }).expect(201)).body as { id: string };
+    const { body } = await installer.post(`/jobs/${fresh.id}/nest`, { limitMs: 1000 }).expect(200);
+    await installer.post(`/jobs/${fresh.id}/revisions`, { seq: 0, nest: body.nest }).expect(201);
+  });
+
+  it('is written down when it is printed, a draft is not', async () => {
+    expect((await installer.get(`/jobs/${fresh.id}/prints`).expect(200)).body).toEqual({ prints: [] });
+    await get('/sheets/fit.pdf?revision=draft').expect(200);
+    await get('/sheets/fit.pdf?revision=1').expect(200);
+    const { body } = await installer.get(`/jobs/${fresh.id}/prints`).expect(200);
+    expect(body.prints).toEqual([
+      { revision: 1, kinds: ['fit'], at: expect.any(String), by: server.shop.people.installer.name },
+    ]);
+  });
+
+  it('prints chosen pages of the whole set', async () => {
+    const all = await get('/sheets/all.pdf?revision=1').expect(200);
+    const some = await get('/sheets/all.pdf?revision=1&pages=2,4-5').expect(200);
+    expect(pagesOf(all)).toBeGreaterThan(8);
+    expect(pagesOf(some)).toBe(3);
+    expect(textOf(some)).toContain(`2 of ${pagesOf(all)}`);
+    await get('/sheets/all.pdf?revision=1&pages=5-x').expect(422);
+    await get('/sheets/all.pdf?revision=1&pages=399').expect(409);
+  });
+
+  it('comes as one archive with every sheet, drawing, list and the job file', async () => {
+    const answer = await get('/sheets.zip?revision=1').expect(200);
+    expect(answer.headers['content-disposition']).toMatch(/job-\d+-revision-1\.zip/);
+    const zip = new AdmZip(bytes(answer));
+    const names = zip.getEntries().map((entry) => entry.entryName).sort(); // prettier-ignore
+    expect(names).toEqual(
+      ['cut.pdf', 'customer.pdf', 'finish.pdf', 'fit.pdf', 'job.json', 'joint.pdf', 'labels.pdf', 'order.csv', 'order.pdf', 'pieces.csv', 'pieces.dxf', 'pieces.svg', 'templates.pdf', 'tops.dxf', 'tops.svg'].sort(), // prettier-ignore
+    );
+    const file = JSON.parse(zip.readAsText('job.json')) as { runs: unknown[] };
+    expect(file.runs).toHaveLength(QUAY_STREET_SCULLERY.runs.length);
+    const drawing = new DxfParser().parseSync(zip.readAsText('tops.dxf'));
+    expect(drawing?.entities.length).toBeGreaterThan(4);
+    // Prices are nothing for an installer.
+    expect(zip.readAsText('order.csv')).not.toMatch(/price|379/i);
+  });
+
+  it('is mailed to somebody of the crew, once for one press', async () => {
+    const to = server.shop.people.shop_hand;
+    const { body } = await installer
+      .post(`/jobs/${fresh.id}/sheet-mails`, { personId: to.id, revision: 1, note: 'Saw on Monday.' })
+      .expect(201);
+    expect(body).toEqual({ sentTo: to.name });
+    const [mail] = await server.db('outbox').where({ kind: 'sheets', to_address: to.email });
+    expect(mail.body).toContain(`/jobs/${fresh.id}/sheets`);
+    expect(mail.body).toContain('Saw on Monday.');
+    await installer.post(`/jobs/${fresh.id}/sheet-mails`, { personId: randomUUID(), revision: 1 }).expect(404);
+    await installer.post(`/jobs/${fresh.id}/sheet-mails`, { personId: to.id, revision: 9 }).expect(404);
   });
 });
