@@ -1,5 +1,6 @@
 import { cheapestMix } from '../bound/cheapest-mix';
 import { demandOf, type Problem } from '../model/problem';
+import type { RealColumn } from './column';
 import { provenCut, type ProvenCut, type SearchContext } from './context';
 import { dive, realiseUsed } from './dive';
 import type { Generation } from './generate-columns';
@@ -7,6 +8,7 @@ import { greedy } from './greedy';
 import { improve } from './improve';
 import { lengthenOffcut } from './longest-offcut';
 import { areaValues, MET, relax } from './relax';
+import { roundOff } from './round-off';
 import {
   boundOf,
   createState,
@@ -16,7 +18,8 @@ import {
   type SearchState,
 } from './search-state';
 
-/** Bound and objective this share apart are near enough for a first dive: with sections the last bit takes long. */
+/** Bound and objective this share apart are near enough for a first look, and for a first dive: with sections the last bit takes long. */
+const COARSE = 0.1;
 const ROUGH = 0.02;
 const ROUGH_IN_ROWS = 0.001;
 
@@ -43,13 +46,19 @@ export function search(problem: Problem, limits: SearchLimits): SearchResult {
     return isOver();
   };
   if (!learn()) {
-    const rough = relax(context, areaValues(context), hasSections(context) ? ROUGH : ROUGH_IN_ROWS);
-    if (!learn(provenCut(problem, rough))) {
-      plunge(state, rough);
-      const first = relax(context, rough.value, MET);
-      if (!learn(provenCut(problem, first))) {
-        for (let lead = 0; lead < MORE_DIVES && hasSections(context) && !isOver(); lead++) plunge(state, first, lead);
-        improve(state, first.value);
+    const coarse = relax(context, areaValues(context), COARSE);
+    plunge(state, coarse, roundOff);
+    if (!learn(provenCut(problem, coarse))) {
+      const rough = relax(context, coarse.value, hasSections(context) ? ROUGH : ROUGH_IN_ROWS);
+      if (!rough.finished) plunge(state, rough, roundOff);
+      if (!learn(provenCut(problem, rough))) {
+        plunge(state, rough, diveFrom(0));
+        const first = relax(context, rough.value, MET);
+        if (!learn(provenCut(problem, first))) {
+          for (let lead = 0; lead < MORE_DIVES && hasSections(context) && !isOver(); lead++)
+            plunge(state, first, diveFrom(lead));
+          improve(state, first.value);
+        }
       }
     }
   }
@@ -69,17 +78,30 @@ function polish(state: SearchState): void {
   if (longer) state.replace(longer);
 }
 
-/** A first good plan, by diving from the relaxation with the options of the cheapest mix. */
-function plunge({ context, learnt, below, offer }: SearchState, first: Generation, lead = 0): void {
+type Finish = (
+  context: SearchContext,
+  from: Generation,
+  demand: readonly number[],
+  counts: readonly number[],
+  below: number,
+) => RealColumn[] | null;
+
+const diveFrom =
+  (lead: number): Finish =>
+  (context, from, demand, counts, below) => {
+    realiseUsed(context, from, demand);
+    return dive(context, demand, counts, below, lead);
+  };
+
+/** A plan from a relaxation, with the options of the cheapest mix. */
+function plunge({ context, learnt, below, offer }: SearchState, from: Generation, finish: Finish): void {
   const { problem } = context;
   const prices = problem.stock.map((s) => s.price);
   const counts = problem.stock.map((s) => s.count);
   const answer = cheapestMix({ prices, counts, ...learnt }, below(), MIX_NODES);
   if (answer.kind !== 'mix') return;
   const { picked } = answer.mix;
-  const demand = demandOf(problem, picked);
-  realiseUsed(context, first, demand);
-  const columns = dive(context, demand, counts, below(), lead);
+  const columns = finish(context, from, demandOf(problem, picked), counts, below());
   if (columns)
     offer(
       columns.map((c) => c.pattern),
