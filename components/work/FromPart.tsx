@@ -9,9 +9,10 @@ import { Button } from '../ui/Button';
 import { Field } from '../ui/Field';
 import { Chips } from '../ui/Segmented';
 import { EmptyState } from '../ui/StateCard';
-import { Table } from '../ui/Table';
+import { Table, type Column } from '../ui/Table';
 import { Text } from '../ui/Text';
 import { space } from '../ui/tokens';
+import { useWide } from '../ui/use-wide';
 import { useWorkPart } from './work-part';
 
 interface Line {
@@ -38,6 +39,28 @@ const COUNTS = countByStanding(WHERE_FROM);
 const STANDINGS = Object.keys(COUNTS) as readonly Standing[];
 const capital = (text: string): string => `${text.charAt(0).toUpperCase()}${text.slice(1)}`;
 
+const COLUMNS: readonly Column<Line>[] = [
+  { key: 'name', title: 'Figure', share: 3, cell: (one) => <Text>{one.name}</Text> },
+  { key: 'value', title: 'Value', share: 2, cell: (one) => <Text tabular>{one.figure}</Text> },
+  { key: 'standing', title: 'Known', width: 140, cell: (one) => <Text>{capital(one.standing)}</Text> },
+  { key: 'source', title: 'Source', share: 3, cell: (one) => <Text kind="second">{one.source || '-'}</Text> },
+];
+
+/** A phone has room for one column: the same under each other. */
+const STACKED: readonly Column<Line>[] = [
+  {
+    key: 'all',
+    title: 'Figure, value and source',
+    cell: (one) => (
+      <>
+        <Text kind="label">{one.name}</Text>
+        <Text tabular>{one.figure}</Text>
+        <Text kind="small">{[capital(one.standing), one.source].filter(Boolean).join(': ')}</Text>
+      </>
+    ),
+  },
+];
+
 /** Every constant and formula with how well it is known and where it is from. */
 export function FromPart() {
   const { line } = useWorkPart();
@@ -47,6 +70,7 @@ export function FromPart() {
 
 function Lines({ asked }: { readonly asked: string }) {
   const { showLine } = useWorkPart();
+  const wide = useWide();
   const [query, setQuery] = useState(asked);
   const [standing, setStanding] = useState<Standing | 'all'>('all');
   const shown = useMemo(() => {
@@ -100,13 +124,8 @@ function Lines({ asked }: { readonly asked: string }) {
           rowKey={(one) => one.name}
           rowLabel={(one) => `${one.name}, ${one.figure}, ${one.standing}`}
           selected={asked || null}
-          minWidth={760}
-          columns={[
-            { key: 'name', title: 'Figure', share: 3, cell: (one) => <Text>{one.name}</Text> },
-            { key: 'value', title: 'Value', share: 2, cell: (one) => <Text tabular>{one.figure}</Text> },
-            { key: 'standing', title: 'Known', width: 140, cell: (one) => <Text>{capital(one.standing)}</Text> },
-            { key: 'source', title: 'Source', share: 3, cell: (one) => <Text kind="second">{one.source || '-'}</Text> },
-          ]}
+          minWidth={wide ? 760 : 0}
+          columns={wide ? COLUMNS : STACKED}
         />
       )}
     </View>
