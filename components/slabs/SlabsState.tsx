@@ -2,6 +2,7 @@ import { useRouter } from 'expo-router';
 
 import { useMay } from '../api/use-session';
 import { useOpenJob } from '../editor/JobProvider';
+import type { NestSearch } from '../editor/use-nest';
 import { Button } from '../ui/Button';
 import { StateCard } from '../ui/StateCard';
 import { money } from './slab-words';
@@ -47,7 +48,7 @@ export function SlabsState() {
         icon="slabs"
         title="Trying plans"
         announce="status"
-        body={searchWords(nest.found, seesPrices ? (nest.plan?.cost ?? null) : null)}
+        body={searchWords(nest, seesPrices ? (nest.plan?.cost ?? null) : null)}
         actions={nest.plan ? <Button label="Stop and use best" onPress={nest.stop} /> : undefined}
       />
     );
@@ -62,9 +63,8 @@ export function SlabsState() {
   return null;
 }
 
-const searchWords = (found: number, best: number | null): string =>
-  best === null
-    ? found === 0
-      ? 'Looking for the first plan.'
-      : `${found} better ones found.`
-    : `${found} better ones found. Best so far ${money(best)}.`;
+const searchWords = ({ tried, found }: NestSearch, best: number | null): string => {
+  if (found === 0) return 'Looking for the first plan.';
+  const counts = `${tried.toLocaleString('en-US')} layouts tried, ${found} better ${found === 1 ? 'plan' : 'plans'} found.`;
+  return best === null ? counts : `${counts} Best so far ${money(best)}.`;
+};
