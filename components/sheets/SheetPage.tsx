@@ -18,7 +18,7 @@ const PAPER_PX = 96;
 
 /** One page as it will be printed: the same drawing, made smaller as a whole. */
 export const SheetPage = memo(function SheetPage({ scene, paper, width }: SheetPageProps) {
-  const page = PAPER_SIZE[paper];
+  const page = scene.paper ?? PAPER_SIZE[paper];
   const height = (width * page.height) / page.width;
   return (
     <View

@@ -3,109 +3,131 @@ import { useMemo, useState } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { useStore } from 'zustand';
 
-import { cutSheetPages } from '@/geometry/scene/cut-sheet/cut-sheet-scene';
-import { placeSlab } from '@/geometry/scene/slab/placed-slab';
+import type { Paper } from '@/geometry/scene/paper/sheet-head';
+import type { RevisionSummary } from '@/shared/contracts/revisions';
+import { useMay } from '../api/use-session';
+import { usePrints } from '../api/use-sheet-acts';
 import { useRevisions } from '../api/use-sheets';
 import { useOpenJob } from '../editor/JobProvider';
 import { JobFrame } from '../shell/JobFrame';
 import { Banner } from '../ui/Banner';
 import { Button } from '../ui/Button';
+import { MoreMenu } from '../ui/Menu';
 import { Segmented } from '../ui/Segmented';
 import { StateCard } from '../ui/StateCard';
 import { Text } from '../ui/Text';
+import { useToast } from '../ui/ToastProvider';
 import { color, space } from '../ui/tokens';
 import { useWide } from '../ui/use-wide';
+import { MailDialog } from './MailDialog';
+import { planFiles } from './plan-files';
+import { printedBefore } from './printed-before';
 import { RevisionBar } from './RevisionBar';
+import { saveText } from './save-file';
 import { SheetCard } from './SheetCard';
 import { sheetHeadOf } from './sheet-head-of';
-import { SheetPage } from './SheetPage';
+import { sheetItems } from './sheet-list';
+import { SheetPreview } from './SheetPreview';
+import { shareAddress } from './share-address';
 import { useSheetActions } from './use-sheet-actions';
 import { useShownPlan } from './use-shown-plan';
 
-/** Job > Sheets: preview, download and print what goes to the saw. */
+/** Job > Sheets: what goes to the saw, the bench, the house and the customer, to look at, print, send and keep. */
 export function SheetsScreen() {
-  const router = useRouter();
   const wide = useWide();
-  const { job, store, nest } = useOpenJob();
+  const toast = useToast();
+  const { job, store, settings } = useOpenJob();
+  const prices = useMay('price.see');
   const revisions = useRevisions(job.id);
+  const prints = usePrints(job.id);
   const [chosen, setChosen] = useState<number | 'draft' | null>(null);
-  const [paper, setPaper] = useState<'letter' | 'a4'>('letter');
-  const [open, setOpen] = useState(0);
-  const [width, setWidth] = useState(0);
+  const [paper, setPaper] = useState<Paper>('letter');
+  const [open, setOpen] = useState<string | null>(null);
+  const [mailing, setMailing] = useState(false);
   const all = useMemo(() => revisions.data?.revisions ?? [], [revisions.data]);
   const which = chosen ?? all[0]?.number ?? 'draft';
   const shown = useShownPlan(job.id, which);
   const revision = all.find((r) => r.number === which) ?? null;
-  const pages = useMemo(() => {
-    if (!shown?.plan.nest || shown.plan.nest.slabs.length === 0) return [];
+  const items = useMemo(() => {
+    if (!shown || shown.plan.pieces.length === 0) return [];
     const head = sheetHeadOf(job, revision, new Date().toISOString());
-    return cutSheetPages(shown.plan, shown.layout, head, paper);
-  }, [shown, job, revision, paper]);
-  const slabs = shown?.plan.nest?.slabs.map((_, i) => placeSlab(shown.plan, shown.layout, i)) ?? [];
+    return sheetItems({ ...shown, settings, head, paper, prices });
+  }, [shown, job, revision, settings, paper, prices]);
+  const item = items.find((one) => one.key === open) ?? items[0];
   const pending = useStore(store, (state) => state.pending.length);
   const actions = useSheetActions({ job, revision: which, paper });
   const waiting = which === 'draft' && pending > 0;
-  const buttons = (
-    <View style={styles.buttons}>
-      <Button
-        label="Download"
-        icon="download"
-        busy={actions.busy === 'download'}
-        disabled={pages.length === 0 || waiting}
-        onPress={actions.download}
-      />
-      <View style={styles.grow}>
-        <Button
-          label={pages.length === 1 ? 'Print the page' : `Print all ${pages.length}`}
-          icon="print"
-          look={pages.length > 0 ? 'primary' : 'secondary'}
-          wide
-          height={wide ? 48 : 56}
-          busy={actions.busy === 'print'}
-          disabled={pages.length === 0 || waiting}
-          onPress={actions.print}
-        />
-      </View>
-    </View>
+  const pages = items.reduce((sum, one) => sum + one.pages.length, 0);
+  const old = printedBefore(prints.data?.prints ?? [], all[0]?.number ?? null);
+  const files = shown
+    ? planFiles({ ...shown, settings, jobName: job.name, number: String(job.number).padStart(4, '0'), prices })
+    : [];
+  const share = async () => {
+    const how = await shareAddress(window.location.href, job.name);
+    if (how === 'copied') toast({ text: 'The address of these sheets is copied' });
+    if (how === 'failed') toast({ tone: 'failure', text: 'This browser would not share. Copy the address by hand.' });
+  };
+  const menu = [
+    ...(which === 'draft' ? [] : [{ key: 'mail', icon: 'mail', label: 'Mail to somebody of the crew', onPress: () => setMailing(true) } as const]), // prettier-ignore
+    { key: 'share', icon: 'share', label: 'Share the address', onPress: () => void share() } as const,
+    { key: 'zip', icon: 'download', label: 'Everything in one archive', onPress: actions.bundle } as const,
+    ...files.map((file) => ({
+      key: file.name,
+      icon: 'download' as const,
+      label: file.label,
+      onPress: () => saveText(file.name, file.write(), file.type),
+    })),
+  ];
+  const printAll = (
+    <Button
+      label={`Print all ${pages} pages`}
+      icon="print"
+      look={pages > 0 ? 'primary' : 'secondary'}
+      wide
+      height={wide ? 48 : 56}
+      busy={actions.busy === 'print'}
+      disabled={pages === 0 || waiting}
+      onPress={() => actions.print('all')}
+    />
   );
-  const subtitle =
-    which === 'draft'
-      ? 'Draft, not signed off'
-      : revision?.signedOff
-        ? `Revision ${which}, signed off by ${revision.signedOff.by.name}`
-        : `Revision ${which}, not signed off`;
   return (
-    <JobFrame subtitle={subtitle} undo={false} footer={wide ? undefined : <View style={styles.foot}>{buttons}</View>}>
+    <JobFrame
+      subtitle={subtitleOf(which, revision)}
+      undo={false}
+      actions={items.length > 0 ? <MoreMenu label="Send and export" icon="share" items={menu} /> : undefined}
+      footer={wide || items.length === 0 ? undefined : <View style={styles.foot}>{printAll}</View>}
+    >
       <View style={styles.page}>
         <RevisionBar revisions={all} which={which} onWhich={setChosen} />
-        {actions.error && <Banner look="attention" icon="warn" fact="The sheets did not come." act={actions.error} />}
-        {waiting && <Text kind="second">Waiting until your last changes are with the server.</Text>}
-        {pages.length === 0 ? (
-          <StateCard
-            icon="slabs"
-            title={nest.searching && which === 'draft' ? 'Trying plans' : 'No slab plan yet'}
-            body={
-              nest.searching && which === 'draft'
-                ? 'The cut sheets come as soon as the pieces are on slabs.'
-                : 'A cut sheet needs pieces that are laid on slabs.'
-            }
-            actions={<Button label="To the slabs" onPress={() => router.navigate(`/jobs/${job.id}/slabs` as never)} />}
+        {old && (
+          <Banner
+            look="attention"
+            icon="bin"
+            fact={`Revision ${old.revision} was printed.`}
+            act={`Bin it before cutting. It was ${old.by ? `${old.by}, ` : ''}${new Date(old.at).toLocaleDateString()}.`}
           />
+        )}
+        {actions.error && <Banner look="attention" icon="warn" fact="The file did not come." act={actions.error} />}
+        {waiting && <Text kind="second">Waiting until your last changes are with the server.</Text>}
+        {!item ? (
+          <NothingYet draft={which === 'draft'} loading={shown === null} />
         ) : (
           <View style={[styles.body, wide && styles.row]}>
-            <View style={[styles.cards, wide && styles.cardsWide]} role="list" aria-label="Sheets">
-              {slabs.map((slab, index) => (
-                <SheetCard
-                  key={index}
-                  title={`Cut sheet ${index + 1}`}
-                  detail={`${slab.name[0]!.toUpperCase()}${slab.name.slice(1)}, ${letters(slab.pieces.map((p) => p.letter))}`}
-                  note={`${slab.cuts.length} saw cuts`}
-                  scene={pages[index]!}
-                  paper={paper}
-                  current={wide && index === open}
-                  onPress={() => setOpen(index)}
-                />
-              ))}
+            <View style={[styles.cards, wide && styles.cardsWide]}>
+              <View role="list" aria-label="Sheets" style={styles.cards}>
+                {items.map((one) => (
+                  <SheetCard
+                    key={one.key}
+                    title={one.title}
+                    detail={one.detail}
+                    note={one.note}
+                    scene={one.pages[0]!}
+                    paper={paper}
+                    current={one.key === item.key}
+                    onPress={() => setOpen(one.key)}
+                  />
+                ))}
+              </View>
               <Segmented
                 label="Paper"
                 options={[
@@ -115,30 +137,44 @@ export function SheetsScreen() {
                 value={paper}
                 onChange={setPaper}
               />
-              {wide && buttons}
+              {wide && printAll}
+              {items.every((one) => one.kind !== 'cut') && (
+                <Text kind="second">Cut sheets come as soon as the pieces are laid on slabs.</Text>
+              )}
               <Text kind="small">
                 Saw, dust and lifting: guards on, extraction running, two people for long pieces. Local codes and the
                 maker’s instructions come first.
               </Text>
             </View>
-            <View style={styles.preview} onLayout={(event) => setWidth(event.nativeEvent.layout.width)}>
-              {width > 0 && pages[Math.min(open, pages.length - 1)] && (
-                <SheetPage
-                  scene={pages[Math.min(open, pages.length - 1)]!}
-                  paper={paper}
-                  width={Math.min(width, 1100)}
-                />
-              )}
-            </View>
+            <SheetPreview key={`${item.key} ${which}`} item={item} paper={paper} actions={actions} disabled={waiting} />
           </View>
         )}
       </View>
+      {mailing && which !== 'draft' && <MailDialog jobId={job.id} revision={which} onClose={() => setMailing(false)} />}
     </JobFrame>
   );
 }
 
-const letters = (all: readonly string[]): string =>
-  all.length < 2 ? all.join('') : `${all.slice(0, -1).join(', ')} and ${all[all.length - 1]}`;
+function subtitleOf(which: number | 'draft', revision: RevisionSummary | null): string {
+  if (which === 'draft') return 'Draft, not signed off';
+  return revision?.signedOff
+    ? `Revision ${which}, signed off by ${revision.signedOff.by.name}`
+    : `Revision ${which}, not signed off`;
+}
+
+function NothingYet({ draft, loading }: { readonly draft: boolean; readonly loading: boolean }) {
+  const router = useRouter();
+  const { job, nest } = useOpenJob();
+  if (loading) return <StateCard icon="clock" title="Fetching the revision" announce="status" />;
+  return (
+    <StateCard
+      icon="tops"
+      title={nest.searching && draft ? 'Trying plans' : 'Nothing to print yet'}
+      body="Sheets are drawn from the tops: lay them first."
+      actions={<Button label="To the tops" onPress={() => router.navigate(`/jobs/${job.id}/tops` as never)} />}
+    />
+  );
+}
 
 const styles = StyleSheet.create({
   page: { gap: space.m },
@@ -146,8 +182,5 @@ const styles = StyleSheet.create({
   row: { flexDirection: 'row', alignItems: 'flex-start' },
   cards: { gap: space.m },
   cardsWide: { width: 372 },
-  preview: { flexGrow: 1, flexShrink: 1, minWidth: 0 },
-  buttons: { flexDirection: 'row', gap: space.m },
-  grow: { flex: 1 },
   foot: { padding: space.m, backgroundColor: color.paper },
 });

@@ -1,18 +1,23 @@
 import { useState } from 'react';
 
 import type { Job } from '@/shared/contracts/jobs';
+import type { SheetChoice } from '@/shared/contracts/sheets';
 import { ApiError } from '../api/api-problem';
+import { fetchBundle, useAfterPrint } from '../api/use-sheet-acts';
 import { fetchSheets } from '../api/use-sheets';
 import { KEEP_MS, saveAs } from './save-file';
 
 export interface SheetActions {
-  readonly busy: 'download' | 'print' | null;
+  readonly busy: 'download' | 'print' | 'bundle' | null;
   readonly error: string | null;
-  readonly download: () => void;
-  readonly print: () => void;
+  /** `pages` such as "1-3,5"; all when left out. */
+  readonly download: (kind: SheetChoice, pages?: string) => void;
+  readonly print: (kind: SheetChoice, pages?: string) => void;
+  /** Everything in one archive. */
+  readonly bundle: () => void;
 }
 
-/** Fetches the PDF of a revision or the draft, and saves or prints it. */
+/** Fetches files of a revision or the draft, and saves or prints them. */
 export function useSheetActions(choice: {
   readonly job: Job;
   readonly revision: number | 'draft';
@@ -21,25 +26,33 @@ export function useSheetActions(choice: {
   const [busy, setBusy] = useState<SheetActions['busy']>(null);
   const [error, setError] = useState<string | null>(null);
   const { job, revision, paper } = choice;
-  const act = async (what: 'download' | 'print', deliver: (address: string) => void) => {
+  const printed = useAfterPrint(job.id);
+  const act = async (what: NonNullable<typeof busy>, file: Promise<Blob>, deliver: (address: string) => void) => {
     setBusy(what);
     setError(null);
     try {
-      const address = URL.createObjectURL(await fetchSheets({ jobId: job.id, kind: 'cut', revision, paper }));
+      const address = URL.createObjectURL(await file);
       deliver(address);
       setTimeout(() => URL.revokeObjectURL(address), KEEP_MS);
+      printed();
     } catch (failure) {
       setError(failure instanceof ApiError ? failure.message : 'The file could not be opened. Try again.');
     } finally {
       setBusy(null);
     }
   };
-  const name = `${String(job.number).padStart(4, '0')}-cut-${revision === 'draft' ? 'draft' : `revision-${revision}`}.pdf`;
+  const version = revision === 'draft' ? 'draft' : `revision-${revision}`;
+  const name = (what: string) => `${String(job.number).padStart(4, '0')}-${what}-${version}`;
+  const sheets = (kind: SheetChoice, pages?: string) =>
+    fetchSheets({ jobId: job.id, kind, revision, paper, ...(pages && { pages }) });
   return {
     busy,
     error,
-    download: () => void act('download', (address) => saveAs(address, name)),
-    print: () => void act('print', printFile),
+    download: (kind, pages) =>
+      void act('download', sheets(kind, pages), (address) => saveAs(address, `${name(kind)}.pdf`)),
+    print: (kind, pages) => void act('print', sheets(kind, pages), printFile),
+    bundle: () =>
+      void act('bundle', fetchBundle(job.id, revision, paper), (address) => saveAs(address, `${name('all')}.zip`)),
   };
 }
 

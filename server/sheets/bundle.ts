@@ -1,3 +1,5 @@
+import type { Readable } from 'node:stream';
+
 import archiver from 'archiver';
 
 import { orderCsv } from '@/geometry/export/order-csv';
@@ -26,7 +28,7 @@ export function sheetBundle(request: SheetRequest): NodeJS.ReadableStream {
     (nested || !sheetEntry(kind).needsSlabs) && sheetEntry(kind).pages(request).length > 0;
   for (const kind of SHEET_KINDS.filter(has)) {
     const pdf = sheetPdf({ ...request, kinds: [kind] });
-    archive.append(pdf as unknown as import('node:stream').Readable, { name: `${kind}.pdf`, date });
+    archive.append(pdf as Readable, { name: `${kind}.pdf`, date });
   }
   const drawings = [
     ['tops', topsDrawing(plan, head.jobName)],

@@ -147,7 +147,7 @@ it('goes from tape readings to a cut sheet on a phone, and the sheet says what t
   await tapTo(/^Make the sheets$/, /\/sheets$/);
   const [download] = await Promise.all([
     page.waitForEvent('download'),
-    page.getByRole('button', { name: 'Download' }).tap(),
+    page.getByRole('button', { name: 'All cut sheets' }).tap(),
   ]);
   const fromApp = path.join(folder, 'app.pdf');
   await download.saveAs(fromApp);
@@ -188,7 +188,7 @@ it('goes from tape readings to a cut sheet on a phone, and the sheet says what t
   await page.getByText('Revision 1, signed off by').first().waitFor();
   const [signed] = await Promise.all([
     page.waitForEvent('download'),
-    page.getByRole('button', { name: 'Download' }).tap(),
+    page.getByRole('button', { name: 'All cut sheets' }).tap(),
   ]);
   const final = path.join(folder, 'signed.pdf');
   await signed.saveAs(final);
