@@ -47,7 +47,7 @@ export function ConnectorsCard() {
       {plan.joints.map((joint) => (
         <OneJoint key={joint.between.join('|')} joint={joint} />
       ))}
-      <FromLink line="Wood beside a mortise" />
+      <FromLink line="Wood left beside a mortise" />
     </Section>
   );
 }

@@ -78,7 +78,7 @@ export const FORMULAS: readonly SourcedFormula[] = [
     source: 'NDS commentary 11.1.2 and a code copy',
   },
   {
-    name: 'Wood beside a mortise',
+    name: 'Wood left beside a mortise',
     text: '(distance from the point - half the width) x sin f - depth x cos f.',
     standing: 'computed',
     source: 'geometry of a rectangle in a wedge',

@@ -3,13 +3,16 @@ import type { TextRun } from '../display-list';
 import { numberPages } from '../paper/number-pages';
 import { runsHeight, styles } from '../paper/page-builder';
 import { PageFlow } from '../paper/page-flow';
+import { jobSettings } from '../../wood/job-settings';
 import type { SheetPages } from '../paper/sheet-request';
 import { addJointFace, FACE_HEIGHT } from './joint-face';
 import { jointPlaces } from './joint-places';
 import { inchesRun, jointWords, SHORT_PIECE, shortPieces } from './joint-words';
 
 /** Every miter, butt and seam with its face, its connectors and how it is closed; none where nothing meets. */
-export const jointPages: SheetPages = ({ plan, layout, settings, head, paper, numbering }) => {
+export const jointPages: SheetPages = ({ plan, layout, settings: usual, head, paper, numbering }) => {
+  // The plan was made with the connector chosen for this job; its mortises are printed, not the shop's usual ones.
+  const settings = jobSettings(layout, usual);
   const places = jointPlaces(plan, settings);
   if (places.length === 0) return [];
   const shop = places.filter((place) => place.assembled === 'shop').length;
