@@ -107,8 +107,9 @@ describe('the plan command', () => {
     expect(plan.cost).toMatchObject({ proved: true, gap: 0 });
     const laid = plan.slabs.flatMap((slab) => slab.pieces.map((piece) => piece.letter)).sort();
     expect(laid).toEqual(plan.pieces.map((piece) => piece.letter).sort());
-    expect(plan.sheets).toHaveLength(1);
-    expect(existsSync(plan.sheets[0]!)).toBe(true);
+    const kinds = plan.sheets.map((file) => /-([a-z]+)\.pdf$/.exec(file)![1]);
+    expect(kinds).toEqual(expect.arrayContaining(['cut', 'joint', 'fit', 'order', 'finish', 'labels', 'customer']));
+    for (const file of plan.sheets) expect(existsSync(file)).toBe(true);
   });
 
   it('names the reading that makes a room impossible, and exits 2', () => {

@@ -75,7 +75,7 @@ describe('the sheets on a wide screen', () => {
     await page.getByRole('menuitem', { name: 'Mail to somebody of the crew' }).click();
     await page.getByRole('button', { name: 'Send', exact: true }).click();
     await page.getByText('Choose who gets it.').waitFor();
-    await page.getByLabel('To').selectOption({ label: app.shop.people.shop_hand.name });
+    await page.getByLabel('To', { exact: true }).selectOption({ label: app.shop.people.shop_hand.name });
     await page.getByRole('button', { name: 'Send', exact: true }).click();
     await page.getByText(`A mail is on its way to ${app.shop.people.shop_hand.name}`).waitFor();
     expect(await app.db('outbox').where({ kind: 'sheets' })).toHaveLength(1);
