@@ -1,5 +1,6 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 
+import type { LabelChoice } from '@/geometry/scene/labels/label-grids';
 import type { NestPlan } from '@/geometry/nest/types';
 import { API_ROOT } from '@/shared/contracts/contract';
 import { freezeRevision, listRevisions, signOff } from '@/shared/contracts/revisions';
@@ -54,11 +55,18 @@ export interface SheetFile {
   readonly paper: 'letter' | 'a4';
   /** Such as "1-3,5"; all when left out. */
   readonly pages?: string;
+  /** How labels are printed. */
+  readonly labels?: LabelChoice;
 }
 
 /** Sheets as a PDF. */
-export function fetchSheets({ jobId, kind, revision, paper, pages }: SheetFile): Promise<Blob> {
-  const query = new URLSearchParams({ revision: String(revision), paper, ...(pages && { pages }) });
+export function fetchSheets({ jobId, kind, revision, paper, pages, labels }: SheetFile): Promise<Blob> {
+  const query = new URLSearchParams({
+    revision: String(revision),
+    paper,
+    ...(pages && { pages }),
+    ...(labels && { grid: labels.grid, start: String(labels.start) }),
+  });
   const address = SHEET_PATH.replace(':jobId', jobId).replace(':kind', kind);
   return fetchFile(`${API_ROOT}${address}?${query.toString()}`);
 }

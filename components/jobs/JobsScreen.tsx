@@ -16,6 +16,7 @@ import type { Stage } from '../ui/StageChip';
 import { Text } from '../ui/Text';
 import { color, radius, space } from '../ui/tokens';
 import { useWide } from '../ui/use-wide';
+import { ImportJobDialog } from './ImportJobDialog';
 import { JobCard, JobRow, JobTableHead } from './JobCard';
 import { stageWord } from './job-words';
 import { JobsState } from './JobsState';
@@ -34,6 +35,7 @@ export function JobsScreen() {
   const [whose, setWhose] = useState<'mine' | 'all'>('all');
   const [stage, setStage] = useState<Stage | null>(null);
   const [making, setMaking] = useState(false);
+  const [importing, setImporting] = useState(false);
   const filter = useFilter(search, whose === 'mine' ? (me?.personId ?? null) : null, stage);
   const list = useJobList(filter);
   const jobs = useMemo(() => list.data?.pages.flatMap((page) => page.items) ?? [], [list.data]);
@@ -136,7 +138,17 @@ export function JobsScreen() {
         open={making}
         onClose={() => setMaking(false)}
         onMade={(job) => router.navigate(`/jobs/${job.id}/room` as never)}
+        onFile={() => {
+          setMaking(false);
+          setImporting(true);
+        }}
       />
+      {importing && (
+        <ImportJobDialog
+          onClose={() => setImporting(false)}
+          onMade={(job) => router.navigate(`/jobs/${job.id}/tops` as never)}
+        />
+      )}
     </PageFrame>
   );
 }

@@ -11,10 +11,12 @@ export interface NewJobDialogProps {
   readonly open: boolean;
   readonly onClose: () => void;
   readonly onMade: (job: Job) => void;
+  /** Opens a job file instead. */
+  readonly onFile: () => void;
 }
 
 /** A new job in three fields; only the name has to be typed. */
-export function NewJobDialog({ open, onClose, onMade }: NewJobDialogProps) {
+export function NewJobDialog({ open, onClose, onMade, onFile }: NewJobDialogProps) {
   const [name, setName] = useState('');
   const [customerName, setCustomer] = useState('');
   const [siteAddress, setAddress] = useState('');
@@ -49,6 +51,7 @@ export function NewJobDialog({ open, onClose, onMade }: NewJobDialogProps) {
       onClose={onClose}
       actions={
         <>
+          <Button label="From a job file" onPress={onFile} />
           <Button label="Cancel" onPress={onClose} />
           <Button label="Start measuring" look="primary" busy={create.isPending} onPress={submit} />
         </>

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import type { Paper } from '@/geometry/scene/paper/sheet-head';
@@ -15,12 +15,14 @@ export interface SheetPreviewProps {
   readonly paper: Paper;
   readonly actions: SheetActions;
   readonly disabled: boolean;
+  /** Choices of this kind of sheet, over its pages. */
+  readonly children?: ReactNode;
 }
 
 const WIDEST = 1100;
 
 /** Every page of one sheet as it will be printed, each to be taken or left out. */
-export function SheetPreview({ item, paper, actions, disabled }: SheetPreviewProps) {
+export function SheetPreview({ item, paper, actions, disabled, children }: SheetPreviewProps) {
   const [width, setWidth] = useState(0);
   const [left, setLeft] = useState<ReadonlySet<number>>(new Set());
   const chosen = item.numbers.filter((_, i) => !left.has(i));
@@ -63,6 +65,7 @@ export function SheetPreview({ item, paper, actions, disabled }: SheetPreviewPro
           onPress={() => actions.print(item.kind, pages)}
         />
       </View>
+      {children}
       {width > 0 &&
         item.pages.map((scene, i) => (
           <View key={`${item.key} ${i}`} style={styles.page}>

@@ -3,6 +3,7 @@ import { useMemo, useState } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { useStore } from 'zustand';
 
+import { labelGrid, usualGrid, type LabelChoice } from '@/geometry/scene/labels/label-grids';
 import type { Paper } from '@/geometry/scene/paper/sheet-head';
 import type { RevisionSummary } from '@/shared/contracts/revisions';
 import { useMay } from '../api/use-session';
@@ -19,6 +20,7 @@ import { Text } from '../ui/Text';
 import { useToast } from '../ui/ToastProvider';
 import { color, space } from '../ui/tokens';
 import { useWide } from '../ui/use-wide';
+import { LabelChoiceFields } from './LabelChoiceFields';
 import { MailDialog } from './MailDialog';
 import { planFiles } from './plan-files';
 import { printedBefore } from './printed-before';
@@ -42,20 +44,28 @@ export function SheetsScreen() {
   const prints = usePrints(job.id);
   const [chosen, setChosen] = useState<number | 'draft' | null>(null);
   const [paper, setPaper] = useState<Paper>('letter');
+  const [chosenLabels, setLabels] = useState<LabelChoice | null>(null);
   const [open, setOpen] = useState<string | null>(null);
   const [mailing, setMailing] = useState(false);
   const all = useMemo(() => revisions.data?.revisions ?? [], [revisions.data]);
   const which = chosen ?? all[0]?.number ?? 'draft';
   const shown = useShownPlan(job.id, which);
   const revision = all.find((r) => r.number === which) ?? null;
+  const labels = useMemo<LabelChoice>(
+    () =>
+      chosenLabels && labelGrid(chosenLabels.grid).paper === paper
+        ? chosenLabels
+        : { grid: usualGrid(paper), start: 1 },
+    [chosenLabels, paper],
+  );
   const items = useMemo(() => {
     if (!shown || shown.plan.pieces.length === 0) return [];
     const head = sheetHeadOf(job, revision, new Date().toISOString());
-    return sheetItems({ ...shown, settings, head, paper, prices });
-  }, [shown, job, revision, settings, paper, prices]);
+    return sheetItems({ ...shown, settings, head, paper, prices, labels });
+  }, [shown, job, revision, settings, paper, prices, labels]);
   const item = items.find((one) => one.key === open) ?? items[0];
   const pending = useStore(store, (state) => state.pending.length);
-  const actions = useSheetActions({ job, revision: which, paper });
+  const actions = useSheetActions({ job, revision: which, paper, labels });
   const waiting = which === 'draft' && pending > 0;
   const pages = items.reduce((sum, one) => sum + one.pages.length, 0);
   const old = printedBefore(prints.data?.prints ?? [], all[0]?.number ?? null);
@@ -146,7 +156,9 @@ export function SheetsScreen() {
                 maker’s instructions come first.
               </Text>
             </View>
-            <SheetPreview key={`${item.key} ${which}`} item={item} paper={paper} actions={actions} disabled={waiting} />
+            <SheetPreview key={`${item.key} ${which}`} item={item} paper={paper} actions={actions} disabled={waiting}>
+              {item.kind === 'labels' && <LabelChoiceFields paper={paper} value={labels} onChange={setLabels} />}
+            </SheetPreview>
           </View>
         )}
       </View>

@@ -3,6 +3,7 @@ import type { ShopSettings } from '@/geometry/core/settings';
 import type { Plan } from '@/geometry/plan/types';
 import { cutSheetScene } from '@/geometry/scene/cut-sheet/cut-sheet-scene';
 import type { Scene } from '@/geometry/scene/display-list';
+import type { LabelChoice } from '@/geometry/scene/labels/label-grids';
 import type { Paper, SheetHead } from '@/geometry/scene/paper/sheet-head';
 import { sheetEntry, SHEET_KINDS, type SheetKind } from '@/geometry/scene/sheet-kinds';
 import { placeSlab } from '@/geometry/scene/slab/placed-slab';
@@ -26,6 +27,7 @@ export interface SheetSource {
   readonly head: SheetHead;
   readonly paper: Paper;
   readonly prices: boolean;
+  readonly labels?: LabelChoice;
 }
 
 /** Everything that can be printed of a plan, cut sheets slab by slab first. */

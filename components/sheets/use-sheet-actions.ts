@@ -1,5 +1,6 @@
 import { useState } from 'react';
 
+import type { LabelChoice } from '@/geometry/scene/labels/label-grids';
 import type { Job } from '@/shared/contracts/jobs';
 import type { SheetChoice } from '@/shared/contracts/sheets';
 import { ApiError } from '../api/api-problem';
@@ -22,10 +23,11 @@ export function useSheetActions(choice: {
   readonly job: Job;
   readonly revision: number | 'draft';
   readonly paper: 'letter' | 'a4';
+  readonly labels: LabelChoice;
 }): SheetActions {
   const [busy, setBusy] = useState<SheetActions['busy']>(null);
   const [error, setError] = useState<string | null>(null);
-  const { job, revision, paper } = choice;
+  const { job, revision, paper, labels } = choice;
   const printed = useAfterPrint(job.id);
   const act = async (what: NonNullable<typeof busy>, file: Promise<Blob>, deliver: (address: string) => void) => {
     setBusy(what);
@@ -44,7 +46,7 @@ export function useSheetActions(choice: {
   const version = revision === 'draft' ? 'draft' : `revision-${revision}`;
   const name = (what: string) => `${String(job.number).padStart(4, '0')}-${what}-${version}`;
   const sheets = (kind: SheetChoice, pages?: string) =>
-    fetchSheets({ jobId: job.id, kind, revision, paper, ...(pages && { pages }) });
+    fetchSheets({ jobId: job.id, kind, revision, paper, labels, ...(pages && { pages }) });
   return {
     busy,
     error,

@@ -24,9 +24,7 @@ export function piecePath(piece: PathPiece): ArcPath {
 }
 
 /** Corners of a piece that are rounded: place in its shape, radius in inches, and which end and edge they lie at. */
-export function exposedCorners(
-  piece: Pick<Piece, 'shape' | 'left' | 'right' | 'finishedEdges'>,
-): readonly {
+export function exposedCorners(piece: Pick<Piece, 'shape' | 'left' | 'right' | 'finishedEdges'>): readonly {
   readonly corner: number;
   readonly radius: number;
   readonly end: 'left' | 'right';

@@ -51,6 +51,11 @@ describe('the sheets on a wide screen', () => {
     expect(pagesOf(one)).toBe(1);
     expect(poppler('pdftotext', ['-layout'], one)).toContain('Fit sheet, continued');
 
+    await page.getByRole('button', { name: /^Label,/ }).click();
+    await page.getByLabel('Labels in the printer').selectOption({ label: 'Single, 4 × 2 in' });
+    const labels = await fileOf(page, () => page.getByRole('button', { name: 'Download' }).click());
+    expect(poppler('pdfinfo', [], labels, false)).toMatch(/Page size:\s+288 x 144 pts/);
+
     await page.getByRole('button', { name: 'Send and export' }).click();
     const dxf = await fileOf(page, () => page.getByRole('menuitem', { name: 'Tops, DXF' }).click());
     expect(new DxfParser().parseSync(dxf.toString())!.entities.length).toBeGreaterThan(4);
@@ -91,5 +96,29 @@ describe('the sheets on a phone', () => {
     const empty = await importJob(app, { ...QUAY_STREET_SCULLERY, runs: [], cutouts: [], joints: [], seams: [] });
     await page.goto(`${app.address}/jobs/${empty}/sheets`);
     await page.getByText('Nothing to print yet').waitFor();
+  });
+});
+
+describe('a job file', () => {
+  it('is drawn and counted before it is opened, and refused with the place that is wrong', async () => {
+    const page = await openSignedIn(browser, app, '/jobs', WIDE);
+    const choose = async (name: string, file: unknown) =>
+      page
+        .getByLabel('Job file')
+        .setInputFiles({ name, mimeType: 'application/json', buffer: Buffer.from(JSON.stringify(file)) });
+    await page.getByRole('button', { name: 'New job' }).first().click();
+    await page.getByRole('button', { name: 'From a job file' }).click();
+    await choose('bad.json', { ...QUAY_STREET_SCULLERY, runs: [{ id: '1', wall: 'Q', left: { kind: 'open' }, right: { kind: 'open' } }], cutouts: [], joints: [], seams: [] }); // prettier-ignore
+    await page.getByText('bad.json cannot be opened. Nothing was stored.').waitFor();
+    await page.getByText('runs[0].wall: There is no wall "Q" in this room.').waitFor();
+    await choose('scullery.json', { ...QUAY_STREET_SCULLERY, name: 'Scullery from a file' });
+    await page.getByText('Scullery from a file').waitFor();
+    await page.getByText('3 walls, 3 runs, 0 islands, 1 cutout, 4 pieces').waitFor();
+    await page.getByRole('button', { name: 'Open as a new job' }).click();
+    await page.waitForURL(/\/tops$/);
+    await page
+      .getByRole('button', { name: /^Piece P,/ })
+      .first()
+      .waitFor();
   });
 });
