@@ -104,7 +104,7 @@ describe('a job file', () => {
     const page = await openSignedIn(browser, app, '/jobs', WIDE);
     const choose = async (name: string, file: unknown) =>
       page
-        .getByLabel('Job file')
+        .getByLabel('Job file', { exact: true })
         .setInputFiles({ name, mimeType: 'application/json', buffer: Buffer.from(JSON.stringify(file)) });
     await page.getByRole('button', { name: 'New job' }).first().click();
     await page.getByRole('button', { name: 'From a job file' }).click();
