@@ -48,6 +48,7 @@ module.exports = {
       ...postgres,
       displayName: 'browser',
       testMatch: ['<rootDir>/tests/e2e/**/*.test.ts'],
+      setupFilesAfterEnv: ['<rootDir>/tests/helpers/browser-setup.ts'],
     },
   ],
 };

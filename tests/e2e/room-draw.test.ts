@@ -51,10 +51,17 @@ async function drag(page: Page, from: { x: number; y: number }, by: { x: number;
 /** A U of 96, 120 and 96 in, typed on the wide screen's pad by keyboard. */
 async function tapedU(page: Page): Promise<void> {
   await page.getByTestId('shape-U').click();
+  const pad = page.getByRole('group', { name: /^Length of / });
   for (const reading of ['96', '60', '120', '60', '96']) {
-    await page.getByRole('button', { name: /^Next:/ }).waitFor();
+    await pad.waitFor();
+    const title = await pad.getAttribute('aria-label');
     await page.keyboard.type(reading);
     await page.keyboard.press('Enter');
+    // A slow machine shows the pad it had for a moment longer: the next one has another title.
+    await page.waitForFunction((was) => {
+      const now = document.querySelector('[role="group"][aria-label^="Length of "]');
+      return now !== null && now.getAttribute('aria-label') !== was;
+    }, title);
   }
   await page.getByRole('group', { name: /^Length of Cross/ }).waitFor();
   await page.keyboard.press('Escape');
