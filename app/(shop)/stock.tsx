@@ -1,6 +1,6 @@
-import { useShopPages } from '@/components/shell/use-shop-pages';
+import { useJobScreens } from '@/components/shell/use-job-screens';
 
 export default function Stock() {
-  const { StockScreen } = useShopPages();
+  const { StockScreen } = useJobScreens();
   return <StockScreen />;
 }

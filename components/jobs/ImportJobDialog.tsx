@@ -6,6 +6,7 @@ import { importJob } from '@/shared/contracts/job-files';
 import type { Job } from '@/shared/contracts/jobs';
 import { call } from '../api/client';
 import { jobKeys } from '../api/use-jobs';
+import { fetchJobScreens } from '../shell/use-job-screens';
 import { Button } from '../ui/Button';
 import { Dialog } from '../ui/Dialog';
 import { Text } from '../ui/Text';
@@ -41,7 +42,7 @@ export function ImportJobDialog({ onClose, onMade }: ImportJobDialogProps) {
     event.target.value = '';
     if (!file) return;
     // What reads and draws a job is fetched when somebody brings a file.
-    const { readJobFile, JobFilePreview: Preview } = await import('./job-file-preview');
+    const { readJobFile, JobFilePreview: Preview } = await fetchJobScreens();
     setKey(crypto.randomUUID());
     open.reset();
     setShown({ name: file.name, reading: readJobFile(await file.text()), Preview });

@@ -9,3 +9,9 @@ export { SheetsScreen } from '../sheets/SheetsScreen';
 export { SlabsScreen } from '../slabs/SlabsScreen';
 export { TopsScreen } from '../tops/TopsScreen';
 export { WorkScreen } from '../work/WorkScreen';
+
+// Pages that draw with the same code come with the same part: what two late parts share, the first screen would have to load.
+export { CrewScreen } from '../crew/CrewScreen';
+export { JobFilePreview, readJobFile } from '../jobs/job-file-preview';
+export { SettingsScreen } from '../settings/SettingsScreen';
+export { StockScreen } from '../stock/StockScreen';
